@@ -1,0 +1,6 @@
+namespace Boltup.Cli;
+
+internal static class Program
+{
+    private static int Main() => 0;
+}

@@ -1,0 +1,60 @@
+using System.Numerics;
+using Boltup.Engine.Diagnostics;
+using Boltup.Engine.Spectra;
+
+namespace Boltup.Engine.Prediction;
+
+/// <summary>Everything that one prediction found; immutable, and all that the writers see.</summary>
+/// <param name="Title">Title of the assembly.</param>
+/// <param name="Axis">Frequency lines on which the assembly was coupled.</param>
+/// <param name="Operations">One entry per operation, in the order of the assembly file.</param>
+/// <param name="Conditioning">How well the interface problem could be solved.</param>
+/// <param name="Kernels">Name of the batch kernels that ran.</param>
+/// <param name="Diagnostics">Notes and warnings of the run.</param>
+public sealed record PredictionResult(
+    string Title,
+    FrequencyAxis Axis,
+    IReadOnlyList<OperationResult> Operations,
+    Conditioning Conditioning,
+    string Kernels,
+    IReadOnlyList<Diagnostic> Diagnostics);
+
+/// <summary>What one operation does to the responses and joints.</summary>
+/// <param name="Axis">Lines of this operation: those of its forces.</param>
+/// <param name="Amplitude">What the magnitude of a spectrum line is.</param>
+public sealed record OperationResult(
+    string Name,
+    FrequencyAxis Axis,
+    Amplitude Amplitude,
+    IReadOnlyList<ResponseSpectrum> Responses,
+    IReadOnlyList<JointForceSpectrum> JointForces);
+
+/// <summary>One response over the lines of its operation.</summary>
+/// <param name="Name">The response's name in the assembly file.</param>
+/// <param name="Dof">Where it is, as <c>part.point.direction</c>.</param>
+/// <param name="Unit">SI unit of the values.</param>
+/// <param name="Values">One value per line; of an energy sum the magnitude, with no phase.</param>
+public sealed record ResponseSpectrum(string Name, string Dof, Quantity Quantity, string Unit, IReadOnlyList<Complex> Values);
+
+/// <summary>The force a joint carries from the first to the second point of its <c>between</c>, in the axes of the assembly.</summary>
+/// <param name="Unit"><c>N</c>, or <c>N·m</c> for a rotation.</param>
+public sealed record JointForceSpectrum(string Joint, Direction Direction, string Unit, IReadOnlyList<Complex> Values);
+
+/// <summary>1-norm condition number estimates of the interface problem, one per line of the axis; empty when nothing is joined.</summary>
+/// <param name="PerLine">Estimate per line, with rotations scaled by <paramref name="RotationLength"/>.</param>
+/// <param name="RotationLength">The length in metres by which rotations were divided before the estimate.</param>
+public sealed record Conditioning(IReadOnlyList<double> PerLine, double RotationLength)
+{
+    /// <summary>The largest estimate, or 1 when nothing is joined.</summary>
+    public double Worst => PerLine.Count == 0 ? 1 : PerLine.Max();
+}
+
+/// <summary>What the magnitude of a line of a spectrum is.</summary>
+public enum Amplitude
+{
+    /// <summary>Root mean square; the default, said by a note where nothing states it.</summary>
+    Rms,
+
+    /// <summary>Peak: √2 times the root mean square of a sine.</summary>
+    Peak,
+}
