@@ -135,11 +135,13 @@ public sealed class MeasuredPart : IPartModel
             {
                 diagnostics.Warning(
                     EngineCodes.FrfInterpolated,
-                    $"part `{part}`: FRFs were interpolated at {_maps[source]!.Interpolated} lines",
+                    $"part `{part}`: FRFs were interpolated at {Lines(_maps[source]!.Interpolated)}",
                     help: "a resonance narrower than three lines of the data is misjudged by interpolation; measure on a finer grid or ask for the lines of the data",
                     notes: [$"data: {source}", $"asked for: {axis}"]);
             }
         }
+
+        private static string Lines(int count) => count == 1 ? "1 line" : $"{count} lines";
 
         private AxisMap? MapFor(IFrfCurve curve)
         {
