@@ -140,4 +140,11 @@ public static class EngineCodes
         "With e^{+jωt} the imaginary part of a driving-point receptance is never positive (Re mobility ≥ 0). Where it is, the sign, the axis, the time convention or the measurement is wrong.",
         "conjugated FRFs, a flipped sensor, excitation and response swapped",
         "Check the sign and axis of sensor and hammer at the point that is named, and whether the FRFs were conjugated on export.");
+
+    public static readonly DiagnosticCode NotReciprocal = new(
+        "ENG020",
+        "FRFs are not reciprocal",
+        "A linear passive structure responds at i to a force at j as it does at j to a force at i (Maxwell–Betti, Rayleigh). Where the two FRFs differ, a sensor or hammer position, axis or calibration differs between the two measurements.",
+        "m1.x / m2.z measured with the sensor turned over",
+        "Check position, direction and calibration of sensor and hammer at the two dofs that are named. Nothing is repaired silently.");
 }

@@ -16,6 +16,9 @@ public sealed class PartLayout(PlacedPart part)
 
     public PlacedPart Part { get; } = part;
 
+    /// <summary>The dofs that take part in joints: the first rows and columns.</summary>
+    public IReadOnlyList<DofCombination> Interface => _interface;
+
     public int InterfaceCount => _interface.Count;
 
     public int ResponseCount => _responses.Count;

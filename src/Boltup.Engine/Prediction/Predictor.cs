@@ -1,7 +1,7 @@
-using System.Numerics;
 using Boltup.Engine.Coupling;
 using Boltup.Engine.Diagnostics;
 using Boltup.Engine.Kernels;
+using Boltup.Engine.Parts;
 using Boltup.Engine.Spectra;
 
 namespace Boltup.Engine.Prediction;
@@ -49,7 +49,7 @@ public static class Predictor
             PartLayout part = layout.Parts[i];
             if (part.IsUsed)
             {
-                frfs[i] = part.Part.Evaluate(assembly.Axis, part.Rows, part.Columns, bags[i]);
+                frfs[i] = EvaluatePart(part, assembly.Axis, bags[i]);
             }
         });
         foreach (DiagnosticBag bag in bags)
@@ -58,5 +58,16 @@ public static class Predictor
         }
 
         return diagnostics.HasErrors ? null : frfs;
+    }
+
+    private static TiledMatrix? EvaluatePart(PartLayout part, FrequencyAxis axis, DiagnosticBag diagnostics)
+    {
+        TiledMatrix? frf = part.Part.Evaluate(axis, part.Rows, part.Columns, diagnostics);
+        if (frf is not null)
+        {
+            FrfQuality.Check(part.Part.Name, part.Part.Origin, axis, part.Interface, frf, diagnostics);
+        }
+
+        return frf;
     }
 }
