@@ -36,11 +36,18 @@ public class MountLawTests
     }
 
     [Fact]
-    public void ScaledMount_OfAMatrix_ScalesEveryEntry()
+    public void MatrixMount_WithDampers_IsHystereticPlusViscousOnTheDiagonal()
     {
-        var like = new MatrixMount([Direction.X, Direction.Y, Direction.Z], new double[,] { { 3, 1, 0 }, { 1, 4, 0 }, { 0, 0, 5 } }, 0.1);
-        Near.Equal(new Complex(0.5, 0.05), At(new ScaledMount(like, 0.5), 0, 0, 1), 1e-15);
+        Near.Equal(new Complex(4, 0.4 + 2 * Math.PI * 30 * 7), At(Coupled, 1, 1, 1), 1e-15);
+        Near.Equal(new Complex(1, 0.1), At(Coupled, 1, 1, 0), 1e-15);
     }
+
+    [Fact]
+    public void ScaledMount_OfAMatrix_ScalesEveryEntry() =>
+        Near.Equal(new Complex(0.5, 0.05), At(new ScaledMount(Coupled, 0.5), 0, 0, 1), 1e-15);
+
+    private static MatrixMount Coupled => new(
+        [Direction.X, Direction.Y, Direction.Z], new double[,] { { 3, 1, 0 }, { 1, 4, 0 }, { 0, 0, 5 } }, 0.1, [0, 7, 0]);
 
     private static Complex At(MountLaw mount, int line, int row, int column)
     {
