@@ -67,7 +67,7 @@ internal sealed class CouplingSolver
             _matrix = new TiledMatrix(Tiling.Lanes, solver._order, solver._order);
             _partMotion = new TiledMatrix(Tiling.Lanes, solver._layout.Parts.Max(part => part.InterfaceCount), cases);
             _partForces = new TiledMatrix(Tiling.Lanes, solver._layout.Parts.Max(part => part.Columns.Count), cases);
-            _lu = new BatchLu(solver._order, cases);
+            _lu = new BatchLu(solver._order);
         }
 
         public void Solve(int tile)
@@ -143,7 +143,7 @@ internal sealed class CouplingSolver
         private void KeepCondition(int tile)
         {
             Span<double> lanes = stackalloc double[Tiling.Lanes];
-            _lu.EstimateCondition(lanes);
+            _lu.EstimateCondition(_matrix.Tile(0), lanes);
             int first = tile * Tiling.Lanes;
             lanes[..Math.Min(Tiling.Lanes, _solution.Condition.Length - first)].CopyTo(_solution.Condition.AsSpan(first));
         }

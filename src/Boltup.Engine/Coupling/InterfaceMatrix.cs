@@ -16,7 +16,7 @@ internal sealed class InterfaceMatrix
     private readonly IReadOnlyList<TiledMatrix?> _frfs;
     private readonly TiledMatrix _stiffness = new(Tiling.Lanes, LargestMount, LargestMount);
     private readonly TiledMatrix _compliance = new(Tiling.Lanes, LargestMount, LargestMount);
-    private readonly BatchLu _mountLu = new(LargestMount, LargestMount);
+    private readonly BatchLu _mountLu = new(LargestMount);
     private readonly int _order;
 
     /// <param name="frfs">FRFs of each part in the order of the layout, null for a part that is not used.</param>

@@ -43,7 +43,7 @@ public sealed class LumpedPart : IPartModel
         var frf = new FrfMatrix(axis, rows, columns);
         var dynamicStiffness = new TiledMatrix(Tiling.Lanes, order, order);
         var unitForces = new TiledMatrix(Tiling.Lanes, order, columns.Count);
-        var lu = new BatchLu(order, columns.Count);
+        var lu = new BatchLu(order);
         var singularHz = new List<double>();
         for (int tile = 0; tile < axis.TileCount; tile++)
         {
