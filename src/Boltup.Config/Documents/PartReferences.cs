@@ -1,0 +1,64 @@
+using Boltup.Config.Binding;
+using Boltup.Engine.Diagnostics;
+
+namespace Boltup.Config.Documents;
+
+/// <summary>Checks that the names within a part file agree.</summary>
+internal static class PartReferences
+{
+    public static void Check(PartDocument part, DiagnosticBag diagnostics)
+    {
+        CheckNodes(part, diagnostics);
+        if (part.Model is LumpedModelDocument lumped)
+        {
+            CheckLumped(part, lumped, diagnostics);
+        }
+    }
+
+    private static void CheckNodes(PartDocument part, DiagnosticBag diagnostics)
+    {
+        var taken = new Dictionary<int, PointDocument>();
+        foreach (PointDocument point in part.Points)
+        {
+            if (point.Node is { } node && !taken.TryAdd(node.Value, point))
+            {
+                diagnostics.Error(ConfigCodes.SameNode, $"points `{taken[node.Value].Name}` and `{point.Name}` have the same node {node.Value}",
+                    node.Span, notes: $"the other is at {taken[node.Value].Node!.Span}");
+            }
+        }
+    }
+
+    private static void CheckLumped(PartDocument part, LumpedModelDocument lumped, DiagnosticBag diagnostics)
+    {
+        string[] masses = [.. lumped.Masses.Select(mass => mass.Point.Value)];
+        foreach (PointDocument point in part.Points.Where(point => !masses.Contains(point.Name.Value)))
+        {
+            UnknownMass(point.Name.Value, point.Name.Span, masses, diagnostics);
+        }
+
+        foreach (LumpedLinkDocument link in lumped.Links)
+        {
+            CheckLink(link, masses, diagnostics);
+        }
+    }
+
+    private static void CheckLink(LumpedLinkDocument link, string[] masses, DiagnosticBag diagnostics)
+    {
+        foreach (Marked<string?> end in new[] { link.First, link.Second })
+        {
+            if (end.Value is string name && !masses.Contains(name))
+            {
+                UnknownMass(name, end.Span, masses, diagnostics);
+            }
+        }
+
+        if (link.First.Value == link.Second.Value)
+        {
+            diagnostics.Error(ConfigCodes.JoinedToItself, $"a link joins `{link.First.Value ?? GroundPoint.Name}` to itself", link.Second.Span);
+        }
+    }
+
+    private static void UnknownMass(string name, SourceSpan span, string[] masses, DiagnosticBag diagnostics) =>
+        diagnostics.Error(ConfigCodes.UnknownName, $"no mass is named `{name}`", span, NearestName.Suggest(name, masses),
+            Words.Known("masses", masses));
+}

@@ -1,0 +1,36 @@
+using Boltup.Engine.Diagnostics;
+using YamlDotNet.Core;
+
+namespace Boltup.Config.Yaml;
+
+/// <summary>Turns the marks of the parser into spans that stay on one line.</summary>
+internal sealed class SpanFactory(SourceFile file, string[] lines)
+{
+    public SourceFile File { get; } = file;
+
+    /// <summary>From one mark to another; cut at the end of the first line, at least one character long.</summary>
+    public SourceSpan Between(Mark start, Mark end)
+    {
+        int line = (int)Math.Clamp(start.Line, 1, lines.Length);
+        int lineLength = lines[line - 1].TrimEnd().Length;
+        int column = (int)Math.Clamp(start.Column, 1, Math.Max(1, lines[line - 1].Length + 1));
+        long stop = end.Line == start.Line ? end.Column : lineLength + 1;
+        return new SourceSpan(File.DisplayPath, line, column, (int)Math.Max(1, stop - column));
+    }
+
+    public SourceSpan At(Mark mark) => Between(mark, mark);
+
+    /// <summary>A word that begins at a mark and ends before the next blank, comma or bracket.</summary>
+    public SourceSpan Word(Mark mark)
+    {
+        SourceSpan start = At(mark);
+        string line = lines[start.Line - 1];
+        int end = start.Column - 1;
+        while (end < line.Length && line[end] is not (' ' or '\t' or ',' or '[' or ']' or '{' or '}'))
+        {
+            end++;
+        }
+
+        return start with { Length = Math.Max(1, end - start.Column + 1) };
+    }
+}
