@@ -13,11 +13,13 @@ internal sealed partial class ShapeValidator
 
     private void CheckMap(YamlMap map, Shape shape, string label)
     {
+        var meant = new HashSet<string>(StringComparer.Ordinal);
         foreach (YamlEntry entry in map.Entries)
         {
+            meant.Add(entry.Key);
             if (shape.Find(entry.Key) is not KeyDefinition key)
             {
-                UnknownKey(entry, shape);
+                meant.Add(UnknownKey(entry, shape) ?? entry.Key);
             }
             else if (key.Kind is ReservedKind { AllowsEmpty: false })
             {
@@ -29,13 +31,13 @@ internal sealed partial class ShapeValidator
             }
         }
 
-        foreach (KeyDefinition key in shape.Keys.Where(key => key.IsRequired && map.Find(key.Name) is null))
+        foreach (KeyDefinition key in shape.Keys.Where(key => key.IsRequired && !meant.Contains(key.Name)))
         {
             diagnostics.Error(ConfigCodes.MissingKey, $"{Owner(map, shape, label)} has no `{key.Name}`", map.Span,
                 $"add `{key.Name}`: {key.Kind.Expected}");
         }
 
-        foreach (KeyRule rule in shape.Rules)
+        foreach (KeyRule rule in shape.Rules.Where(rule => rule.Kind == KeyRuleKind.Needs || rule.Keys.Any(map.Has) || !rule.Keys.Any(meant.Contains)))
         {
             CheckRule(map, shape, rule, label);
         }
@@ -43,12 +45,14 @@ internal sealed partial class ShapeValidator
 
     private static string Owner(YamlMap map, Shape shape, string label) => map.Entries.Count == 0 ? $"empty {label}" : $"{label} ({shape.What})";
 
-    private void UnknownKey(YamlEntry entry, Shape shape)
+    /// <summary>Complains and returns the key that was probably meant, so that it does not count as missing too.</summary>
+    private string? UnknownKey(YamlEntry entry, Shape shape)
     {
         IEnumerable<string> known = shape.Keys.Select(key => key.Name);
-        string? suggestion = NearestName.Suggest(entry.Key, known);
-        string[] notes = suggestion is null ? [$"{shape.What} knows {Words.List(known)}"] : [];
-        diagnostics.Error(ConfigCodes.UnknownKey, $"unknown key `{Excerpt.Of(entry.Key)}`", entry.KeySpan, suggestion, notes);
+        string? near = NearestName.Of(entry.Key, known);
+        diagnostics.Error(ConfigCodes.UnknownKey, $"unknown key `{Excerpt.Of(entry.Key)}`", entry.KeySpan,
+            near is null ? null : $"did you mean `{near}`?", near is null ? [$"{shape.What} knows {Words.List(known)}"] : []);
+        return near;
     }
 
     private void CheckRule(YamlMap map, Shape shape, KeyRule rule, string label)

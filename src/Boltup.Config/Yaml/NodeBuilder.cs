@@ -117,7 +117,7 @@ internal sealed partial class NodeBuilder(EventStream events, SpanFactory spans,
         {
             if (events.Current is SequenceEnd end)
             {
-                return new YamlList(spans.File, CollectionSpan(start, start.Style == SequenceStyle.Flow, end, owner), items);
+                return new YamlList(spans.File, CollectionSpan(start, end, owner), items);
             }
 
             if (BuildNode(owner: null) is YamlNode item)
@@ -137,7 +137,7 @@ internal sealed partial class NodeBuilder(EventStream events, SpanFactory spans,
         {
             if (events.Current is MappingEnd end)
             {
-                return new YamlMap(spans.File, CollectionSpan(start, start.Style == MappingStyle.Flow, end, owner), entries);
+                return new YamlMap(spans.File, CollectionSpan(start, end, owner ?? entries.FirstOrDefault()?.KeySpan), entries);
             }
 
             if (BuildEntry() is YamlEntry entry && IsNew(entry, places))
@@ -170,14 +170,6 @@ internal sealed partial class NodeBuilder(EventStream events, SpanFactory spans,
     private bool CanGoOn() => !_gaveUp && events.Failure is null;
 
     /// <summary>A collection in braces or brackets spans itself, one in block style the key that holds it.</summary>
-    private SourceSpan CollectionSpan(NodeEvent start, bool isFlow, ParsingEvent end, SourceSpan? owner)
-    {
-        if (!isFlow)
-        {
-            return owner ?? spans.At(start.Start);
-        }
-
-        SourceSpan span = spans.Between(start.Start, end.End);
-        return span.Length > 1 || end.Start.Line != start.Start.Line ? span : span with { Length = Math.Max(1, (int)(end.Start.Column - start.Start.Column) + 1) };
-    }
+    private SourceSpan CollectionSpan(NodeEvent start, ParsingEvent end, SourceSpan? owner) =>
+        (IsFlow(start) ? spans.Brackets(start.Start, end.Start) : null) ?? owner ?? spans.At(start.Start);
 }

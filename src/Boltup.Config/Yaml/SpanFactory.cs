@@ -20,6 +20,24 @@ internal sealed class SpanFactory(SourceFile file, string[] lines)
 
     public SourceSpan At(Mark mark) => Between(mark, mark);
 
+    /// <summary>A collection with its brackets, or null when it is not written with them.</summary>
+    public SourceSpan? Brackets(Mark start, Mark end)
+    {
+        if (CharacterAt(start) is not ('{' or '['))
+        {
+            return null;
+        }
+
+        SourceSpan span = Between(start, end);
+        return end.Line == start.Line && CharacterAt(end) is '}' or ']' ? span with { Length = (int)(end.Column - start.Column) + 1 } : span;
+    }
+
+    private char? CharacterAt(Mark mark)
+    {
+        string line = lines[Math.Clamp(mark.Line, 1, lines.Length) - 1];
+        return mark.Column >= 1 && mark.Column <= line.Length ? line[(int)mark.Column - 1] : null;
+    }
+
     /// <summary>A word that begins at a mark and ends before the next blank, comma or bracket.</summary>
     public SourceSpan Word(Mark mark)
     {

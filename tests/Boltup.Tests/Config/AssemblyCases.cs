@@ -1,0 +1,67 @@
+namespace Boltup.Tests.Config;
+
+/// <summary>Assembly documents that draw diagnostics; beside them stand the parts <c>source</c> (points m1, m2) and <c>body</c> (points unknown).</summary>
+internal static class AssemblyCases
+{
+    private const string Head = "boltup: assembly/1\nparts: { source: source.part.yaml, body: body.part.yaml }\n";
+    private const string Soft = Head + "mounts: { soft: { stiffness: { x: 90 N/mm } } }\n";
+
+    public static readonly DiagnosticCase[] All =
+    [
+        new("CFG012", Head + "mounts: { front: { «stifness»: { x: 120 N/mm } } }\n", "did you mean `stiffness`?"),
+        new("CFG013", Head + "frequencies: «{ from: 20 Hz, to: 2000 Hz }»\n", "`step`"),
+        new("CFG014", Head + "parts2: 1\n".Replace("parts2: 1", "joints: { a: «rigid» }", StringComparison.Ordinal), "expected a map"),
+        new("CFG014", "boltup: assembly/1\nparts: { source: «[a]» }\n", "the path of a part file, or a map"),
+        new("CFG015", Soft + "joints: { j: { between: [source.m1, body.b1], through: soft, «rigid»: [x] } }\n", "only one of"),
+        new("CFG015", Head + "mounts: { a: «{}» }\n", "`stiffness`, `stiffness_matrix`, `like`, `table`"),
+        new("CFG016", Head + "responses: { r: { at: body.b.z, as: «acceleraton» } }\n", "did you mean `acceleration`?"),
+        new("CFG016", Head + "joints: { j: { between: [source.m1, body.b1], rigid: [x, «p»] } }\n"),
+        new("CFG017", Head + "mounts: { a: { stiffness: { x: «-1 N/m» } } }\n"),
+        new("CFG017", Head + "mounts: { a: { stiffness: { x: 1 N/m }, loss_factor: «-1» } }\n"),
+        new("CFG017", Head + "mounts: { a: { like: b, scale: «0» } }\n", "a positive value"),
+        new("CFG018", Head + "mounts: { a: { stiffness_matrix: «[[1 N/m]]» } }\n"),
+        new("CFG018", Head + "mounts: { a: { stiffness_matrix: [[0, 0, 0], «[0, 0]», [0, 0, 0]] } }\n", "row 2"),
+        new("CFG018", "boltup: assembly/1\nparts: «{}»\n", "at least 1 part"),
+        new("CFG019", Head + "targets: «{ ear: 60 dB }»\n", "not supported yet"),
+        new("CFG021", Head + "mounts: { a: { table: t.csv, «loss_factor»: 0.1 } }\n"),
+        new("CFG021", Head + "mounts: { a: { stiffness: { x: 1 N/m }, «scale»: 2 } }\n", "`like`"),
+        new("CFG021", Head + "responses: { r: { at: body.ear.p, as: «velocity» } }\n", "remove `as`"),
+        new("CFG022", Head + "joints: { j: { between: [source.m1, body.b1], rigid: [x, y, «x»] } }\n"),
+        new("CFG030", Head + "mounts: { a: { stiffness_matrix: [[«5», 0, 0], [0, 0, 0], [0, 0, 0]] } }\n", "write `5 N/mm`"),
+        new("CFG032", Head + "mounts: { a: { stiffness: { rx: 120 «N/mm» } } }\n", "rotational stiffness"),
+        new("CFG035", "boltup: assembly/1\nparts: { «a.b»: body.part.yaml }\n", "full stop"),
+        new("CFG035", "boltup: assembly/1\nparts: { «\"a\\tb\"»: body.part.yaml }\n"),
+        new("CFG036", "boltup: assembly/1\nparts: { «ground»: body.part.yaml }\n"),
+        new("CFG037", Head + "mounts: { «on»: { stiffness: { x: 1 N/m } } }\n"),
+        new("CFG038", Head + "responses: { Driver ear: { at: body.e.p }, «driver-ear»: { at: body.e.x } }\n", "`driver-ear`"),
+        new("CFG039", Head + "responses: { r: { at: «body.b1» } }\n", "`body.b1.z`"),
+        new("CFG039", Head + "responses: { r: { at: «body.b1.q» } }\n", "excitation"),
+        new("CFG039", Head + "joints: { j: { between: [«m1», body.b1], rigid: [x] } }\n", "`part.point`"),
+        new("CFG039", Head + "joints: { j: { between: [source.m1, «body.b1.x»], rigid: [x] } }\n", "without directions"),
+        new("CFG050", Soft + "joints: { j: { between: [source.m1, body.b1], through: «sotf» } }\n", "did you mean `soft`?"),
+        new("CFG050", Soft + "joints: { j: { between: [«sorce.m1», body.b1], through: soft } }\n", "did you mean `source`?"),
+        new("CFG050", Soft + "joints: { j: { between: [«source.m3», body.b1], through: soft } }\n", "known points of `source`: `m1`, `m2`"),
+        new("CFG050", Soft + "joints: { j: { between: [«source.m11», body.b1], through: soft } }\n", "did you mean `source.m1`?"),
+        new("CFG050", Head + "mounts: { a: { like: «b» } }\n", "known mounts: `a`"),
+        new("CFG050", Head + "operations: { run: { blocked_forces: { file: f.csv, part: «engine» } } }\n"),
+        new("CFG050", Head + "responses: { r: { at: «source.m9.x» } }\n"),
+        new("CFG051", Head + "joints: { j: { between: [body.b1, «body.b1»], rigid: [x] } }\n"),
+        new("CFG052", Head + "joints: { j: { between: [source.m1, body.b1], rigid: [x] }, «k»: { between: [body.b1, source.m1], rigid: [y] } }\n"),
+        new("CFG053", Head + "mounts: { a: { like: «a» } }\n"),
+        new("CFG054", Head + "responses: { r: { at: «ground.z» } }\n"),
+        new("CFG054", Head + "joints: { j: { between: [ground, «ground»], rigid: [x] } }\n"),
+        new("CFG055", "boltup: assembly/1\nparts: { body: { file: body.part.yaml, turned: { about: «[0, 0, 0]», by: 90 deg } } }\n"),
+        new("CFG056", Head + "mounts: { a: { stiffness_matrix: [[1 N/m, 2 N/m, 0], [«0», 1 N/m, 0], [0, 0, 0]] } }\n"),
+        new("CFG057", Head + "frequencies: { from: 200 Hz, to: «20 Hz», step: 1 Hz }\n"),
+        new("CFG057", Head + "frequencies: { from: 0 Hz, to: 1000 kHz, step: «1e-9 Hz» }\n", "larger step"),
+        new("CFG060", "boltup: assembly/1\nbased_on: «a.assembly.yaml»\n", "a.assembly.yaml"),
+        new("CFG061", "boltup: assembly/1\nbased_on: base.assembly.yaml\nmounts: { «sfot»: ~ }\n", "did you mean `soft`?"),
+        new("CFG070", "boltup: assembly/1\nbased_on: «bse.assembly.yaml»\n", "did you mean `base.assembly.yaml`?"),
+        new("CFG070", "boltup: assembly/1\nparts: { body: «bdy.part.yaml» }\n", "did you mean `body.part.yaml`?"),
+        new("CFG070", Head + "mounts: { a: { table: «t.csv» } }\n"),
+        new("CFG070", Head + "operations: { run: { blocked_forces: { file: «f.csv», part: source } } }\n"),
+        new("CFG071", "boltup: assembly/1\nparts: { body: «../body.part.yaml» }\n"),
+        new("CFG071", "boltup: assembly/1\nbased_on: «/etc/hostname»\n"),
+        new("CFG072", Head + "mounts: { a: { table: «large.csv» } }\n"),
+    ];
+}
