@@ -36,7 +36,13 @@ internal sealed class PathGuard
             return false;
         }
 
-        var file = new FileInfo(fullPath);
+        var file = new FileInfo(RealPath.Of(fullPath));
+        if (file.LinkTarget is not null)
+        {
+            diagnostics.Error(ConfigCodes.UnreadableFile, $"`{shown}` is a symbolic link that leads in a circle", span);
+            return false;
+        }
+
         if (!file.Exists)
         {
             Missing(fullPath, shown, span, diagnostics);
