@@ -77,7 +77,7 @@ public static class AssemblyShape
 
     public static readonly Shape Root = new("an assembly",
     [
-        new("boltup", new TextKind("`assembly/1`"), "kind and version of the document", IsRequired: true),
+        new("boltup", new ChoiceKind("assembly/1"), "kind and version of the document", IsRequired: true),
         new("based_on", new PathKind("an assembly file"), "assembly whose keys this one takes over and changes"),
         new("title", new TextKind("a title"), "what the assembly is"),
         new("frequencies", new ShapeKind(Frequencies), "lines to compute; by default those that the parts share"),

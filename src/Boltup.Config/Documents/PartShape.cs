@@ -46,7 +46,7 @@ public static class PartShape
 
     public static readonly Shape Root = new("a part",
     [
-        new("boltup", new TextKind("`part/1`"), "kind and version of the document", IsRequired: true),
+        new("boltup", new ChoiceKind("part/1"), "kind and version of the document", IsRequired: true),
         new("title", new TextKind("a title"), "what the part is"),
         new("points", new NamedKind("point", new ShapeKind(Point), IsDotted: true), "named places on the part"),
         new("frf", new ListKind(new ShapeKind(FrfFile)), "files of measured or computed FRFs"),
