@@ -13,8 +13,24 @@ internal sealed partial class ShapeValidator
 
     private void CheckMap(YamlMap map, Shape shape, string label)
     {
+        HashSet<string> meant = CheckKeys(map, shape);
+        foreach (KeyDefinition key in shape.Keys.Where(key => key.IsRequired && !meant.Contains(key.Name)))
+        {
+            diagnostics.Error(ConfigCodes.MissingKey, $"{Owner(map, shape, label)} has no `{key.Name}`", map.Span,
+                $"add `{key.Name}`: {key.Kind.Expected}");
+        }
+
+        foreach (KeyRule rule in shape.Rules)
+        {
+            CheckRule(map, shape, rule, meant, label);
+        }
+    }
+
+    /// <summary>Checks every key with its value; gives the keys that are there, and those that misspelt ones probably mean.</summary>
+    private HashSet<string> CheckKeys(YamlMap map, Shape shape)
+    {
         var meant = new HashSet<string>(StringComparer.Ordinal);
-        foreach (YamlEntry entry in map.Entries)
+        foreach (YamlEntry entry in map.Entries.TakeWhile(_ => !HasEnough))
         {
             meant.Add(entry.Key);
             if (shape.Find(entry.Key) is not KeyDefinition key)
@@ -31,21 +47,12 @@ internal sealed partial class ShapeValidator
             }
         }
 
-        foreach (KeyDefinition key in shape.Keys.Where(key => key.IsRequired && !meant.Contains(key.Name)))
-        {
-            diagnostics.Error(ConfigCodes.MissingKey, $"{Owner(map, shape, label)} has no `{key.Name}`", map.Span,
-                $"add `{key.Name}`: {key.Kind.Expected}");
-        }
-
-        foreach (KeyRule rule in shape.Rules.Where(rule => rule.Kind == KeyRuleKind.Needs || rule.Keys.Any(map.Has) || !rule.Keys.Any(meant.Contains)))
-        {
-            CheckRule(map, shape, rule, label);
-        }
+        return meant;
     }
 
     private static string Owner(YamlMap map, Shape shape, string label) => map.Entries.Count == 0 ? $"empty {label}" : $"{label} ({shape.What})";
 
-    /// <summary>Complains and returns the key that was probably meant, so that it does not count as missing too.</summary>
+    /// <summary>Complains, and gives the key that was probably meant, which then does not count as missing too.</summary>
     private string? UnknownKey(YamlEntry entry, Shape shape)
     {
         IEnumerable<string> known = shape.Keys.Select(key => key.Name);
@@ -55,7 +62,7 @@ internal sealed partial class ShapeValidator
         return near;
     }
 
-    private void CheckRule(YamlMap map, Shape shape, KeyRule rule, string label)
+    private void CheckRule(YamlMap map, Shape shape, KeyRule rule, HashSet<string> meant, string label)
     {
         YamlEntry[] present = [.. rule.Keys.Select(map.Find).OfType<YamlEntry>()];
         switch (rule.Kind)
@@ -63,7 +70,7 @@ internal sealed partial class ShapeValidator
             case KeyRuleKind.ExactlyOne when present.Length > 1:
                 Contradiction(present);
                 break;
-            case KeyRuleKind.ExactlyOne or KeyRuleKind.AtLeastOne when present.Length == 0:
+            case KeyRuleKind.ExactlyOne or KeyRuleKind.AtLeastOne when !rule.Keys.Any(meant.Contains):
                 string count = rule.Kind == KeyRuleKind.ExactlyOne ? "exactly one" : "at least one";
                 diagnostics.Error(ConfigCodes.OneOf, $"{Owner(map, shape, label)} has none of {Words.List(rule.Keys)}", map.Span,
                     $"give {count} of them");
@@ -99,7 +106,7 @@ internal sealed partial class ShapeValidator
             diagnostics.Error(ConfigCodes.WrongCount, $"{label} is empty, expected at least {kind.Minimum} {kind.What}", map.Span);
         }
 
-        foreach (YamlEntry entry in map.Entries)
+        foreach (YamlEntry entry in map.Entries.TakeWhile(_ => !HasEnough))
         {
             CheckName(entry, kind);
             Check(entry.Value, kind.Item, $"{kind.What} `{Excerpt.Of(entry.Key)}`");

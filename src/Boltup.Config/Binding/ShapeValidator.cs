@@ -6,8 +6,19 @@ namespace Boltup.Config.Binding;
 /// <summary>Checks a tree of nodes against shapes and reports everything that does not fit.</summary>
 internal sealed partial class ShapeValidator(DiagnosticBag diagnostics)
 {
+    private const int MaximumErrors = 100;
+
     /// <summary>Checks a document. Without errors in the bag afterwards, the binder may take every kind for granted.</summary>
-    public void Validate(YamlNode root, Shape shape) => Check(root, new ShapeKind(shape), "the document");
+    public void Validate(YamlNode root, Shape shape)
+    {
+        Check(root, new ShapeKind(shape), "the document");
+        if (HasEnough)
+        {
+            diagnostics.Error(ConfigCodes.TooLarge, $"more than {MaximumErrors} errors, the rest is not checked", root.Span);
+        }
+    }
+
+    private bool HasEnough => diagnostics.Items.Count > MaximumErrors;
 
     /// <param name="label">What the value belongs to, as messages name it.</param>
     private void Check(YamlNode node, ValueKind kind, string label)
@@ -81,7 +92,7 @@ internal sealed partial class ShapeValidator(DiagnosticBag diagnostics)
         }
 
         var seen = new HashSet<string>(StringComparer.Ordinal);
-        foreach (YamlNode item in list.Items)
+        foreach (YamlNode item in list.Items.TakeWhile(_ => !HasEnough))
         {
             Check(item, kind.Item, $"an item of {label}");
             if (kind.IsSet && item is YamlScalar scalar && !seen.Add(scalar.Text))

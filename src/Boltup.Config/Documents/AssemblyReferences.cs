@@ -6,8 +6,11 @@ namespace Boltup.Config.Documents;
 /// <summary>Checks that every name in an assembly names something, as far as documents without data can tell.</summary>
 internal sealed class AssemblyReferences(AssemblyDocument assembly, DiagnosticBag diagnostics)
 {
-    private readonly string[] _parts = [.. assembly.Parts.Select(part => part.Name.Value)];
-    private readonly string[] _mounts = [.. assembly.Mounts.Select(mount => mount.Name.Value)];
+    private readonly Dictionary<string, KnownNames?> _pointsByPart = assembly.Parts.ToDictionary(
+        part => part.Name.Value, part => part.Document?.KnownPoints is { } points ? new KnownNames("point", points) : null);
+
+    private readonly KnownNames _parts = new("part", assembly.Parts.Select(part => part.Name.Value));
+    private readonly KnownNames _mounts = new("mount", assembly.Mounts.Select(mount => mount.Name.Value));
 
     public void Check()
     {
@@ -15,7 +18,7 @@ internal sealed class AssemblyReferences(AssemblyDocument assembly, DiagnosticBa
         CheckJoints();
         foreach (ForceDocument force in assembly.Operations.SelectMany(operation => operation.Forces))
         {
-            CheckPart(force.Part.Value, force.Part.Span);
+            _parts.Check(force.Part.Value, force.Part.Span, diagnostics);
         }
 
         foreach (ResponseDocument response in assembly.Responses)
@@ -26,42 +29,20 @@ internal sealed class AssemblyReferences(AssemblyDocument assembly, DiagnosticBa
 
     private void CheckMounts()
     {
+        var laws = new Dictionary<string, LikeLawDocument>(StringComparer.Ordinal);
         foreach (MountDocument mount in assembly.Mounts)
         {
-            if (mount.Law is LikeLawDocument like && IsMount(like.Mount) && LeadsTo(like, mount.Name.Value))
+            if (mount.Law is LikeLawDocument like && _mounts.Check(like.Mount.Value, like.Mount.Span, diagnostics))
             {
-                diagnostics.Error(ConfigCodes.LikeItself, $"mount `{mount.Name}` is like itself", like.Mount.Span,
-                    "let one of the mounts in the circle have a stiffness of its own");
+                laws.Add(mount.Name.Value, like);
             }
         }
-    }
 
-    private bool IsMount(Marked<string> name)
-    {
-        bool isKnown = _mounts.Contains(name.Value);
-        if (!isKnown)
+        foreach (string name in LikeCircles.In(laws))
         {
-            diagnostics.Error(ConfigCodes.UnknownName, $"no mount is named `{name}`", name.Span, NearestName.Suggest(name.Value, _mounts),
-                Words.Known("mounts", _mounts));
+            diagnostics.Error(ConfigCodes.LikeItself, $"mount `{name}` is like itself", laws[name].Mount.Span,
+                "let one of the mounts in the circle have a stiffness of its own");
         }
-
-        return isKnown;
-    }
-
-    private bool LeadsTo(LikeLawDocument like, string name)
-    {
-        string next = like.Mount.Value;
-        for (int i = 0; i < _mounts.Length && next != name; i++)
-        {
-            if (assembly.FindMount(next)?.Law is not LikeLawDocument further)
-            {
-                return false;
-            }
-
-            next = further.Mount.Value;
-        }
-
-        return next == name;
     }
 
     private void CheckJoints()
@@ -70,7 +51,7 @@ internal sealed class AssemblyReferences(AssemblyDocument assembly, DiagnosticBa
         foreach (JointDocument joint in assembly.Joints)
         {
             bool hasPoints = CheckEnd(joint.First) & CheckEnd(joint.Second);
-            bool hasMount = joint.Mount is null || IsMount(joint.Mount);
+            bool hasMount = joint.Mount is null || _mounts.Check(joint.Mount.Value, joint.Mount.Span, diagnostics);
             if (hasPoints && hasMount)
             {
                 CheckPair(joint, seen);
@@ -100,33 +81,22 @@ internal sealed class AssemblyReferences(AssemblyDocument assembly, DiagnosticBa
         }
     }
 
-    private bool CheckPart(string name, SourceSpan span)
-    {
-        bool isKnown = _parts.Contains(name);
-        if (!isKnown)
-        {
-            diagnostics.Error(ConfigCodes.UnknownName, $"no part is named `{name}`", span, NearestName.Suggest(name, _parts), Words.Known("parts", _parts));
-        }
-
-        return isKnown;
-    }
-
     /// <summary>The part must be there, and the point too where the part's document names its points.</summary>
     private bool CheckPoint(string part, string point, SourceSpan span)
     {
-        if (!CheckPart(part, span))
+        if (!_parts.Check(part, span, diagnostics))
         {
             return false;
         }
 
-        if (assembly.FindPart(part)!.Document?.KnownPoints is not { } points || points.Contains(point))
+        if (_pointsByPart[part] is not KnownNames points || points.Contains(point))
         {
             return true;
         }
 
-        string? near = NearestName.Of(point, points);
+        string? near = points.Nearest(point);
         diagnostics.Error(ConfigCodes.UnknownName, $"part `{part}` has no point `{point}`", span,
-            near is null ? null : $"did you mean `{part}.{near}`?", Words.Known($"points of `{part}`", points));
+            near is null ? null : $"did you mean `{part}.{near}`?", Words.Known($"points of `{part}`", points.All));
         return false;
     }
 }

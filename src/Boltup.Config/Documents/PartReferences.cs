@@ -30,10 +30,10 @@ internal static class PartReferences
 
     private static void CheckLumped(PartDocument part, LumpedModelDocument lumped, DiagnosticBag diagnostics)
     {
-        string[] masses = [.. lumped.Masses.Select(mass => mass.Point.Value)];
-        foreach (PointDocument point in part.Points.Where(point => !masses.Contains(point.Name.Value)))
+        var masses = new KnownNames("mass", lumped.Masses.Select(mass => mass.Point.Value));
+        foreach (PointDocument point in part.Points)
         {
-            UnknownMass(point.Name.Value, point.Name.Span, masses, diagnostics);
+            masses.Check(point.Name.Value, point.Name.Span, diagnostics);
         }
 
         foreach (LumpedLinkDocument link in lumped.Links)
@@ -42,13 +42,13 @@ internal static class PartReferences
         }
     }
 
-    private static void CheckLink(LumpedLinkDocument link, string[] masses, DiagnosticBag diagnostics)
+    private static void CheckLink(LumpedLinkDocument link, KnownNames masses, DiagnosticBag diagnostics)
     {
         foreach (Marked<string?> end in new[] { link.First, link.Second })
         {
-            if (end.Value is string name && !masses.Contains(name))
+            if (end.Value is string name)
             {
-                UnknownMass(name, end.Span, masses, diagnostics);
+                masses.Check(name, end.Span, diagnostics);
             }
         }
 
@@ -57,8 +57,4 @@ internal static class PartReferences
             diagnostics.Error(ConfigCodes.JoinedToItself, $"a link joins `{link.First.Value ?? GroundPoint.Name}` to itself", link.Second.Span);
         }
     }
-
-    private static void UnknownMass(string name, SourceSpan span, string[] masses, DiagnosticBag diagnostics) =>
-        diagnostics.Error(ConfigCodes.UnknownName, $"no mass is named `{name}`", span, NearestName.Suggest(name, masses),
-            Words.Known("masses", masses));
 }

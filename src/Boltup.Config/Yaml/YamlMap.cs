@@ -29,7 +29,5 @@ public sealed record YamlMap(SourceFile Source, SourceSpan Span, IReadOnlyList<Y
         return null;
     }
 
-    public bool Has(string key) => Find(key) is not null;
-
     public override string Describe() => "a map";
 }

@@ -109,6 +109,38 @@ public class AssemblyDocumentTests
         Assert.Equal(["mount `a` is like itself", "mount `b` is like itself"], folder.Diagnostics.Items.Select(item => item.Message));
     }
 
+    [Fact]
+    public void LoadAssembly_GroundInEitherPlace_IsAccepted()
+    {
+        using ConfigFolder folder = Samples.Folder().With("a.assembly.yaml",
+            "boltup: assembly/1\nparts: { body: parts/body.part.yaml }\n"
+            + "joints: { a: { between: [ground, body.s1], rigid: [x] }, b: { between: [body.s2, ground], rigid: [x] } }\n");
+        AssemblyDocument assembly = folder.LoadAssembly().Document!;
+        Assert.Equal((true, "body.s1", "body.s2", true),
+            (assembly.Joints[0].First.IsGround, assembly.Joints[0].Second.ToString(), assembly.Joints[1].First.ToString(), assembly.Joints[1].Second.IsGround));
+    }
+
+    [Fact]
+    public void LoadAssembly_ThousandsOfMistakes_StopsAfterAHundred()
+    {
+        string mounts = string.Join(", ", Enumerable.Range(0, 20_000).Select(i => $"m{i}: {{ stifness{i}: 1 }}"));
+        using ConfigFolder folder = Samples.Folder().With("a.assembly.yaml", "boltup: assembly/1\nparts: { body: parts/body.part.yaml }\nmounts: { " + mounts + " }\n");
+        Assert.Null(folder.LoadAssembly().Document);
+        Assert.InRange(folder.Diagnostics.Items.Count, 100, 110);
+        Assert.Equal("CFG003", folder.Diagnostics.Items[^1].Code.Code);
+    }
+
+    [Fact]
+    public void LoadAssembly_LongChainOfLike_LoadsAndMultipliesTheScales()
+    {
+        const int count = 20_000;
+        string mounts = string.Join(", ", Enumerable.Range(1, count).Select(i => $"m{i}: {{ like: m{i - 1}, scale: {(i % 2 == 0 ? "2" : "0.5")} }}"));
+        using ConfigFolder folder = Samples.Folder().With("a.assembly.yaml",
+            "boltup: assembly/1\nparts: { body: parts/body.part.yaml }\nmounts: { m0: { stiffness: { x: 1 N/m } }, " + mounts + " }\n");
+        AssemblyDocument assembly = folder.LoadAssembly().Document!;
+        Assert.Equal(0.5, assembly.LawOf("m21").Scale);
+    }
+
     [Theory]
     [InlineData("20 Hz", "1 kHz", "0.1 Hz", 9801)]
     [InlineData("0.1 Hz", "0.3 Hz", "0.1 Hz", 3)]
