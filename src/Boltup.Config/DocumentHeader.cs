@@ -23,7 +23,8 @@ internal static class DocumentHeader
 
         if (kind != expected)
         {
-            diagnostics.Error(ConfigCodes.WrongHeader, $"this is a document of the kind `{Supported[(int)kind]}`, expected `{Supported[(int)expected]}`",
+            diagnostics.Error(ConfigCodes.WrongHeader,
+                $"this is a document of the kind `{Supported[(int)kind]}`, expected `{Supported[(int)expected]}`",
                 root[Key]!.Span);
         }
 
@@ -35,14 +36,18 @@ internal static class DocumentHeader
         YamlEntry? entry = root.Find(Key);
         if (entry is null || entry != root.Entries[0])
         {
-            diagnostics.Error(ConfigCodes.WrongHeader, "the first key is not `boltup`", root.Entries.Count > 0 ? root.Entries[0].KeySpan : root.Span,
-                entry is null ? "begin with `boltup: part/1` or `boltup: assembly/1`" : $"move `{Key}` from line {entry.KeySpan.Line} to the top");
+            string help = entry is null
+                ? "begin with `boltup: part/1` or `boltup: assembly/1`"
+                : $"move `{Key}` from line {entry.KeySpan.Line} to the top";
+            diagnostics.Error(ConfigCodes.WrongHeader,
+                "the first key is not `boltup`", root.Entries.Count > 0 ? root.Entries[0].KeySpan : root.Span, help);
             return null;
         }
 
         if (entry.Value is not YamlScalar { IsEmpty: false } scalar || scalar.Text.Split('/') is not [string name, string version])
         {
-            diagnostics.Error(ConfigCodes.WrongHeader, $"`boltup` is {entry.Value.Describe()}, expected a kind and a version", entry.Value.Span,
+            diagnostics.Error(ConfigCodes.WrongHeader,
+                $"`boltup` is {entry.Value.Describe()}, expected a kind and a version", entry.Value.Span,
                 "write `part/1` or `assembly/1`");
             return null;
         }
@@ -55,7 +60,8 @@ internal static class DocumentHeader
         int kind = Array.IndexOf(Supported, name);
         if (kind < 0 && Announced.Contains(name))
         {
-            diagnostics.Error(ConfigCodes.NotSupportedYet, $"documents of the kind `{name}` are not supported yet by this version", scalar.Span);
+            diagnostics.Error(ConfigCodes.NotSupportedYet,
+                $"documents of the kind `{name}` are not supported yet by this version", scalar.Span);
         }
         else if (kind < 0)
         {

@@ -37,7 +37,7 @@ internal sealed class DocumentLoad
             CheckFiles(PartFiles(part), found);
         }
 
-        diagnostics.AddRange(found.Items);
+        diagnostics.AddRange(PlaceOrder.Of(found.Items));
         return found.HasErrors ? null : part;
     }
 
@@ -58,7 +58,7 @@ internal sealed class DocumentLoad
             CheckFiles(AssemblyFiles(assembly), found);
         }
 
-        diagnostics.AddRange(found.Items);
+        diagnostics.AddRange(PlaceOrder.Of(found.Items));
         return found.HasErrors ? null : assembly;
     }
 

@@ -38,7 +38,10 @@ public static class NearestName
 
     private static string Fold(string text) => string.Concat(text.Where(c => c is not ('-' or '_' or ' '))).ToLowerInvariant();
 
-    /// <summary>Insertions, deletions, substitutions and swaps of neighbours (Damerau 1964, restricted form) that lead from one to the other.</summary>
+    /// <summary>
+    /// Insertions, deletions, substitutions and swaps of neighbours that lead from one to the other: Damerau, A technique for
+    /// computer detection and correction of spelling errors, CACM 7 (1964), in the form that changes no letter twice.
+    /// </summary>
     private static int Distance(string a, string b)
     {
         if (Math.Abs(a.Length - b.Length) > MaximumDistance || a.Length > MaximumLength)

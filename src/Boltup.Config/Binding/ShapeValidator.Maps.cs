@@ -9,20 +9,21 @@ internal sealed partial class ShapeValidator
 {
     private const int MaximumNameLength = 100;
 
-    private static readonly HashSet<string> OldBooleans = new(StringComparer.OrdinalIgnoreCase) { "on", "off", "yes", "no", "true", "false" };
+    private static readonly HashSet<string> OldBooleans =
+        new(StringComparer.OrdinalIgnoreCase) { "on", "off", "yes", "no", "true", "false" };
 
     private void CheckMap(YamlMap map, Shape shape, string label)
     {
         HashSet<string> meant = CheckKeys(map, shape);
         foreach (KeyDefinition key in shape.Keys.Where(key => key.IsRequired && !meant.Contains(key.Name)))
         {
-            diagnostics.Error(ConfigCodes.MissingKey, $"{Owner(map, shape, label)} has no `{key.Name}`", map.Span,
+            diagnostics.Error(ConfigCodes.MissingKey, $"{label} has no `{key.Name}`", map.Span,
                 $"add `{key.Name}`: {key.Kind.Expected}");
         }
 
         foreach (KeyRule rule in shape.Rules)
         {
-            CheckRule(map, shape, rule, meant, label);
+            CheckRule(map, rule, meant, label);
         }
     }
 
@@ -50,8 +51,6 @@ internal sealed partial class ShapeValidator
         return meant;
     }
 
-    private static string Owner(YamlMap map, Shape shape, string label) => map.Entries.Count == 0 ? $"empty {label}" : $"{label} ({shape.What})";
-
     /// <summary>Complains, and gives the key that was probably meant, which then does not count as missing too.</summary>
     private string? UnknownKey(YamlEntry entry, Shape shape)
     {
@@ -62,7 +61,7 @@ internal sealed partial class ShapeValidator
         return near;
     }
 
-    private void CheckRule(YamlMap map, Shape shape, KeyRule rule, HashSet<string> meant, string label)
+    private void CheckRule(YamlMap map, KeyRule rule, HashSet<string> meant, string label)
     {
         YamlEntry[] present = [.. rule.Keys.Select(map.Find).OfType<YamlEntry>()];
         switch (rule.Kind)
@@ -72,10 +71,10 @@ internal sealed partial class ShapeValidator
                 break;
             case KeyRuleKind.ExactlyOne or KeyRuleKind.AtLeastOne when !rule.Keys.Any(meant.Contains):
                 string count = rule.Kind == KeyRuleKind.ExactlyOne ? "exactly one" : "at least one";
-                diagnostics.Error(ConfigCodes.OneOf, $"{Owner(map, shape, label)} has none of {Words.List(rule.Keys)}", map.Span,
+                diagnostics.Error(ConfigCodes.OneOf, $"{label} has none of {Words.List(rule.Keys)}", map.Span,
                     $"give {count} of them");
                 break;
-            case KeyRuleKind.Needs when present.Length == 1 && present[0].Key == rule.Keys[0]:
+            case KeyRuleKind.Needs when map.Find(rule.Keys[0]) is not null && !rule.Keys.Skip(1).Any(meant.Contains):
                 diagnostics.Error(ConfigCodes.NeedsOtherKey, $"`{rule.Keys[0]}` means nothing without {Words.List(rule.Keys.Skip(1))}",
                     present[0].KeySpan);
                 break;
@@ -87,17 +86,21 @@ internal sealed partial class ShapeValidator
     {
         YamlEntry last = present[^1];
         YamlEntry first = present[0];
-        if (last.KeySpan.File == first.KeySpan.File && (last.KeySpan.Line, last.KeySpan.Column).CompareTo((first.KeySpan.Line, first.KeySpan.Column)) < 0)
+        bool isOneFile = last.KeySpan.File == first.KeySpan.File;
+        if (isOneFile && Place(last).CompareTo(Place(first)) < 0)
         {
             (first, last) = (last, first);
         }
 
-        string? help = last.KeySpan.File == first.KeySpan.File
+        string? help = isOneFile
             ? "keep one of them"
             : $"in the overlay write `{first.Key}: ~` or `{last.Key}: ~` to remove the one that the base gives";
-        diagnostics.Error(ConfigCodes.OneOf, $"only one of {Words.List(present.Select(entry => entry.Key))} can be given", last.KeySpan, help,
+        diagnostics.Error(ConfigCodes.OneOf,
+            $"only one of {Words.List(present.Select(entry => entry.Key))} can be given", last.KeySpan, help,
             $"the other is at {first.KeySpan}");
     }
+
+    private static (int Line, int Column) Place(YamlEntry entry) => (entry.KeySpan.Line, entry.KeySpan.Column);
 
     private void CheckNamed(YamlMap map, NamedKind kind, string label)
     {
@@ -133,7 +136,8 @@ internal sealed partial class ShapeValidator
         }
         else if (kind.IsDotted && name == GroundPoint.Name)
         {
-            diagnostics.Error(ConfigCodes.ReservedName, $"`{GroundPoint.Name}` cannot name a {kind.What}", entry.KeySpan, "choose another name",
+            diagnostics.Error(ConfigCodes.ReservedName,
+                $"`{GroundPoint.Name}` cannot name a {kind.What}", entry.KeySpan, "choose another name",
                 $"`{GroundPoint.Name}` is the immovable point of every assembly");
         }
         else if (entry.KeyIsPlain && (OldBooleans.Contains(name) || name is "~" or "null"))

@@ -32,7 +32,8 @@ internal sealed partial class ShapeValidator
         }
         else if (list.Items.Count != size)
         {
-            diagnostics.Error(ConfigCodes.WrongCount, $"row {row + 1} of {label} has {Items(list.Items.Count)}, expected {size}", list.Span);
+            diagnostics.Error(ConfigCodes.WrongCount,
+                $"row {row + 1} of {label} has {Items(list.Items.Count)}, expected {size}", list.Span);
         }
         else
         {

@@ -15,7 +15,8 @@ internal sealed partial class ShapeValidator
         {
             case ChoiceKind choice when !choice.Allowed.Contains(scalar.Text):
                 string? suggestion = NearestName.Suggest(scalar.Text, choice.Allowed);
-                diagnostics.Error(ConfigCodes.NotAllowed, $"{label} is {scalar.Describe()}, expected {choice.Expected}", scalar.Span, suggestion);
+                diagnostics.Error(ConfigCodes.NotAllowed,
+                    $"{label} is {scalar.Describe()}, expected {choice.Expected}", scalar.Span, suggestion);
                 break;
             case NumberKind number:
                 CheckNumber(scalar, number, label);
@@ -37,7 +38,8 @@ internal sealed partial class ShapeValidator
         }
         else if (scalar.Text.Any(char.IsControl))
         {
-            diagnostics.Error(ConfigCodes.BadText, $"{label} holds a control character or a line break", scalar.Span, "write it on one line without escapes");
+            diagnostics.Error(ConfigCodes.BadText,
+                $"{label} holds a control character or a line break", scalar.Span, "write it on one line without escapes");
         }
     }
 
@@ -116,7 +118,8 @@ internal sealed partial class ShapeValidator
     private static SourceSpan UnitSpan(YamlScalar scalar, ParsedQuantity parsed)
     {
         int at = scalar.Text.Length - parsed.UnitText.Length;
-        bool isVerbatim = scalar.IsPlain && scalar.Span.Length == scalar.Text.Length && scalar.Text.EndsWith(parsed.UnitText, StringComparison.Ordinal);
+        bool isVerbatim = scalar.IsPlain && scalar.Span.Length == scalar.Text.Length
+            && scalar.Text.EndsWith(parsed.UnitText, StringComparison.Ordinal);
         return isVerbatim ? scalar.Span with { Column = scalar.Span.Column + at, Length = parsed.UnitText.Length } : scalar.Span;
     }
 

@@ -65,12 +65,14 @@ internal sealed partial class ShapeValidator(DiagnosticBag diagnostics)
     {
         if (node is YamlScalar { IsRemoval: true } removal)
         {
-            diagnostics.Error(ConfigCodes.NothingToRemove, $"`{removal.Text}` removes a key of a base, and {label} has no such key in a base",
+            diagnostics.Error(ConfigCodes.NothingToRemove,
+                $"`{removal.Text}` removes a key of a base, and {label} has no such key in a base",
                 node.Span, $"give {kind.Expected}, or remove the key");
             return;
         }
 
-        diagnostics.Error(ConfigCodes.WrongKind, $"{label} is {node.Describe()}, expected {kind.Expected}", node.Span);
+        string found = node is YamlScalar { IsEmpty: true } ? "has no value" : $"is {node.Describe()}";
+        diagnostics.Error(ConfigCodes.WrongKind, $"{label} {found}, expected {kind.Expected}", node.Span);
     }
 
     private void CheckReserved(YamlNode node, ReservedKind kind, string label)

@@ -24,7 +24,7 @@ internal sealed partial class AssemblyBinder
         }
 
         double lossFactor = map["loss_factor"]?.Number() ?? 0;
-        IReadOnlyDictionary<Direction, Marked<double>> damping = PerDirection(map["damping"], Dimension.Damping, Dimension.RotationalDamping);
+        Dictionary<Direction, Marked<double>> damping = PerDirection(map["damping"], Dimension.Damping, Dimension.RotationalDamping);
         return map["stiffness_matrix"] is YamlList rows
             ? new MatrixLawDocument(BindMatrix(rows), lossFactor, damping)
             : new DirectionalLawDocument(
@@ -72,7 +72,8 @@ internal sealed partial class AssemblyBinder
                 if (Math.Abs(matrix[i, j] - matrix[j, i]) > SymmetryTolerance * larger)
                 {
                     diagnostics.Error(ConfigCodes.BadMatrix,
-                        $"stiffness matrix is not symmetric: entries {i + 1},{j + 1} and {j + 1},{i + 1} differ", rows.Items[i].Items()[j].Span,
+                        $"stiffness matrix is not symmetric: entries {i + 1},{j + 1} and {j + 1},{i + 1} differ",
+                        rows.Items[i].Items()[j].Span,
                         "give both the same value", $"the other is at {rows.Items[j].Items()[i].Span}");
                 }
             }

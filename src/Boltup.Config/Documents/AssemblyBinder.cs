@@ -12,6 +12,9 @@ internal sealed partial class AssemblyBinder(DiagnosticBag diagnostics)
 {
     private const double DefaultJointGapM = 0.005;
 
+    /// <summary>Share of a step by which rounding may miss the last line; 1e7 steps are off by less than 1e-8.</summary>
+    private const double StepTolerance = 1e-6;
+
     public AssemblyDocument Bind(YamlMap root, IReadOnlyList<SourceFile> bases) => new(
         root.Source,
         bases,
@@ -35,7 +38,7 @@ internal sealed partial class AssemblyBinder(DiagnosticBag diagnostics)
             return null;
         }
 
-        double steps = Math.Floor((to.Value - from.Value) / step.Value * (1 + FrequencyAxis.RelativeTolerance) + FrequencyAxis.RelativeTolerance);
+        double steps = Math.Floor((to.Value - from.Value) / step.Value + StepTolerance);
         if (!(steps < FrequencyLimits.MaximumLines))
         {
             diagnostics.Error(ConfigCodes.BadFrequencies,
@@ -64,7 +67,8 @@ internal sealed partial class AssemblyBinder(DiagnosticBag diagnostics)
         double length = axis.Length;
         if (!(length > 0 && double.IsFinite(length)))
         {
-            diagnostics.Error(ConfigCodes.BadAxes, "the axis of rotation has no direction", about.Span, "write `x`, `y`, `z` or a vector such as `[0, 0, 1]`");
+            diagnostics.Error(ConfigCodes.BadAxes,
+                "the axis of rotation has no direction", about.Span, "write `x`, `y`, `z` or a vector such as `[0, 0, 1]`");
             return null;
         }
 

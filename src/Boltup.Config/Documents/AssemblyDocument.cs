@@ -24,7 +24,7 @@ public sealed record AssemblyDocument(
     public MountDocument? FindMount(string name) => Mounts.FirstOrDefault(mount => mount.Name.Value == name);
 
     /// <summary>The law that a mount has after following its <c>like</c> keys, and the product of the scales on the way.</summary>
-    /// <exception cref="InvalidOperationException">There is no such mount, or the keys lead in a circle: a loaded document has neither.</exception>
+    /// <exception cref="InvalidOperationException">There is no such mount, or the keys lead in a circle; never after loading.</exception>
     public ScaledLaw LawOf(string mount)
     {
         double scale = 1;

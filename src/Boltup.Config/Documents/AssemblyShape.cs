@@ -17,7 +17,8 @@ public static class AssemblyShape
 
     private static readonly Shape Turned = new("a rotation",
     [
-        new("about", new EitherKind(new ChoiceKind("x", "y", "z"), new ListKind(new NumberKind("1"), 3, 3)), "axis of the assembly, or a vector", IsRequired: true),
+        new("about", new EitherKind(new ChoiceKind("x", "y", "z"), new ListKind(new NumberKind("1"), 3, 3)),
+            "axis of the assembly, or a vector", IsRequired: true),
         new("by", new QuantityKind(Dimension.Angle, "90"), "angle, right-handed", IsRequired: true),
     ]);
 
@@ -30,12 +31,14 @@ public static class AssemblyShape
 
     private static readonly Shape Mount = new("a mount",
     [
-        new("stiffness", SharedKinds.PerDirection("stiffness", "120", Dimension.Stiffness, Dimension.RotationalStiffness), "stiffness per direction; a direction left out is free"),
+        new("stiffness", SharedKinds.PerDirection("stiffness", "120", Dimension.Stiffness, Dimension.RotationalStiffness),
+            "stiffness per direction; a direction left out is free"),
         new("stiffness_matrix", new StiffnessMatrixKind(), "full symmetric stiffness matrix, rows of x, y, z or x, y, z, rx, ry, rz"),
         new("like", new TextKind("the name of a mount"), "another mount whose law this one has"),
         new("table", new PathKind("a table of dynamic stiffness"), "CSV of complex dynamic stiffness over frequency"),
         new("loss_factor", new NumberKind("0.12", Sign.NotNegative), "loss factor of the stiffness"),
-        new("damping", SharedKinds.PerDirection("damping", "12", Dimension.Damping, Dimension.RotationalDamping), "viscous damping per direction"),
+        new("damping", SharedKinds.PerDirection("damping", "12", Dimension.Damping, Dimension.RotationalDamping),
+            "viscous damping per direction"),
         new("scale", new NumberKind("0.8", Sign.Positive), "factor on the law of the other mount"),
     ],
     KeyRule.ExactlyOne("stiffness", "stiffness_matrix", "like", "table"),
@@ -81,10 +84,12 @@ public static class AssemblyShape
         new("based_on", new PathKind("an assembly file"), "assembly whose keys this one takes over and changes"),
         new("title", new TextKind("a title"), "what the assembly is"),
         new("frequencies", new ShapeKind(Frequencies), "lines to compute; by default those that the parts share"),
-        new("parts", new NamedKind("part", new EitherKind(PartFile, new ShapeKind(PlacedPart)), IsDotted: true, Minimum: 1), "the parts and where they are", IsRequired: true),
+        new("parts", new NamedKind("part", new EitherKind(PartFile, new ShapeKind(PlacedPart)), IsDotted: true, Minimum: 1),
+            "the parts and where they are", IsRequired: true),
         new("mounts", new NamedKind("mount", new ShapeKind(Mount)), "resilient elements"),
         new("joints", new NamedKind("joint", new ShapeKind(Joint)), "connections of two points"),
-        new("joint_gap", new QuantityKind(Dimension.Length, "5", Sign.NotNegative), "distance up to which joined points count as coinciding; 5 mm by default"),
+        new("joint_gap", new QuantityKind(Dimension.Length, "5", Sign.NotNegative),
+            "distance up to which joined points count as coinciding; 5 mm by default"),
         new("operations", new NamedKind("operation", new ShapeKind(Operation), MakesFileNames: true), "running conditions"),
         new("responses", new NamedKind("response", new ShapeKind(Response), MakesFileNames: true), "dofs that somebody cares about"),
         new("targets", new ReservedKind(AllowsEmpty: true), "limits on responses"),

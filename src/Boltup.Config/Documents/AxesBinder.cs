@@ -44,7 +44,8 @@ internal static class AxesBinder
             {
                 isFine = false;
                 diagnostics.Error(ConfigCodes.BadAxes,
-                    FormattableString.Invariant($"axis `{Names[i]}` has the length {axis.Value.Length:G7}, expected 1"), axis.Span, Unit(axis.Value));
+                    FormattableString.Invariant($"axis `{Names[i]}` has the length {axis.Value.Length:G7}, expected 1"),
+                    axis.Span, Unit(axis.Value));
             }
         }
 

@@ -22,7 +22,8 @@ internal static class PartReferences
         {
             if (point.Node is { } node && !taken.TryAdd(node.Value, point))
             {
-                diagnostics.Error(ConfigCodes.SameNode, $"points `{taken[node.Value].Name}` and `{point.Name}` have the same node {node.Value}",
+                diagnostics.Error(ConfigCodes.SameNode,
+                    $"points `{taken[node.Value].Name}` and `{point.Name}` have the same node {node.Value}",
                     node.Span, notes: $"the other is at {taken[node.Value].Node!.Span}");
             }
         }
@@ -54,7 +55,8 @@ internal static class PartReferences
 
         if (link.First.Value == link.Second.Value)
         {
-            diagnostics.Error(ConfigCodes.JoinedToItself, $"a link joins `{link.First.Value ?? GroundPoint.Name}` to itself", link.Second.Span);
+            diagnostics.Error(ConfigCodes.JoinedToItself,
+                $"a link joins `{link.First.Value ?? GroundPoint.Name}` to itself", link.Second.Span);
         }
     }
 }

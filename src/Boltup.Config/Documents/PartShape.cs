@@ -30,7 +30,8 @@ public static class PartShape
 
     private static readonly Shape Link = new("a link",
     [
-        new("between", new ListKind(new TextKind("the name of a mass or `ground`"), 2, 2), "the two masses, or a mass and ground", IsRequired: true),
+        new("between", new ListKind(new TextKind("the name of a mass or `ground`"), 2, 2),
+            "the two masses, or a mass and ground", IsRequired: true),
         new("stiffness", new QuantityKind(Dimension.Stiffness, "120", Sign.NotNegative), "stiffness"),
         new("loss_factor", new NumberKind("0.02", Sign.NotNegative), "loss factor of the stiffness"),
         new("damping", new QuantityKind(Dimension.Damping, "12", Sign.NotNegative), "viscous damping"),
@@ -40,7 +41,8 @@ public static class PartShape
     private static readonly Shape Lumped = new("a lumped model",
     [
         new("direction", new ChoiceKind("x", "y", "z"), "direction in which the masses move", IsRequired: true),
-        new("masses", new NamedKind("mass", new QuantityKind(Dimension.Mass, "0.8", Sign.NotNegative), IsDotted: true, Minimum: 1), "the masses, each a point with one dof", IsRequired: true),
+        new("masses", new NamedKind("mass", new QuantityKind(Dimension.Mass, "0.8", Sign.NotNegative), IsDotted: true, Minimum: 1),
+            "the masses, each a point with one dof", IsRequired: true),
         new("links", new ListKind(new ShapeKind(Link), Minimum: 0), "springs and dampers"),
     ]);
 

@@ -15,5 +15,6 @@ internal static class SharedKinds
     /// <summary>A map from directions to quantities, of one dimension for translations and another for rotations.</summary>
     public static ShapeKind PerDirection(string what, string example, Dimension translation, Dimension rotation) => new(new Shape(what,
         [.. MotionDirection.Allowed.Select(name =>
-            new KeyDefinition(name, new QuantityKind(name.Length == 1 ? translation : rotation, example, Sign.NotNegative), $"{what} along {name}"))]));
+            new KeyDefinition(
+                name, new QuantityKind(name.Length == 1 ? translation : rotation, example, Sign.NotNegative), $"{what} along {name}"))]));
 }

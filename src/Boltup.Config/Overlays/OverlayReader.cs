@@ -38,41 +38,56 @@ internal sealed class OverlayReader(DocumentReader reader, LoadOptions options)
         FileReference? named = null;
         while (true)
         {
-            if (!visited.Add(RealPath.Of(next)))
-            {
-                diagnostics.Error(ConfigCodes.BaseCycle, $"`{named!.Written}` leads back to a document of the same chain", named.Span,
-                    "let one document of the chain stand on its own", Chain(chain));
-                return null;
-            }
-
-            if (chain.Count >= options.MaximumBaseDepth)
-            {
-                diagnostics.Error(ConfigCodes.BaseCycle, $"more than {options.MaximumBaseDepth} documents are based on each other", named!.Span);
-                return null;
-            }
-
-            if (reader.Read(next, named, diagnostics) is not YamlMap root || !DocumentHeader.Is(root, kind, diagnostics))
+            bool isNew = visited.Add(RealPath.Of(next));
+            if ((named is not null && !CanGoOn(chain, named, isNew, diagnostics))
+                || reader.Read(next, named, diagnostics) is not YamlMap root
+                || !DocumentHeader.Is(root, kind, diagnostics))
             {
                 return null;
             }
 
             chain.Add(root);
-            if (root[BasedOn] is null)
+            if (root[BasedOn] is not YamlNode link)
             {
                 return chain;
             }
 
-            if (root[BasedOn] is not YamlScalar { IsEmpty: false, IsRemoval: false } link || string.IsNullOrWhiteSpace(link.Text)
-                || link.Text.Any(char.IsControl))
+            if (!IsPath(link, diagnostics))
             {
-                diagnostics.Error(ConfigCodes.WrongKind, $"`{BasedOn}` is {root[BasedOn]!.Describe()}, expected the path of an assembly file",
-                    root[BasedOn]!.Span);
                 return null;
             }
 
             named = link.File();
             next = named.FullPath;
         }
+    }
+
+    private bool CanGoOn(List<YamlMap> chain, FileReference named, bool isNew, DiagnosticBag diagnostics)
+    {
+        if (!isNew)
+        {
+            diagnostics.Error(ConfigCodes.BaseCycle, $"`{named.Written}` leads back to a document of the same chain", named.Span,
+                "let one document of the chain stand on its own", Chain(chain));
+        }
+        else if (chain.Count >= options.MaximumBaseDepth)
+        {
+            diagnostics.Error(ConfigCodes.BaseCycle,
+                $"more than {options.MaximumBaseDepth} documents are based on each other", named.Span);
+        }
+
+        return isNew && chain.Count < options.MaximumBaseDepth;
+    }
+
+    private static bool IsPath(YamlNode link, DiagnosticBag diagnostics)
+    {
+        bool isPath = link is YamlScalar { IsEmpty: false, IsRemoval: false } scalar
+            && !string.IsNullOrWhiteSpace(scalar.Text) && !scalar.Text.Any(char.IsControl);
+        if (!isPath)
+        {
+            diagnostics.Error(ConfigCodes.WrongKind, $"`{BasedOn}` is {link.Describe()}, expected the path of an assembly file", link.Span);
+        }
+
+        return isPath;
     }
 
     private static string Chain(List<YamlMap> chain) => $"chain: {string.Join(" → ", chain.Select(map => map.Source.DisplayPath))}";

@@ -7,7 +7,8 @@ internal static class DisplayPath
     public static string Of(string fullPath, string workingDirectory)
     {
         string relative = Path.GetRelativePath(workingDirectory, fullPath);
-        bool isBelow = !Path.IsPathRooted(relative) && relative != ".." && !relative.StartsWith($"..{Path.DirectorySeparatorChar}", StringComparison.Ordinal);
+        bool isBelow = !Path.IsPathRooted(relative) && relative != ".."
+            && !relative.StartsWith($"..{Path.DirectorySeparatorChar}", StringComparison.Ordinal);
         return (isBelow ? relative : fullPath).Replace(Path.DirectorySeparatorChar, '/');
     }
 }

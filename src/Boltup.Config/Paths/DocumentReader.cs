@@ -44,25 +44,35 @@ internal sealed class DocumentReader(PathGuard guard, LoadOptions options)
         try
         {
             using FileStream stream = File.OpenRead(file.FullPath);
-            using var content = new MemoryStream();
-            var chunk = new byte[1 << 14];
-            for (int read = stream.Read(chunk); read > 0; read = stream.Read(chunk))
+            byte[]? content = ReadUpTo(stream, options.MaximumDocumentBytes);
+            if (content is null)
             {
-                content.Write(chunk, 0, read);
-                if (content.Length > options.MaximumDocumentBytes)
-                {
-                    diagnostics.Error(ConfigCodes.FileTooLarge,
-                        FormattableString.Invariant($"`{file.DisplayPath}` has more than the {options.MaximumDocumentBytes} bytes that are read"), span);
-                    return null;
-                }
+                diagnostics.Error(ConfigCodes.FileTooLarge,
+                    $"`{file.DisplayPath}` has more than the {options.MaximumDocumentBytes} bytes that are read", span);
             }
 
-            return content.ToArray();
+            return content;
         }
         catch (Exception e) when (e is IOException or UnauthorizedAccessException)
         {
             diagnostics.Error(ConfigCodes.UnreadableFile, $"`{file.DisplayPath}` cannot be read", span, notes: e.Message);
             return null;
         }
+    }
+
+    private static byte[]? ReadUpTo(FileStream stream, long maximum)
+    {
+        using var content = new MemoryStream();
+        var chunk = new byte[1 << 14];
+        for (int read = stream.Read(chunk); read > 0; read = stream.Read(chunk))
+        {
+            content.Write(chunk, 0, read);
+            if (content.Length > maximum)
+            {
+                return null;
+            }
+        }
+
+        return content.ToArray();
     }
 }

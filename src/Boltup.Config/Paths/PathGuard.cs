@@ -36,6 +36,11 @@ internal sealed class PathGuard
             return false;
         }
 
+        return IsSensibleFile(fullPath, shown, span, maximumBytes, diagnostics);
+    }
+
+    private bool IsSensibleFile(string fullPath, string shown, SourceSpan span, long maximumBytes, DiagnosticBag diagnostics)
+    {
         var file = new FileInfo(RealPath.Of(fullPath));
         if (file.LinkTarget is not null)
         {
@@ -52,7 +57,7 @@ internal sealed class PathGuard
         if (file.Length > maximumBytes)
         {
             diagnostics.Error(ConfigCodes.FileTooLarge,
-                FormattableString.Invariant($"`{shown}` has {file.Length} bytes, more than the {maximumBytes} that are read"), span);
+                $"`{shown}` has {file.Length} bytes, more than the {maximumBytes} that are read", span);
             return false;
         }
 
@@ -101,7 +106,8 @@ internal sealed class PathGuard
     {
         try
         {
-            return [.. Directory.EnumerateFiles(folder).Take(MaximumListed).Select(path => Path.GetFileName(path)!).Order(StringComparer.Ordinal)];
+            IEnumerable<string> paths = Directory.EnumerateFiles(folder).Take(MaximumListed);
+            return [.. paths.Select(path => Path.GetFileName(path)).Order(StringComparer.Ordinal)];
         }
         catch (Exception e) when (e is IOException or UnauthorizedAccessException)
         {

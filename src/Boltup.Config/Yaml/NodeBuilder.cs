@@ -164,7 +164,8 @@ internal sealed partial class NodeBuilder(EventStream events, SpanFactory spans,
         }
 
         var name = (YamlScalar)key;
-        return new YamlEntry(name.Text, name.Span, name.IsPlain, value);
+        YamlNode placed = value is YamlScalar { IsEmpty: true } ? value with { Span = name.Span } : value;
+        return new YamlEntry(name.Text, name.Span, name.IsPlain, placed);
     }
 
     private bool CanGoOn() => !_gaveUp && events.Failure is null;

@@ -29,7 +29,8 @@ internal sealed class SpanFactory(SourceFile file, string[] lines)
         }
 
         SourceSpan span = Between(start, end);
-        return end.Line == start.Line && CharacterAt(end) is '}' or ']' ? span with { Length = (int)(end.Column - start.Column) + 1 } : span;
+        bool endsHere = end.Line == start.Line && CharacterAt(end) is '}' or ']';
+        return endsHere ? span with { Length = (int)(end.Column - start.Column) + 1 } : span;
     }
 
     private char? CharacterAt(Mark mark)

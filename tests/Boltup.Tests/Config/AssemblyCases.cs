@@ -12,6 +12,8 @@ internal static class AssemblyCases
         new("CFG013", Head + "frequencies: «{ from: 20 Hz, to: 2000 Hz }»\n", "`step`"),
         new("CFG014", Head + "parts2: 1\n".Replace("parts2: 1", "joints: { a: «rigid» }", StringComparison.Ordinal), "expected a map"),
         new("CFG014", "boltup: assembly/1\nparts: { source: «[a]» }\n", "the path of a part file, or a map"),
+        new("CFG012", Head + "mounts: { front: { «stifness»: { x: 120 N/mm }, loss_factor: 0.1 } }\n"),
+        new("CFG014", Head + "mounts:\n  «front»:\n", "has no value"),
         new("CFG015", Soft + "joints: { j: { between: [source.m1, body.b1], through: soft, «rigid»: [x] } }\n", "only one of"),
         new("CFG015", Head + "mounts: { a: «{}» }\n", "`stiffness`, `stiffness_matrix`, `like`, `table`"),
         new("CFG016", Head + "responses: { r: { at: body.b.z, as: «acceleraton» } }\n", "did you mean `acceleration`?"),

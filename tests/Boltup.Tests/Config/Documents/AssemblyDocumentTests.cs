@@ -146,6 +146,8 @@ public class AssemblyDocumentTests
     [InlineData("0.1 Hz", "0.3 Hz", "0.1 Hz", 3)]
     [InlineData("20 Hz", "29 Hz", "2 Hz", 5)]
     [InlineData("20 Hz", "20 Hz", "1 Hz", 1)]
+    [InlineData("0 Hz", "100.5 kHz", "1 Hz", 100_501)]
+    [InlineData("0 Hz", "100.4999 kHz", "1 Hz", 100_500)]
     public void Frequencies_AnyRange_EndAtTheLastLineInside(string from, string to, string step, int count)
     {
         using ConfigFolder folder = Samples.Folder().With("a.assembly.yaml",

@@ -66,7 +66,7 @@ public class PartDocumentTests
         using ConfigFolder folder = new ConfigFolder().With("a.part.yaml",
             "boltup: part/1\ntitel: x\nlumped:\n  direction: q\n  masses: { a: 1, b: 2 kgg }\n  links: [ { stiffness: 3 kg } ]\n");
         Assert.Null(folder.LoadPart().Document);
-        Assert.Equal(["CFG012", "CFG016", "CFG030", "CFG031", "CFG032", "CFG013"], folder.Diagnostics.Items.Select(item => item.Code.Code));
+        Assert.Equal(["CFG012", "CFG016", "CFG030", "CFG031", "CFG013", "CFG032"], folder.Diagnostics.Items.Select(item => item.Code.Code));
     }
 
     [Fact]
