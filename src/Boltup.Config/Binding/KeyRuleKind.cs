@@ -1,0 +1,8 @@
+namespace Boltup.Config.Binding;
+
+public enum KeyRuleKind
+{
+    ExactlyOne,
+    AtLeastOne,
+    Needs,
+}

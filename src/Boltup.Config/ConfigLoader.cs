@@ -1,0 +1,29 @@
+using Boltup.Config.Documents;
+using Boltup.Engine.Diagnostics;
+
+namespace Boltup.Config;
+
+/// <summary>Loads documents from files: syntax, then schema, then references, then whether the files are there.</summary>
+/// <remarks>All errors of a phase are reported; a later phase only runs when the earlier ones of the same document found none.</remarks>
+public static class ConfigLoader
+{
+    /// <summary>Loads a part file.</summary>
+    public static LoadResult<PartDocument> LoadPart(string path, LoadOptions options, DiagnosticBag diagnostics)
+    {
+        var load = new DocumentLoad(path, options);
+        PartDocument? part = load.Part(diagnostics);
+        return new LoadResult<PartDocument>(part, load.FilesRead);
+    }
+
+    /// <summary>Loads an assembly file with its bases and its parts.</summary>
+    public static LoadResult<AssemblyDocument> LoadAssembly(string path, LoadOptions options, DiagnosticBag diagnostics)
+    {
+        var load = new DocumentLoad(path, options);
+        AssemblyDocument? assembly = load.Assembly(diagnostics);
+        return new LoadResult<AssemblyDocument>(assembly, load.FilesRead);
+    }
+
+    /// <summary>The kind of a document by its first key, or null with a diagnostic when it has none that this version reads.</summary>
+    public static DocumentKind? KindOf(string path, LoadOptions options, DiagnosticBag diagnostics) =>
+        new DocumentLoad(path, options).Kind(diagnostics);
+}

@@ -1,0 +1,8 @@
+namespace Boltup.Config;
+
+/// <summary>The kinds of document that this version reads.</summary>
+public enum DocumentKind
+{
+    Part,
+    Assembly,
+}

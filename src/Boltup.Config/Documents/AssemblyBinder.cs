@@ -1,0 +1,103 @@
+using Boltup.Config.Binding;
+using Boltup.Config.Units;
+using Boltup.Config.Yaml;
+using Boltup.Engine.Diagnostics;
+using Boltup.Engine.Prediction;
+using Boltup.Engine.Spectra;
+
+namespace Boltup.Config.Documents;
+
+/// <summary>Turns the validated nodes of an assembly into a document; parts are bound without their files.</summary>
+internal sealed partial class AssemblyBinder(DiagnosticBag diagnostics)
+{
+    private const double DefaultJointGapM = 0.005;
+
+    /// <summary>Share of a step by which rounding may miss the last line; 1e7 steps are off by less than 1e-8.</summary>
+    private const double StepTolerance = 1e-6;
+
+    public AssemblyDocument Bind(YamlMap root, IReadOnlyList<SourceFile> bases) => new(
+        root.Source,
+        bases,
+        root["title"]?.MarkedText(),
+        root["frequencies"] is YamlMap frequencies ? BindFrequencies(frequencies) : null,
+        [.. root["parts"].Entries().Select(BindPart)],
+        [.. root["mounts"].Entries().Select(mount => new MountDocument(mount.MarkedKey(), BindLaw((YamlMap)mount.Value)))],
+        [.. root["joints"].Entries().Select(BindJoint).OfType<JointDocument>()],
+        [.. root["operations"].Entries().Select(BindOperation)],
+        [.. root["responses"].Entries().Select(BindResponse).OfType<ResponseDocument>()],
+        root["joint_gap"]?.Si(Dimension.Length) ?? DefaultJointGapM);
+
+    private FrequencyDocument? BindFrequencies(YamlMap map)
+    {
+        Marked<double> from = map["from"]!.MarkedSi(Dimension.Frequency);
+        Marked<double> to = map["to"]!.MarkedSi(Dimension.Frequency);
+        Marked<double> step = map["step"]!.MarkedSi(Dimension.Frequency);
+        if (to.Value < from.Value)
+        {
+            diagnostics.Error(ConfigCodes.BadFrequencies, "`to` is below `from`", to.Span, notes: $"`from` is at {from.Span}");
+            return null;
+        }
+
+        double steps = Math.Floor((to.Value - from.Value) / step.Value + StepTolerance);
+        if (!(steps < FrequencyLimits.MaximumLines))
+        {
+            diagnostics.Error(ConfigCodes.BadFrequencies,
+                FormattableString.Invariant($"more than {FrequencyLimits.MaximumLines} frequency lines"), step.Span, "take a larger step");
+            return null;
+        }
+
+        return new FrequencyDocument(from, to, step, (int)steps + 1);
+    }
+
+    private PlacedPartDocument BindPart(YamlEntry entry)
+    {
+        var map = entry.Value as YamlMap;
+        return new PlacedPartDocument(
+            entry.MarkedKey(),
+            (map?["file"] ?? entry.Value).File(),
+            map?["turned"] is YamlMap turned ? BindTurn(turned) : null,
+            map?["moved"]?.Position(),
+            Document: null);
+    }
+
+    private TurnDocument? BindTurn(YamlMap map)
+    {
+        YamlNode about = map["about"]!;
+        Vector3D axis = about is YamlScalar name ? UnitVector(name.Text) : about.Vector().Value;
+        double length = axis.Length;
+        if (!(length > 0 && double.IsFinite(length)))
+        {
+            diagnostics.Error(ConfigCodes.BadAxes,
+                "the axis of rotation has no direction", about.Span, "write `x`, `y`, `z` or a vector such as `[0, 0, 1]`");
+            return null;
+        }
+
+        return new TurnDocument(new(axis / length, about.Span), map["by"]!.MarkedSi(Dimension.Angle));
+    }
+
+    private static Vector3D UnitVector(string name) => name switch
+    {
+        "x" => new(1, 0, 0),
+        "y" => new(0, 1, 0),
+        _ => new(0, 0, 1),
+    };
+
+    private static OperationDocument BindOperation(YamlEntry entry)
+    {
+        var map = (YamlMap)entry.Value;
+        return new OperationDocument(
+            entry.MarkedKey(),
+            map["title"]?.MarkedText(),
+            [.. BindForces(map["blocked_forces"], ForceKind.Blocked), .. BindForces(map["applied_forces"], ForceKind.Applied)],
+            map["sum"]?.Text() == "energy" ? ForceSum.Energy : ForceSum.Phase,
+            map["amplitude"] is YamlNode amplitude
+                ? new(amplitude.Text() == "peak" ? Amplitude.Peak : Amplitude.Rms, amplitude.Span)
+                : null);
+    }
+
+    private static IEnumerable<ForceDocument> BindForces(YamlNode? node, ForceKind kind)
+    {
+        IEnumerable<YamlNode> files = node is YamlMap single ? [single] : node.Items();
+        return files.Cast<YamlMap>().Select(file => new ForceDocument(kind, file["file"]!.File(), file["part"]!.MarkedText()));
+    }
+}

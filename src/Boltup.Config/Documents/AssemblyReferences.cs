@@ -1,0 +1,102 @@
+using Boltup.Config.Binding;
+using Boltup.Engine.Diagnostics;
+
+namespace Boltup.Config.Documents;
+
+/// <summary>Checks that every name in an assembly names something, as far as documents without data can tell.</summary>
+internal sealed class AssemblyReferences(AssemblyDocument assembly, DiagnosticBag diagnostics)
+{
+    private readonly Dictionary<string, KnownNames?> _pointsByPart = assembly.Parts.ToDictionary(
+        part => part.Name.Value, part => part.Document?.KnownPoints is { } points ? new KnownNames("point", points) : null);
+
+    private readonly KnownNames _parts = new("part", assembly.Parts.Select(part => part.Name.Value));
+    private readonly KnownNames _mounts = new("mount", assembly.Mounts.Select(mount => mount.Name.Value));
+
+    public void Check()
+    {
+        CheckMounts();
+        CheckJoints();
+        foreach (ForceDocument force in assembly.Operations.SelectMany(operation => operation.Forces))
+        {
+            _parts.Check(force.Part.Value, force.Part.Span, diagnostics);
+        }
+
+        foreach (ResponseDocument response in assembly.Responses)
+        {
+            CheckPoint(response.At.Value.Part, response.At.Value.Dof.Point, response.At.Span);
+        }
+    }
+
+    private void CheckMounts()
+    {
+        var laws = new Dictionary<string, LikeLawDocument>(StringComparer.Ordinal);
+        foreach (MountDocument mount in assembly.Mounts)
+        {
+            if (mount.Law is LikeLawDocument like && _mounts.Check(like.Mount.Value, like.Mount.Span, diagnostics))
+            {
+                laws.Add(mount.Name.Value, like);
+            }
+        }
+
+        foreach (string name in LikeCircles.In(laws))
+        {
+            diagnostics.Error(ConfigCodes.LikeItself, $"mount `{name}` is like itself", laws[name].Mount.Span,
+                "let one of the mounts in the circle have a stiffness of its own");
+        }
+    }
+
+    private void CheckJoints()
+    {
+        var seen = new Dictionary<(string, string), JointDocument>();
+        foreach (JointDocument joint in assembly.Joints)
+        {
+            bool hasPoints = CheckEnd(joint.First) & CheckEnd(joint.Second);
+            bool hasMount = joint.Mount is null || _mounts.Check(joint.Mount.Value, joint.Mount.Span, diagnostics);
+            if (hasPoints && hasMount)
+            {
+                CheckPair(joint, seen);
+            }
+        }
+    }
+
+    private bool CheckEnd(JointEnd end) => end.IsGround || CheckPoint(end.Part!, end.Point!, end.Span);
+
+    private void CheckPair(JointDocument joint, Dictionary<(string, string), JointDocument> seen)
+    {
+        string first = joint.First.ToString();
+        string second = joint.Second.ToString();
+        if (first == second)
+        {
+            DiagnosticCode code = joint.First.IsGround ? ConfigCodes.GroundMisused : ConfigCodes.JoinedToItself;
+            diagnostics.Error(code, $"joint `{joint.Name}` joins `{first}` to itself", joint.Second.Span, "name two different points");
+            return;
+        }
+
+        var pair = string.CompareOrdinal(first, second) < 0 ? (first, second) : (second, first);
+        if (!seen.TryAdd(pair, joint))
+        {
+            JointDocument other = seen[pair];
+            diagnostics.Error(ConfigCodes.SameJoint, $"joints `{other.Name}` and `{joint.Name}` join the same two points", joint.Name.Span,
+                "make one joint of them", $"the other is at {other.Name.Span}");
+        }
+    }
+
+    /// <summary>The part must be there, and the point too where the part's document names its points.</summary>
+    private bool CheckPoint(string part, string point, SourceSpan span)
+    {
+        if (!_parts.Check(part, span, diagnostics))
+        {
+            return false;
+        }
+
+        if (_pointsByPart[part] is not KnownNames points || points.Contains(point))
+        {
+            return true;
+        }
+
+        string? near = points.Nearest(point);
+        diagnostics.Error(ConfigCodes.UnknownName, $"part `{part}` has no point `{point}`", span,
+            near is null ? null : $"did you mean `{part}.{near}`?", Words.Known($"points of `{part}`", points.All));
+        return false;
+    }
+}

@@ -1,0 +1,97 @@
+using Boltup.Config.Binding;
+using Boltup.Config.Units;
+
+namespace Boltup.Config.Documents;
+
+/// <summary>The keys of an assembly document.</summary>
+public static class AssemblyShape
+{
+    private static readonly PathKind PartFile = new("a part file");
+
+    private static readonly Shape Frequencies = new("a frequency range",
+    [
+        new("from", new QuantityKind(Dimension.Frequency, "20", Sign.NotNegative), "first line", IsRequired: true),
+        new("to", new QuantityKind(Dimension.Frequency, "2000", Sign.Positive), "last line", IsRequired: true),
+        new("step", new QuantityKind(Dimension.Frequency, "1", Sign.Positive), "distance of the lines", IsRequired: true),
+    ]);
+
+    private static readonly Shape Turned = new("a rotation",
+    [
+        new("about", new EitherKind(new ChoiceKind("x", "y", "z"), new ListKind(new NumberKind("1"), 3, 3)),
+            "axis of the assembly, or a vector", IsRequired: true),
+        new("by", new QuantityKind(Dimension.Angle, "90"), "angle, right-handed", IsRequired: true),
+    ]);
+
+    private static readonly Shape PlacedPart = new("a placed part",
+    [
+        new("file", PartFile, "the part file", IsRequired: true),
+        new("turned", new ShapeKind(Turned), "rotation about the part's origin, before it is moved"),
+        new("moved", SharedKinds.Position, "where the part's origin goes"),
+    ]);
+
+    private static readonly Shape Mount = new("a mount",
+    [
+        new("stiffness", SharedKinds.PerDirection("stiffness", "120", Dimension.Stiffness, Dimension.RotationalStiffness),
+            "stiffness per direction; a direction left out is free"),
+        new("stiffness_matrix", new StiffnessMatrixKind(), "full symmetric stiffness matrix, rows of x, y, z or x, y, z, rx, ry, rz"),
+        new("like", new TextKind("the name of a mount"), "another mount whose law this one has"),
+        new("table", new PathKind("a table of dynamic stiffness"), "CSV of complex dynamic stiffness over frequency"),
+        new("loss_factor", new NumberKind("0.12", Sign.NotNegative), "loss factor of the stiffness"),
+        new("damping", SharedKinds.PerDirection("damping", "12", Dimension.Damping, Dimension.RotationalDamping),
+            "viscous damping per direction"),
+        new("scale", new NumberKind("0.8", Sign.Positive), "factor on the law of the other mount"),
+    ],
+    KeyRule.ExactlyOne("stiffness", "stiffness_matrix", "like", "table"),
+    KeyRule.Needs("loss_factor", "stiffness", "stiffness_matrix"),
+    KeyRule.Needs("damping", "stiffness", "stiffness_matrix"),
+    KeyRule.Needs("scale", "like"));
+
+    private static readonly Shape Joint = new("a joint",
+    [
+        new("between", new ListKind(new TextKind("`part.point` or `ground`"), 2, 2), "the two points that it connects", IsRequired: true),
+        new("rigid", new ListKind(SharedKinds.MotionDirection, IsSet: true), "directions that it locks"),
+        new("through", new TextKind("the name of a mount"), "the mount that it goes through"),
+    ],
+    KeyRule.ExactlyOne("rigid", "through"));
+
+    private static readonly Shape Forces = new("a force file",
+    [
+        new("file", new PathKind("a force file"), "CSV or Universal File of forces", IsRequired: true),
+        new("part", new TextKind("the name of a part"), "the part whose dofs the file names", IsRequired: true),
+    ]);
+
+    private static readonly EitherKind ForceList = new(new ShapeKind(Forces), new ListKind(new ShapeKind(Forces)));
+
+    private static readonly Shape Operation = new("an operation",
+    [
+        new("title", new TextKind("a title"), "what the running condition is"),
+        new("blocked_forces", ForceList, "blocked forces of sources at their interfaces"),
+        new("applied_forces", ForceList, "forces from outside, at any dof"),
+        new("sum", new ChoiceKind("phase", "energy"), "how several files add up; in phase by default"),
+        new("amplitude", new ChoiceKind("rms", "peak"), "what the magnitudes in the files are"),
+    ],
+    KeyRule.AtLeastOne("blocked_forces", "applied_forces"));
+
+    private static readonly Shape Response = new("a response",
+    [
+        new("at", new TextKind("`part.point.direction`"), "the dof", IsRequired: true),
+        new("as", new ChoiceKind("acceleration", "velocity", "displacement"), "quantity of a motion; acceleration by default"),
+    ]);
+
+    public static readonly Shape Root = new("an assembly",
+    [
+        new("boltup", new ChoiceKind("assembly/1"), "kind and version of the document", IsRequired: true),
+        new("based_on", new PathKind("an assembly file"), "assembly whose keys this one takes over and changes"),
+        new("title", new TextKind("a title"), "what the assembly is"),
+        new("frequencies", new ShapeKind(Frequencies), "lines to compute; by default those that the parts share"),
+        new("parts", new NamedKind("part", new EitherKind(PartFile, new ShapeKind(PlacedPart)), IsDotted: true, Minimum: 1),
+            "the parts and where they are", IsRequired: true),
+        new("mounts", new NamedKind("mount", new ShapeKind(Mount)), "resilient elements"),
+        new("joints", new NamedKind("joint", new ShapeKind(Joint)), "connections of two points"),
+        new("joint_gap", new QuantityKind(Dimension.Length, "5", Sign.NotNegative),
+            "distance up to which joined points count as coinciding; 5 mm by default"),
+        new("operations", new NamedKind("operation", new ShapeKind(Operation), MakesFileNames: true), "running conditions"),
+        new("responses", new NamedKind("response", new ShapeKind(Response), MakesFileNames: true), "dofs that somebody cares about"),
+        new("targets", new ReservedKind(AllowsEmpty: true), "limits on responses"),
+    ]);
+}

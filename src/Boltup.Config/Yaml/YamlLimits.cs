@@ -1,0 +1,8 @@
+namespace Boltup.Config.Yaml;
+
+/// <summary>Bounds on what a document may be, far above any that people write and far below what would hurt.</summary>
+internal static class YamlLimits
+{
+    public const int MaximumDepth = 24;
+    public const int MaximumErrors = 50;
+}
