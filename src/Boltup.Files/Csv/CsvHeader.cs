@@ -1,0 +1,27 @@
+namespace Boltup.Files.Csv;
+
+/// <summary>The tables that a CSV may be, by their first row.</summary>
+internal sealed record CsvHeader(string Text, string Format, FunctionKind Kind, int NameColumns)
+{
+    public static readonly CsvHeader Frf = new("response,excitation,frequency_hz,real,imag", "CSV of FRFs", FunctionKind.Frf, 2);
+
+    public static readonly CsvHeader Spectrum = new("dof,frequency_hz,real,imag", "CSV of spectra", FunctionKind.Spectrum, 1);
+
+    public static readonly CsvHeader Stiffness = new(
+        "direction,frequency_hz,real,imag", "CSV of dynamic stiffness", FunctionKind.MountStiffness, 1);
+
+    public static IReadOnlyList<CsvHeader> All { get; } = [Frf, Spectrum, Stiffness];
+
+    /// <summary>All headers, for messages.</summary>
+    public static string KnownText => string.Join("; ", All.Select(header => $"`{header.Text}`"));
+
+    /// <summary>Number of columns.</summary>
+    public int Columns => NameColumns + 3;
+
+    /// <summary>The known header that shares most columns with a wrong one.</summary>
+    public static CsvHeader Nearest(string text)
+    {
+        string[] found = text.ToLowerInvariant().Split(',', StringSplitOptions.TrimEntries);
+        return All.MaxBy(header => header.Text.Split(',').Count(found.Contains))!;
+    }
+}

@@ -1,0 +1,57 @@
+using System.Text;
+using Boltup.Engine.Diagnostics;
+using Boltup.Files.Text;
+
+namespace Boltup.Files.UniversalFile;
+
+/// <summary>Reads the rows of an ASCII record, by columns: numbers may touch each other.</summary>
+internal static class AsciiData
+{
+    /// <summary>Reads as many numbers as there is room for.</summary>
+    /// <param name="numbers">Abscissa (where there is one) and parts of each point in turn.</param>
+    public static bool Read(LineReader lines, DataLayout layout, Span<double> numbers, string displayPath, DiagnosticBag diagnostics)
+    {
+        int[] widths = layout.RowWidths;
+        lines.MoveTo(layout.Offset);
+        int filled = 0;
+        for (int row = 0; filled < numbers.Length; row++)
+        {
+            lines.TryRead(out ReadOnlySpan<byte> line);
+            int start = 0;
+            for (int field = 0; field < widths.Length && filled < numbers.Length; field++)
+            {
+                int end = Math.Min(start + widths[field], line.Length);
+                if (start >= end || !NumberParser.TryParse(line[start..end], out numbers[filled]))
+                {
+                    Refuse(line, Math.Min(start, line.Length), end, layout.FirstLine + row, displayPath, diagnostics);
+                    return false;
+                }
+
+                filled++;
+                start = end;
+            }
+        }
+
+        return true;
+    }
+
+    /// <summary>Number of fields that a row really holds.</summary>
+    public static int FieldsIn(ReadOnlySpan<byte> line, int[] widths)
+    {
+        int length = line.TrimEnd((byte)' ').Length;
+        int fields = 0;
+        for (int start = 0; fields < widths.Length && start < length; fields++)
+        {
+            start += widths[fields];
+        }
+
+        return fields;
+    }
+
+    private static void Refuse(ReadOnlySpan<byte> line, int start, int end, int lineNumber, string displayPath, DiagnosticBag diagnostics) =>
+        diagnostics.Error(
+            FileCodes.BadNumber,
+            $"`{Encoding.Latin1.GetString(line[start..Math.Max(start, end)]).Trim()}` is no number",
+            new SourceSpan(displayPath, lineNumber, start + 1, Math.Max(1, end - start)),
+            "export the file again; values stand in fixed columns of 13 or 20");
+}

@@ -1,0 +1,6 @@
+namespace Boltup.Files.UniversalFile;
+
+/// <summary>Lines 8 to 11 of a dataset 58: what an axis of the function is.</summary>
+/// <param name="DataType">Specific data type: 8 displacement, 12 acceleration, 18 frequency …</param>
+/// <param name="Unit">Label of the unit as written.</param>
+internal sealed record AxisField(int DataType, int LengthExponent, int ForceExponent, string Label, string Unit);

@@ -1,0 +1,90 @@
+using System.Text;
+using Boltup.Engine.Prediction;
+
+namespace Boltup.Files.UniversalFile;
+
+/// <summary>The small datasets: points, units, qualifiers.</summary>
+internal sealed partial class DatasetWalker
+{
+    /// <summary>Dataset 15: node and coordinates in one line (4I10,1P3E13.5); 2411: in two (4I10 / 1P3D25.16).</summary>
+    private void ReadPoints(int dataset)
+    {
+        _liberties.Place = new(_displayPath, _lines.LineNumber);
+        while (_lines.TryRead(out ReadOnlySpan<byte> line) && !IsDelimiter(line))
+        {
+            string node = Encoding.Latin1.GetString(line);
+            string coordinates = node;
+            (int start, int width) = (40, 13);
+            if (dataset == 2411)
+            {
+                if (!_lines.TryRead(out ReadOnlySpan<byte> second) || IsDelimiter(second))
+                {
+                    return;
+                }
+
+                coordinates = Encoding.Latin1.GetString(second);
+                (start, width) = (0, 25);
+            }
+
+            AddPoint(node, coordinates, start, width);
+        }
+    }
+
+    private void AddPoint(string nodeLine, string coordinates, int start, int width)
+    {
+        if (FixedColumns.TryInteger(nodeLine, 0, 10, out int node)
+            && FixedColumns.TryReal(coordinates, start, width, out double x)
+            && FixedColumns.TryReal(coordinates, start + width, width, out double y)
+            && FixedColumns.TryReal(coordinates, start + 2 * width, width, out double z))
+        {
+            double metres = 1 / _units.LengthFactor;
+            _points.Add(new MeasuredPoint(FormattableString.Invariant($"{node}"), metres * x, metres * y, metres * z));
+            return;
+        }
+
+        LeaveOut(FileCodes.BadHeader, "a point has no readable number or place", new(_displayPath, _lines.LineNumber));
+    }
+
+    /// <summary>Dataset 164: code and name, then the factors for length, force and temperature (3D25.17).</summary>
+    private void ReadUnits()
+    {
+        var lines = new List<string>();
+        while (_lines.TryRead(out ReadOnlySpan<byte> line) && !IsDelimiter(line))
+        {
+            lines.Add(Encoding.Latin1.GetString(line));
+        }
+
+        if (lines.Count >= 2
+            && FixedColumns.TryReal(lines[1], 0, 25, out double length)
+            && FixedColumns.TryReal(lines[1], 25, 25, out double force)
+            && length > 0 && force > 0 && double.IsFinite(length) && double.IsFinite(force))
+        {
+            _units = new UnitSystem(length, force);
+            if (_units != UnitSystem.Si)
+            {
+                _liberties.Note(FileCodes.UnitConverted, FormattableString.Invariant($"units of dataset 164 were converted to SI: length ÷ {length}, force ÷ {force}"));
+            }
+
+            return;
+        }
+
+        LeaveOut(FileCodes.BadHeader, "dataset 164 has no readable factors for length and force", new(_displayPath, _lines.LineNumber));
+    }
+
+    /// <summary>Dataset 1858: the third field of its second line is 2 for peak and 3 for rms amplitudes (from memory).</summary>
+    private void ReadQualifiers()
+    {
+        _lines.TryRead(out _);
+        if (_lines.TryRead(out ReadOnlySpan<byte> line) && FixedColumns.TryInteger(Encoding.Latin1.GetString(line), 12, 6, out int amplitude))
+        {
+            _amplitude = amplitude switch
+            {
+                2 => Amplitude.Peak,
+                3 => Amplitude.Rms,
+                _ => null,
+            };
+        }
+
+        SkipDataset();
+    }
+}

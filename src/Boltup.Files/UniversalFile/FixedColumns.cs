@@ -1,0 +1,43 @@
+using System.Globalization;
+using System.Text;
+using Boltup.Files.Text;
+
+namespace Boltup.Files.UniversalFile;
+
+/// <summary>Fields of a line by their columns, as Fortran formats lay them out; a line that ends early has blank fields.</summary>
+internal static class FixedColumns
+{
+    public static string Text(string line, int start, int length) =>
+        start >= line.Length ? "" : line.Substring(start, Math.Min(length, line.Length - start)).Trim();
+
+    /// <summary>An integer field; blank is 0.</summary>
+    public static bool TryInteger(string line, int start, int length, out int value)
+    {
+        string text = Text(line, start, length);
+        value = 0;
+        return text.Length == 0 || int.TryParse(text, NumberStyles.AllowLeadingSign, CultureInfo.InvariantCulture, out value);
+    }
+
+    /// <summary>A real field; blank is 0.</summary>
+    public static bool TryReal(string line, int start, int length, out double value)
+    {
+        string text = Text(line, start, length);
+        value = 0;
+        return text.Length == 0 || NumberParser.TryParse(Encoding.ASCII.GetBytes(text), out value);
+    }
+
+    /// <summary>Header text: UTF-8 where it is valid, otherwise Latin-1.</summary>
+    public static string Decode(ReadOnlySpan<byte> line)
+    {
+        try
+        {
+            return Strict.GetString(line);
+        }
+        catch (DecoderFallbackException)
+        {
+            return Encoding.Latin1.GetString(line);
+        }
+    }
+
+    private static readonly UTF8Encoding Strict = new(encoderShouldEmitUTF8Identifier: false, throwOnInvalidBytes: true);
+}

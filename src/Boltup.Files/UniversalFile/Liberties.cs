@@ -1,0 +1,31 @@
+using Boltup.Engine.Diagnostics;
+
+namespace Boltup.Files.UniversalFile;
+
+/// <summary>Counts liberties, so that a file with a thousand records that break one rule draws one note.</summary>
+internal sealed class Liberties(string displayPath)
+{
+    private readonly Dictionary<(DiagnosticCode Code, string Text), (SourceSpan Span, int Count)> _taken = [];
+
+    /// <summary>Where the record stands that is being read.</summary>
+    public SourceSpan Place { get; set; } = new(displayPath);
+
+    public void Take(Liberty liberty) => Note(FileCodes.Liberty, liberty.Rule);
+
+    public void Note(DiagnosticCode code, string text)
+    {
+        (SourceSpan span, int count) = _taken.GetValueOrDefault((code, text), (Place, 0));
+        _taken[(code, text)] = (span, count + 1);
+    }
+
+    /// <summary>Says everything that was noted.</summary>
+    public void SayAll(DiagnosticBag diagnostics)
+    {
+        foreach (((DiagnosticCode code, string text), (SourceSpan span, int count)) in _taken)
+        {
+            diagnostics.Note(code, text, span, notes: count > 1 ? [$"{count} times in this file"] : []);
+        }
+
+        _taken.Clear();
+    }
+}
