@@ -35,10 +35,10 @@ public static partial class ConfigCodes
         "Write the value out. For mounts use `like`, for whole assemblies `based_on`.");
 
     public static readonly DiagnosticCode Tag = new(
-        "CFG005", "tag",
-        "Tags such as `!!str` are not read: the meaning of every key is fixed by the kind of the document.",
+        "CFG005", "tag or directive",
+        "Tags such as `!!str` and directives such as `%TAG` are not read: the meaning of every key is fixed by the kind of the document.",
         "title: !!str Compressor",
-        "Remove the tag; quote the value where it must be a text.");
+        "Remove the tag or directive; quote the value where it must be a text.");
 
     public static readonly DiagnosticCode SeveralDocuments = new(
         "CFG006", "several documents in one file",
