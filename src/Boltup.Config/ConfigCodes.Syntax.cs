@@ -22,7 +22,7 @@ public static partial class ConfigCodes
 
     public static readonly DiagnosticCode TooLarge = new(
         "CFG003", "document out of bounds",
-        "The document is nested deeper, or holds more errors, than a document written by people does. Reading "
+        "The document is nested deeper, or holds more values or errors, than a document written by people does. Reading "
             + "stops to protect the machine.",
         "a: [[[[[[[[[[[[[[[[[[[[[[[[[[ 1 ]]]]]]]]]]]]]]]]]]]]]]]]]]",
         "Check that the file is the one that is meant; then correct the first errors and run again.");

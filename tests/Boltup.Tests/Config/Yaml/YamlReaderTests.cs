@@ -69,6 +69,10 @@ public class YamlReaderTests
     }
 
     [Fact]
+    public void Read_MillionValues_IsRefused() =>
+        Assert.Equal("CFG003", Assert.Single(Errors("a: [" + string.Concat(Enumerable.Repeat("a,", 1_000_000)) + "]").Items).Code.Code);
+
+    [Fact]
     public void Read_HugeUnclosedLineWithTrailingBlank_TakesMemoryInProportion()
     {
         const int count = 50_000;
