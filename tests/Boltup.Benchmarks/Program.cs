@@ -1,3 +1,10 @@
 using BenchmarkDotNet.Running;
+using Boltup.Benchmarks.Kernels;
+
+if (args is ["ratios"])
+{
+    NumPyRatios.Run(Console.Out);
+    return;
+}
 
 BenchmarkSwitcher.FromAssembly(typeof(Program).Assembly).Run(args);

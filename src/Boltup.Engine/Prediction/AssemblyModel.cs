@@ -1,0 +1,19 @@
+using Boltup.Engine.Coupling;
+using Boltup.Engine.Parts;
+using Boltup.Engine.Spectra;
+
+namespace Boltup.Engine.Prediction;
+
+/// <summary>An assembly ready to be computed: every name resolved, every axis agreed.</summary>
+/// <param name="Axis">Lines on which the parts are coupled.</param>
+public sealed record AssemblyModel(
+    string Title,
+    FrequencyAxis Axis,
+    IReadOnlyList<PlacedPart> Parts,
+    IReadOnlyList<Joint> Joints,
+    IReadOnlyList<Operation> Operations,
+    IReadOnlyList<Response> Responses)
+{
+    /// <summary>Distance in m beyond which two joined points draw a warning.</summary>
+    public double JointGap { get; init; } = 0.005;
+}

@@ -1,0 +1,103 @@
+using System.Diagnostics;
+using System.Globalization;
+using System.Runtime.CompilerServices;
+using Boltup.Engine.Kernels;
+using Boltup.Engine.Spectra;
+
+namespace Boltup.Benchmarks.Kernels;
+
+/// <summary>
+/// LU and solve against NumPy's batched solve on one BLAS thread, both in one run and taking turns, as a Markdown table. Needs python3
+/// with NumPy; the variable PYTHON names another interpreter.
+/// </summary>
+internal static class NumPyRatios
+{
+    private const int Lines = 2000;
+    private const int Turns = 3;
+
+    private static readonly int[] Orders = [6, 12, 24, 48, 96];
+
+    public static void Run(TextWriter output)
+    {
+        output.WriteLine($"kernels {KernelChoice.Name}, 2,000 lines of smooth FRFs, shortest of several runs");
+        output.WriteLine();
+        output.WriteLine("| n | right-hand sides | NumPy, 1 thread | Boltup, 1 thread | ratio | 2 threads to 1 | GFLOP/s |");
+        output.WriteLine("| --- | --- | --- | --- | --- | --- | --- |");
+        foreach (int order in Orders)
+        {
+            WriteRow(output, order, order);
+            WriteRow(output, order, 1);
+        }
+    }
+
+    private static void WriteRow(TextWriter output, int order, int columns)
+    {
+        TiledMatrix a = FrfTiles.ModalSum(order, Lines);
+        TiledMatrix b = FrfTiles.Random(order, columns, Lines);
+        double numPy = double.PositiveInfinity;
+        double one = double.PositiveInfinity;
+        double two = double.PositiveInfinity;
+        for (int turn = 0; turn < Turns; turn++)
+        {
+            numPy = Math.Min(numPy, TimeNumPy(order, columns));
+            one = Math.Min(one, Shortest(() => SolveAll(a, b, threads: 1)));
+            two = Math.Min(two, Shortest(() => SolveAll(a, b, threads: 2)));
+        }
+
+        double flops = 8.0 * Lines * order * order * (order / 3.0 + columns);
+        output.WriteLine(string.Create(
+            CultureInfo.InvariantCulture,
+            $"| {order} | {columns} | {1e3 * numPy:F2} ms | {1e3 * one:F2} ms | {numPy / one:F1} | {one / two:F2} | {flops / one / 1e9:F0} |"));
+    }
+
+    private static double Shortest(Action action)
+    {
+        action();
+        double best = double.PositiveInfinity;
+        long end = Stopwatch.GetTimestamp() + Stopwatch.Frequency / 3;
+        while (Stopwatch.GetTimestamp() < end)
+        {
+            long start = Stopwatch.GetTimestamp();
+            action();
+            best = Math.Min(best, Stopwatch.GetElapsedTime(start).TotalSeconds);
+        }
+
+        return best;
+    }
+
+    private static void SolveAll(TiledMatrix a, TiledMatrix b, int threads)
+    {
+        var ranges = Enumerable.Range(0, threads).Select(i => (a.TileCount * i / threads, a.TileCount * (i + 1) / threads));
+        if (threads == 1)
+        {
+            SolveRange(a, b, 0, a.TileCount);
+            return;
+        }
+
+        Parallel.ForEach(ranges, range => SolveRange(a, b, range.Item1, range.Item2));
+    }
+
+    private static void SolveRange(TiledMatrix a, TiledMatrix b, int from, int to)
+    {
+        var lu = new BatchLu(a.Rows);
+        var work = new TiledMatrix(Tiling.Lanes, b.Rows, b.Columns);
+        for (int tile = from; tile < to; tile++)
+        {
+            b.Tile(tile).CopyTo(work.Tile(0));
+            lu.Factor(a.Tile(tile), a.Rows);
+            lu.Solve(work.Tile(0), b.Columns);
+        }
+    }
+
+    private static double TimeNumPy(int order, int columns)
+    {
+        var start = new ProcessStartInfo(Environment.GetEnvironmentVariable("PYTHON") ?? "python3", [ScriptPath(), $"{order}", $"{columns}", $"{Lines}", "5"]) { RedirectStandardOutput = true };
+        start.Environment["OPENBLAS_NUM_THREADS"] = "1";
+        start.Environment.Remove("OPENBLAS_CORETYPE");
+        start.Environment.Remove("OPENBLAS_L2_SIZE");
+        using Process process = Process.Start(start)!;
+        return double.Parse(process.StandardOutput.ReadLine()!, CultureInfo.InvariantCulture);
+    }
+
+    private static string ScriptPath([CallerFilePath] string file = "") => Path.Combine(Path.GetDirectoryName(file)!, "numpy_solve.py");
+}
