@@ -22,7 +22,7 @@ public static partial class ConfigCodes
 
     public static readonly DiagnosticCode TooLarge = new(
         "CFG003", "document out of bounds",
-        "The document is nested deeper, or holds more errors, than a document written by people does. Reading "
+        "The document is nested deeper, or holds more values or errors, than a document written by people does. Reading "
             + "stops to protect the machine.",
         "a: [[[[[[[[[[[[[[[[[[[[[[[[[[ 1 ]]]]]]]]]]]]]]]]]]]]]]]]]]",
         "Check that the file is the one that is meant; then correct the first errors and run again.");
@@ -35,10 +35,10 @@ public static partial class ConfigCodes
         "Write the value out. For mounts use `like`, for whole assemblies `based_on`.");
 
     public static readonly DiagnosticCode Tag = new(
-        "CFG005", "tag",
-        "Tags such as `!!str` are not read: the meaning of every key is fixed by the kind of the document.",
+        "CFG005", "tag or directive",
+        "Tags such as `!!str` and directives such as `%TAG` are not read: the meaning of every key is fixed by the kind of the document.",
         "title: !!str Compressor",
-        "Remove the tag; quote the value where it must be a text.");
+        "Remove the tag or directive; quote the value where it must be a text.");
 
     public static readonly DiagnosticCode SeveralDocuments = new(
         "CFG006", "several documents in one file",

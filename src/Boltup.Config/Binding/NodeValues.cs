@@ -2,6 +2,7 @@ using System.Globalization;
 using Boltup.Config.Documents;
 using Boltup.Config.Units;
 using Boltup.Config.Yaml;
+using Boltup.Engine.Geometry;
 using Boltup.Engine.Spectra;
 
 namespace Boltup.Config.Binding;
@@ -30,9 +31,9 @@ internal static class NodeValues
 
     public static Marked<double> MarkedSi(this YamlNode node, Dimension dimension) => new(node.Si(dimension), node.Span);
 
-    public static Marked<Vector3D> Position(this YamlNode node) => Vector(node, item => item.Si(Dimension.Length));
+    public static Marked<Vector3d> Position(this YamlNode node) => Vector(node, item => item.Si(Dimension.Length));
 
-    public static Marked<Vector3D> Vector(this YamlNode node) => Vector(node, Number);
+    public static Marked<Vector3d> Vector(this YamlNode node) => Vector(node, Number);
 
     public static Marked<Direction> Direction(this YamlNode node) => new(DirectionNamed(node.Text()), node.Span);
 
@@ -50,9 +51,9 @@ internal static class NodeValues
 
     public static IReadOnlyList<YamlNode> Items(this YamlNode? node) => node is null ? [] : ((YamlList)node).Items;
 
-    private static Marked<Vector3D> Vector(YamlNode node, Func<YamlNode, double> component)
+    private static Marked<Vector3d> Vector(YamlNode node, Func<YamlNode, double> component)
     {
         IReadOnlyList<YamlNode> items = node.Items();
-        return new(new Vector3D(component(items[0]), component(items[1]), component(items[2])), node.Span);
+        return new(new Vector3d(component(items[0]), component(items[1]), component(items[2])), node.Span);
     }
 }

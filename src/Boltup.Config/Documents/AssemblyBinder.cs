@@ -2,6 +2,7 @@ using Boltup.Config.Binding;
 using Boltup.Config.Units;
 using Boltup.Config.Yaml;
 using Boltup.Engine.Diagnostics;
+using Boltup.Engine.Geometry;
 using Boltup.Engine.Prediction;
 using Boltup.Engine.Spectra;
 
@@ -63,7 +64,7 @@ internal sealed partial class AssemblyBinder(DiagnosticBag diagnostics)
     private TurnDocument? BindTurn(YamlMap map)
     {
         YamlNode about = map["about"]!;
-        Vector3D axis = about is YamlScalar name ? UnitVector(name.Text) : about.Vector().Value;
+        Vector3d axis = about is YamlScalar name ? UnitVector(name.Text) : about.Vector().Value;
         double length = axis.Length;
         if (!(length > 0 && double.IsFinite(length)))
         {
@@ -72,10 +73,10 @@ internal sealed partial class AssemblyBinder(DiagnosticBag diagnostics)
             return null;
         }
 
-        return new TurnDocument(new(axis / length, about.Span), map["by"]!.MarkedSi(Dimension.Angle));
+        return new TurnDocument(new(axis.Normalised(), about.Span), map["by"]!.MarkedSi(Dimension.Angle));
     }
 
-    private static Vector3D UnitVector(string name) => name switch
+    private static Vector3d UnitVector(string name) => name switch
     {
         "x" => new(1, 0, 0),
         "y" => new(0, 1, 0),

@@ -1,6 +1,7 @@
 using Boltup.Config.Binding;
 using Boltup.Config.Yaml;
 using Boltup.Engine.Diagnostics;
+using Boltup.Engine.Geometry;
 
 namespace Boltup.Config.Documents;
 
@@ -15,7 +16,7 @@ internal static class AxesBinder
     /// <summary>The axes, or null with a diagnostic when they are none.</summary>
     public static Marked<PointAxes>? Bind(YamlMap map, DiagnosticBag diagnostics)
     {
-        var given = new Marked<Vector3D>?[3];
+        var given = new Marked<Vector3d>?[3];
         for (int i = 0; i < given.Length; i++)
         {
             given[i] = map[Names[i]]?.Vector();
@@ -35,7 +36,7 @@ internal static class AxesBinder
         return Complete(given, map, diagnostics);
     }
 
-    private static bool AreUnitVectors(Marked<Vector3D>?[] axes, DiagnosticBag diagnostics)
+    private static bool AreUnitVectors(Marked<Vector3d>?[] axes, DiagnosticBag diagnostics)
     {
         bool isFine = true;
         for (int i = 0; i < axes.Length; i++)
@@ -52,15 +53,15 @@ internal static class AxesBinder
         return isFine;
     }
 
-    private static string? Unit(Vector3D axis)
+    private static string? Unit(Vector3d axis)
     {
-        Vector3D unit = axis / axis.Length;
+        Vector3d unit = axis.Normalised();
         return double.IsFinite(unit.Length)
             ? FormattableString.Invariant($"write `[{unit.X:0.########}, {unit.Y:0.########}, {unit.Z:0.########}]`")
             : null;
     }
 
-    private static bool ArePerpendicular(Marked<Vector3D>?[] axes, DiagnosticBag diagnostics)
+    private static bool ArePerpendicular(Marked<Vector3d>?[] axes, DiagnosticBag diagnostics)
     {
         bool isFine = true;
         for (int i = 0; i < axes.Length; i++)
@@ -77,11 +78,11 @@ internal static class AxesBinder
         return isFine;
     }
 
-    private static Marked<PointAxes>? Complete(Marked<Vector3D>?[] given, YamlMap map, DiagnosticBag diagnostics)
+    private static Marked<PointAxes>? Complete(Marked<Vector3d>?[] given, YamlMap map, DiagnosticBag diagnostics)
     {
-        Vector3D x = given[0]?.Value ?? given[1]!.Value.Cross(given[2]!.Value);
-        Vector3D y = given[1]?.Value ?? given[2]!.Value.Cross(x);
-        Vector3D z = given[2]?.Value ?? x.Cross(y);
+        Vector3d x = given[0]?.Value ?? given[1]!.Value.Cross(given[2]!.Value);
+        Vector3d y = given[1]?.Value ?? given[2]!.Value.Cross(x);
+        Vector3d z = given[2]?.Value ?? x.Cross(y);
         if (x.Cross(y).Dot(z) < 0)
         {
             diagnostics.Error(ConfigCodes.BadAxes, "axes form a left-handed set", map.Span, "leave `z` out, or reverse one of them");

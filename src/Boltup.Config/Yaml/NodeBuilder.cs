@@ -9,6 +9,7 @@ internal sealed partial class NodeBuilder(EventStream events, SpanFactory spans,
 {
     private readonly Stack<NodeEvent> _open = new();
     private int _errors;
+    private int _nodes;
     private bool _gaveUp;
 
     /// <summary>The root, or null when anything was wrong.</summary>
@@ -60,6 +61,13 @@ internal sealed partial class NodeBuilder(EventStream events, SpanFactory spans,
     /// <summary>Builds the node under the cursor and leaves the cursor on its last event; null when the document is abandoned.</summary>
     private YamlNode? BuildNode(SourceSpan? owner)
     {
+        if (++_nodes > YamlLimits.MaximumNodes)
+        {
+            Report(ConfigCodes.TooLarge, $"more than {YamlLimits.MaximumNodes} keys and values", spans.At(events.Current!.Start));
+            _gaveUp = true;
+            return null;
+        }
+
         if (events.Current is NodeEvent node)
         {
             RefuseDecoration(node);

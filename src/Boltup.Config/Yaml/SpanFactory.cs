@@ -11,10 +11,14 @@ internal sealed class SpanFactory(SourceFile file, string[] lines)
     /// <summary>From one mark to another; cut at the end of the first line, at least one character long.</summary>
     public SourceSpan Between(Mark start, Mark end)
     {
-        int line = (int)Math.Clamp(start.Line, 1, lines.Length);
-        int lineLength = lines[line - 1].TrimEnd().Length;
-        int column = (int)Math.Clamp(start.Column, 1, Math.Max(1, lines[line - 1].Length + 1));
-        long stop = end.Line == start.Line ? end.Column : lineLength + 1;
+        if (start.Line > lines.Length)
+        {
+            return new SourceSpan(File.DisplayPath, lines.Length, Math.Max(1, lines[^1].Length));
+        }
+
+        int line = (int)Math.Max(1, start.Line);
+        int column = (int)Math.Clamp(start.Column, 1, lines[line - 1].Length + 1);
+        long stop = end.Line == start.Line ? end.Column : lines[line - 1].AsSpan().TrimEnd().Length + 1;
         return new SourceSpan(File.DisplayPath, line, column, (int)Math.Max(1, stop - column));
     }
 

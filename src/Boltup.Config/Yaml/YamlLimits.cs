@@ -5,4 +5,5 @@ internal static class YamlLimits
 {
     public const int MaximumDepth = 24;
     public const int MaximumErrors = 50;
+    public const int MaximumNodes = 200_000;
 }

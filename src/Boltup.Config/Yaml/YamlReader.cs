@@ -14,7 +14,7 @@ public static class YamlReader
     private static YamlNode? Parse(string text, SourceFile file, DiagnosticBag diagnostics)
     {
         string[] lines = text.Split(LineEnds, StringSplitOptions.None);
-        if (!TabCheck.HasNone(lines, file, diagnostics))
+        if (!LineCheck.IsClean(lines, file, diagnostics))
         {
             return null;
         }

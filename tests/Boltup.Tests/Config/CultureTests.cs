@@ -1,5 +1,6 @@
 using System.Globalization;
 using Boltup.Config.Documents;
+using Boltup.Engine.Geometry;
 
 namespace Boltup.Tests.Config;
 
@@ -16,7 +17,7 @@ public class CultureTests
         {
             using ConfigFolder folder = Samples.Folder();
             AssemblyDocument assembly = folder.LoadAssembly().Document!;
-            Assert.Equal(new Vector3D(1.2, 0, 0.3), assembly.FindPart("body")!.Moved!.Value);
+            Assert.Equal(new Vector3d(1.2, 0, 0.3), assembly.FindPart("body")!.Moved!.Value);
 
             folder.With("b.part.yaml", "boltup: part/1\nlumped: { direction: x, masses: { s: 1 kg } }\npoints: { s: { axes: { x: [0, 1.5, 0], y: [1, 0, 0] } } }\n");
             folder.LoadPart("b.part.yaml");

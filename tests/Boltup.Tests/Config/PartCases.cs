@@ -19,6 +19,8 @@ internal static class PartCases
         new("CFG004", Head + "title: «*a»\n", "`*a`"),
         new("CFG005", Head + "title: «!!str» text"),
         new("CFG005", Head + "frf: «!list»\n  - { file: a.uff }"),
+        new("CFG005", Head + "title: a\n«%TAG ! a»\n", "directives"),
+        new("CFG001", Head + "points: { m1: { node: 1 }«,»", "inside the `{` opened at a.part.yaml:2:9"),
         new("CFG006", Head + "title: a\n«---»\nboltup: part/1\n"),
         new("CFG007", Head + "lumped:\n«\t»direction: x\n", "spaces"),
         new("CFG007", Head + "lumped:\n  «\t»direction: x\n", "spaces"),

@@ -1,6 +1,7 @@
 using Boltup.Config.Documents;
 using Boltup.Config.Units;
 using Boltup.Engine.Diagnostics;
+using Boltup.Engine.Geometry;
 using Boltup.Engine.Prediction;
 using Boltup.Engine.Spectra;
 
@@ -20,9 +21,9 @@ public class AssemblyDocumentTests
         Assert.Equal(2000, assembly.Frequencies.ToAxis().LastHz);
         Assert.Equal(["compressor", "body"], assembly.Parts.Select(part => part.Name.Value));
         PlacedPartDocument body = assembly.FindPart("body")!;
-        Assert.Equal(new Vector3D(0, 0, 1), body.Turned!.About.Value);
+        Assert.Equal(new Vector3d(0, 0, 1), body.Turned!.About.Value);
         Assert.Equal(Math.PI / 2, body.Turned.AngleRad.Value, 15);
-        Assert.Equal(new Vector3D(1.2, 0, 0.3), body.Moved!.Value);
+        Assert.Equal(new Vector3d(1.2, 0, 0.3), body.Moved!.Value);
         Assert.IsType<LumpedModelDocument>(body.Document!.Model);
         Assert.Equal(0.008, assembly.JointGapM);
     }

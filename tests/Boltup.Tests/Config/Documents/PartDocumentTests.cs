@@ -1,6 +1,7 @@
 using Boltup.Config;
 using Boltup.Config.Documents;
 using Boltup.Engine.Diagnostics;
+using Boltup.Engine.Geometry;
 using Boltup.Engine.Spectra;
 
 namespace Boltup.Tests.Config.Documents;
@@ -13,7 +14,7 @@ public class PartDocumentTests
         using ConfigFolder folder = Samples.Folder();
         PartDocument part = folder.LoadPart("parts/compressor.part.yaml").Document!;
 
-        Assert.Equal(new Vector3D(0.092, 0.061, 0), part.Points[0].At!.Value);
+        Assert.Equal(new Vector3d(0.092, 0.061, 0), part.Points[0].At!.Value);
         Assert.Equal((101, new SourceSpan("parts/compressor.part.yaml", 4, 15, 3)), (part.Points[0].Node!.Value, part.Points[0].Node!.Span));
         Assert.Equal(new PointAxes(new(0, 1, 0), new(-1, 0, 0), new(0, 0, 1)), part.Points[1].Axes!.Value);
         var model = Assert.IsType<FrfModelDocument>(part.Model);

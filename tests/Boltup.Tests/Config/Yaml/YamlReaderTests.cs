@@ -69,6 +69,20 @@ public class YamlReaderTests
     }
 
     [Fact]
+    public void Read_MillionValues_IsRefused() =>
+        Assert.Equal("CFG003", Assert.Single(Errors("a: [" + string.Concat(Enumerable.Repeat("a,", 1_000_000)) + "]").Items).Code.Code);
+
+    [Fact]
+    public void Read_HugeUnclosedLineWithTrailingBlank_TakesMemoryInProportion()
+    {
+        const int count = 50_000;
+        string text = "a: [" + string.Concat(Enumerable.Repeat("'x', ", count));
+        long before = GC.GetAllocatedBytesForCurrentThread();
+        Assert.Equal("CFG001", Assert.Single(Errors(text).Items).Code.Code);
+        Assert.InRange(GC.GetAllocatedBytesForCurrentThread() - before, 0, 1000L * count);
+    }
+
+    [Fact]
     public void Read_InvalidUtf8_NamesByteAndPlace()
     {
         var found = new DiagnosticBag();

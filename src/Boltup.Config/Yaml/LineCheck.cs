@@ -2,10 +2,13 @@ using Boltup.Engine.Diagnostics;
 
 namespace Boltup.Config.Yaml;
 
-/// <summary>Finds tabs in indentation: YAML forbids them there, and parsers disagree on what they mean.</summary>
-internal static class TabCheck
+/// <summary>
+/// Looks at the beginnings of lines: YAML forbids tabs there, and parsers disagree on what they mean; a directive in the wrong
+/// place makes the parser skip text without a word.
+/// </summary>
+internal static class LineCheck
 {
-    public static bool HasNone(string[] lines, SourceFile file, DiagnosticBag diagnostics)
+    public static bool IsClean(string[] lines, SourceFile file, DiagnosticBag diagnostics)
     {
         int found = 0;
         for (int i = 0; i < lines.Length && found < YamlLimits.MaximumErrors; i++)
@@ -15,6 +18,12 @@ internal static class TabCheck
                 found++;
                 diagnostics.Error(ConfigCodes.TabIndentation, "a tab in the indentation",
                     new SourceSpan(file.DisplayPath, i + 1, column), "indent with spaces");
+            }
+            else if (lines[i].StartsWith('%'))
+            {
+                found++;
+                diagnostics.Error(ConfigCodes.Tag, "a line that begins with `%` is a directive: directives are not read",
+                    new SourceSpan(file.DisplayPath, i + 1, 1, lines[i].Length), "remove the line");
             }
         }
 
