@@ -56,7 +56,7 @@ internal sealed class PredictCommand(Screen screen, CancellationToken cancellati
         var options = new ResultOptions(ProgramVersion.Text, !parsed.GetValue(_noPictures));
         IReadOnlyList<string>? files = result is null
             ? null
-            : ResultWriter.Write(result, () => Fingerprints(plan!), folder, options, diagnostics);
+            : ResultWriter.Write(result, Fingerprints(plan!), folder, options, diagnostics);
         stages.End("write");
         screen.Say(diagnostics, parsed.GetValue(_messages));
         if (files is not null)

@@ -1,4 +1,5 @@
 using System.Security.Cryptography;
+using System.Text;
 
 namespace Boltup.Reports.Results;
 
@@ -13,4 +14,8 @@ public sealed record InputFingerprint(string File, string Sha256)
         using var stream = new FileStream(path, FileMode.Open, FileAccess.Read, FileShare.Read, bufferSize: 1);
         return new InputFingerprint(displayPath, Convert.ToHexStringLower(SHA256.HashData(stream)));
     }
+
+    /// <summary>Eight digits that stand for all inputs together, for captions.</summary>
+    public static string Abbreviate(IEnumerable<InputFingerprint> inputs) =>
+        Convert.ToHexStringLower(SHA256.HashData(Encoding.UTF8.GetBytes(string.Join('\n', inputs.Select(input => input.Sha256)))))[..8];
 }

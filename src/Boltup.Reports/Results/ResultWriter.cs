@@ -1,5 +1,6 @@
 using Boltup.Engine.Diagnostics;
 using Boltup.Engine.Prediction;
+using Boltup.Reports.Pictures;
 
 namespace Boltup.Reports.Results;
 
@@ -11,10 +12,10 @@ public static class ResultWriter
     public const string SummaryFile = "summary.json";
 
     /// <summary>Writes data files, and pictures side by side with them, and replaces earlier results as a whole.</summary>
-    /// <param name="inputs">Computes the fingerprints of the inputs; runs side by side with the rest.</param>
+    /// <param name="fingerprints">Fingerprints of all inputs.</param>
     /// <returns>Names of the files in the folder, or null after an error in <paramref name="diagnostics"/>.</returns>
     public static IReadOnlyList<string>? Write(
-        PredictionResult result, Func<IReadOnlyList<InputFingerprint>> inputs, string folder, ResultOptions options, DiagnosticBag diagnostics)
+        PredictionResult result, IReadOnlyList<InputFingerprint> fingerprints, string folder, ResultOptions options, DiagnosticBag diagnostics)
     {
         using OutputFolder? output = OutputFolder.Prepare(folder, diagnostics);
         if (output is null)
@@ -25,11 +26,18 @@ public static class ResultWriter
         Parallel.Invoke(
             () => output.Write(ResponsesFile, stream => ResultTables.WriteResponses(stream, result)),
             () => output.Write(JointForcesFile, stream => ResultTables.WriteJointForces(stream, result)),
-            () =>
-            {
-                IReadOnlyList<InputFingerprint> fingerprints = inputs();
-                output.Write(SummaryFile, stream => SummaryJson.Write(stream, result, fingerprints, options.ProgramVersion));
-            });
+            () => output.Write(SummaryFile, stream => SummaryJson.Write(stream, result, fingerprints, options.ProgramVersion)),
+            () => WritePictures(result, fingerprints, output, options));
         return output.Commit(diagnostics);
+    }
+
+    private static void WritePictures(
+        PredictionResult result, IReadOnlyList<InputFingerprint> fingerprints, OutputFolder output, ResultOptions options)
+    {
+        if (options.Pictures)
+        {
+            var pages = new PicturePages(result, $"inputs {InputFingerprint.Abbreviate(fingerprints)} · boltup {options.ProgramVersion}");
+            Parallel.ForEach(pages.All(), picture => output.Write($"{picture.Name}.png", stream => stream.Write(PictureDrawer.DrawPng(picture))));
+        }
     }
 }

@@ -1,3 +1,4 @@
+using System.Globalization;
 using System.Text.Json;
 using Boltup.Engine.Prediction;
 using Boltup.Reports.Diagnostics;
@@ -51,15 +52,13 @@ public static class SummaryJson
         json.WriteNumber("largest_at_hz", result.Axis[worst]);
         json.WriteFinite("median", sorted[sorted.Length / 2]);
         json.WriteNumber("rotation_length_m", result.Conditioning.RotationLength);
-        json.WriteStartArray("per_line");
-        foreach (double value in perLine)
-        {
-            json.WriteNumberValue(double.IsFinite(value) ? Math.Round(value, 3) : double.MaxValue);
-        }
-
-        json.WriteEndArray();
+        json.WritePropertyName("per_line");
+        json.WriteRawValue(OneLine(perLine));
         json.WriteEndObject();
     }
+
+    /// <summary>Thousands of numbers in one line; three digits are plenty for a condition number.</summary>
+    private static string OneLine(IReadOnlyList<double> values) => $"[{string.Join(", ", values.Select(value => value.ToString("G3", CultureInfo.InvariantCulture)))}]";
 
     private static void WriteLevels(Utf8JsonWriter json, PredictionResult result)
     {
