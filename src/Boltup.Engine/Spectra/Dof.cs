@@ -6,7 +6,7 @@ namespace Boltup.Engine.Spectra;
 /// <remarks>
 /// Inside a part and its data files the direction is along the point's own axes; in an assembly it is along the axes of the assembly.
 /// </remarks>
-public readonly record struct Dof(string Point, Direction Direction) : IComparable<Dof>
+public sealed record Dof(string Point, Direction Direction) : IComparable<Dof>
 {
     private static readonly string[] DirectionNames = ["x", "y", "z", "rx", "ry", "rz", "p", "q"];
 
@@ -35,7 +35,7 @@ public readonly record struct Dof(string Point, Direction Direction) : IComparab
     }
 
     /// <summary>Reads <c>point.direction</c>; the point is everything before the last full stop.</summary>
-    public static bool TryParse([NotNullWhen(true)] string? text, out Dof dof)
+    public static bool TryParse([NotNullWhen(true)] string? text, [NotNullWhen(true)] out Dof? dof)
     {
         int stop = text?.LastIndexOf('.') ?? -1;
         if (stop > 0 && TryParseDirection(text.AsSpan(stop + 1), out Direction direction))
@@ -44,17 +44,22 @@ public readonly record struct Dof(string Point, Direction Direction) : IComparab
             return true;
         }
 
-        dof = default;
+        dof = null;
         return false;
     }
 
     /// <summary>Reads <c>point.direction</c>; for literals in code and tests.</summary>
     /// <exception cref="FormatException">The text is no dof.</exception>
     public static Dof Parse(string text) =>
-        TryParse(text, out Dof dof) ? dof : throw new FormatException($"`{text}` is no dof of the form point.direction");
+        TryParse(text, out Dof? dof) ? dof : throw new FormatException($"`{text}` is no dof of the form point.direction");
 
-    public int CompareTo(Dof other)
+    public int CompareTo(Dof? other)
     {
+        if (other is null)
+        {
+            return 1;
+        }
+
         int byPoint = string.CompareOrdinal(Point, other.Point);
         return byPoint != 0 ? byPoint : Direction.CompareTo(other.Direction);
     }

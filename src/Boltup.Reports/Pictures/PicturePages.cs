@@ -105,7 +105,7 @@ public sealed class PicturePages(PredictionResult result, string provenance)
         return new Panel(
             $"{first.Name} · {levels} dB",
             FrequencyAxisOf(result.Axis, "Frequency in Hz"),
-            LevelAxis(series.Select(line => line.Y), reference, 4),
+            LevelAxis(series.Select(line => line.Y), reference, 6),
             series,
             place)
         { HasLegend = several && index == 0 };
