@@ -96,13 +96,8 @@ internal sealed class CsvTable(CsvHeader header, string displayPath, DiagnosticB
 
     private Dof DofOf(string name)
     {
-        if (header.Kind != FunctionKind.MountStiffness)
-        {
-            return Dof.Parse(name);
-        }
-
-        Dof.TryParseDirection(name, out Direction direction);
-        return new Dof("", direction);
+        bool isDirection = header.Kind == FunctionKind.MountStiffness & Dof.TryParseDirection(name, out Direction direction);
+        return isDirection ? new Dof("", direction) : Dof.Parse(name);
     }
 
     private CsvCurve? CurveOf(ReadOnlySpan<byte> row, ReadOnlySpan<Range> fields, int line)

@@ -8,8 +8,10 @@ namespace Boltup.Files.UniversalFile;
 internal static class AsciiData
 {
     /// <summary>Reads as many numbers as there is room for.</summary>
+    /// <param name="forms">Gathers the forms of numbers that were met.</param>
     /// <param name="numbers">Abscissa (where there is one) and parts of each point in turn.</param>
-    public static bool Read(LineReader lines, DataLayout layout, Span<double> numbers, string displayPath, DiagnosticBag diagnostics)
+    public static bool Read(
+        LineReader lines, DataLayout layout, Span<double> numbers, string displayPath, DiagnosticBag diagnostics, ref NumberForms forms)
     {
         int[] widths = layout.RowWidths;
         lines.MoveTo(layout.Offset);
@@ -21,7 +23,7 @@ internal static class AsciiData
             for (int field = 0; field < widths.Length && filled < numbers.Length; field++)
             {
                 int end = Math.Min(start + widths[field], line.Length);
-                if (start >= end || !NumberParser.TryParse(line[start..end], out numbers[filled]))
+                if (start >= end || !TryField(line[start..end], out numbers[filled], field > 0, ref forms))
                 {
                     Refuse(line, Math.Min(start, line.Length), end, layout.FirstLine + row, displayPath, diagnostics);
                     return false;
@@ -33,6 +35,13 @@ internal static class AsciiData
         }
 
         return true;
+    }
+
+    private static bool TryField(ReadOnlySpan<byte> field, out double value, bool hasNeighbour, ref NumberForms forms)
+    {
+        bool fine = NumberParser.TryParse(field[^1] == ' ' ? field.TrimEnd((byte)' ') : field, out value, ref forms);
+        forms |= hasNeighbour && field[0] != ' ' ? NumberForms.Touching : NumberForms.Plain;
+        return fine;
     }
 
     /// <summary>Number of fields that a row really holds.</summary>

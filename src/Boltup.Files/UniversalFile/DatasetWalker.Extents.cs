@@ -187,6 +187,11 @@ internal sealed partial class DatasetWalker
             }
 
             int fields = AsciiData.FieldsIn(line, widths);
+            if (!_lines.LineIsEnded && line.Length < widths.Take(fields).Sum())
+            {
+                fields--; // the file ends within a number
+            }
+
             padded |= fields < widths.Length && line.Length > widths.Take(fields).Sum();
             found += fields;
         }
