@@ -8,7 +8,7 @@ internal sealed class LineReader(ByteSource source)
     /// <summary>No line of any format is longer; what is longer is cut into pieces, so that binary bytes cannot fill the memory.</summary>
     private const int LongestLine = 1 << 16;
 
-    private readonly byte[] _buffer = new byte[InitialBuffer + LongestLine];
+    private readonly byte[] _buffer = new byte[Math.Min(InitialBuffer + LongestLine, source.Length + 1)];
     private long _bufferStart;
     private int _filled;
     private int _next;

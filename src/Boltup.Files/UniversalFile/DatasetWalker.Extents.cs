@@ -159,7 +159,7 @@ internal sealed partial class DatasetWalker
         long lastRow = layout.Offset + (rows - 1) * (rowWidth + lineEnd);
         if (isRegular && lastRow + lastWidth <= _source.Length)
         {
-            _lines.MoveTo(lastRow, (int)(rows - 1));
+            _lines.MoveTo(lastRow, (int)(rows - 2)); // one row has been read
             if (_lines.TryRead(out ReadOnlySpan<byte> last) && last.Length == lastWidth
                 && _lines.TryRead(out ReadOnlySpan<byte> delimiter) && IsDelimiter(delimiter))
             {
