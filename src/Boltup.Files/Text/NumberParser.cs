@@ -12,7 +12,7 @@ internal static class NumberParser
     /// <summary>More digits than this may overflow 64 bits before the limit of the mantissa is looked at.</summary>
     private const int MostDigits = 19;
 
-    private static ReadOnlySpan<double> PowersOfTen =>
+    private static readonly double[] PowersOfTen =
     [
         1e0, 1e1, 1e2, 1e3, 1e4, 1e5, 1e6, 1e7, 1e8, 1e9, 1e10, 1e11, 1e12, 1e13, 1e14, 1e15, 1e16, 1e17, 1e18, 1e19, 1e20, 1e21, 1e22,
     ];
