@@ -1,6 +1,48 @@
+using System.CommandLine;
+using Boltup.Cli.Commands;
+using Boltup.Cli.Terminal;
+using Boltup.Config;
+
 namespace Boltup.Cli;
 
 internal static class Program
 {
-    private static int Main() => 0;
+    private static int Main(string[] args)
+    {
+        // The YAML reader takes longest to get ready; it does so while the command line is read.
+        _ = Task.Run(WarmUp.Run);
+        using var cancellation = new CancellationTokenSource();
+        Console.CancelKeyPress += (_, pressed) =>
+        {
+            pressed.Cancel = true;
+            cancellation.Cancel();
+        };
+        return Run(args, new Screen(Console.Out, Console.Error), cancellation.Token);
+    }
+
+    /// <summary>Runs a command line; what it prints goes to the screen.</summary>
+    internal static int Run(string[] args, Screen screen, CancellationToken cancellation)
+    {
+        try
+        {
+            RootCommand root = CommandTree.Build(screen, cancellation);
+            return root.Parse(args).Invoke(new InvocationConfiguration
+            {
+                EnableDefaultExceptionHandler = false,
+                Output = screen.Out,
+                Error = screen.Error,
+            });
+        }
+        catch (OperationCanceledException)
+        {
+            screen.Error.WriteLine("cancelled; earlier results are as they were");
+            return ExitCode.Cancelled;
+        }
+        catch (Exception exception)
+        {
+            string log = CrashLog.Write(exception);
+            screen.Error.WriteLine($"boltup has a defect: {exception.GetType().Name}: {exception.Message}; details are in {log}");
+            return ExitCode.Defect;
+        }
+    }
 }

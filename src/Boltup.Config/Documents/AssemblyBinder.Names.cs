@@ -13,26 +13,26 @@ internal sealed partial class AssemblyBinder
     {
         var map = (YamlMap)entry.Value;
         IReadOnlyList<YamlNode> between = map["between"].Items();
-        JointEnd? first = BindEnd(between[0]);
-        JointEnd? second = BindEnd(between[1]);
+        JointEndDocument? first = BindEnd(between[0]);
+        JointEndDocument? second = BindEnd(between[1]);
         return first is null || second is null
             ? null
             : new JointDocument(entry.MarkedKey(), first, second, [.. map["rigid"].Items().Select(item => item.Direction())],
                 map["through"]?.MarkedText());
     }
 
-    private JointEnd? BindEnd(YamlNode node)
+    private JointEndDocument? BindEnd(YamlNode node)
     {
         string text = node.Text();
         if (text == GroundPoint.Name)
         {
-            return new JointEnd(null, null, node.Span);
+            return new JointEndDocument(null, null, node.Span);
         }
 
         string[] pieces = text.Split('.');
         if (pieces.Length == 2 && pieces.All(piece => piece.Length > 0))
         {
-            return new JointEnd(pieces[0], pieces[1], node.Span);
+            return new JointEndDocument(pieces[0], pieces[1], node.Span);
         }
 
         diagnostics.Error(ConfigCodes.BadDottedName, $"{node.Describe()} is no point of the form `part.point`", node.Span,

@@ -59,7 +59,7 @@ internal sealed class AssemblyReferences(AssemblyDocument assembly, DiagnosticBa
         }
     }
 
-    private bool CheckEnd(JointEnd end) => end.IsGround || CheckPoint(end.Part!, end.Point!, end.Span);
+    private bool CheckEnd(JointEndDocument end) => end.IsGround || CheckPoint(end.Part!, end.Point!, end.Span);
 
     private void CheckPair(JointDocument joint, Dictionary<(string, string), JointDocument> seen)
     {

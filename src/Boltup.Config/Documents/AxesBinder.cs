@@ -14,7 +14,7 @@ internal static class AxesBinder
     private static readonly string[] Names = ["x", "y", "z"];
 
     /// <summary>The axes, or null with a diagnostic when they are none.</summary>
-    public static Marked<PointAxes>? Bind(YamlMap map, DiagnosticBag diagnostics)
+    public static Marked<Rotation>? Bind(YamlMap map, DiagnosticBag diagnostics)
     {
         var given = new Marked<Vector3d>?[3];
         for (int i = 0; i < given.Length; i++)
@@ -78,7 +78,7 @@ internal static class AxesBinder
         return isFine;
     }
 
-    private static Marked<PointAxes>? Complete(Marked<Vector3d>?[] given, YamlMap map, DiagnosticBag diagnostics)
+    private static Marked<Rotation>? Complete(Marked<Vector3d>?[] given, YamlMap map, DiagnosticBag diagnostics)
     {
         Vector3d x = given[0]?.Value ?? given[1]!.Value.Cross(given[2]!.Value);
         Vector3d y = given[1]?.Value ?? given[2]!.Value.Cross(x);
@@ -89,6 +89,6 @@ internal static class AxesBinder
             return null;
         }
 
-        return new(new PointAxes(x, y, z), map.Span);
+        return new(new Rotation(x, y, z), map.Span);
     }
 }

@@ -7,4 +7,4 @@ namespace Boltup.Config.Documents;
 /// <param name="Node">The number used in a Universal File.</param>
 /// <param name="At">Position in metres in the axes of the part.</param>
 /// <param name="Axes">The point's own axes; null when they are those of the part.</param>
-public sealed record PointDocument(Marked<string> Name, Marked<int>? Node, Marked<Vector3d>? At, Marked<PointAxes>? Axes);
+public sealed record PointDocument(Marked<string> Name, Marked<int>? Node, Marked<Vector3d>? At, Marked<Rotation>? Axes);

@@ -7,49 +7,47 @@ using Boltup.Engine.Spectra;
 namespace Boltup.Engine.Prediction;
 
 /// <summary>Couples an assembly, applies its operations and collects the responses and joint forces.</summary>
-public static class Predictor
+public sealed class Predictor
 {
+    private readonly AssemblyModel _assembly;
+    private readonly CouplingLayout _layout;
+    private readonly int[] _responseRows;
+    private readonly ForceCases _cases;
+
+    private Predictor(AssemblyModel assembly)
+    {
+        _assembly = assembly;
+        _layout = new CouplingLayout(assembly.Parts, assembly.Joints);
+        _responseRows = [.. assembly.Responses.Select(response => _layout[response.Part].AddResponse(response.Dof))];
+        _cases = new ForceCases(assembly, _layout);
+    }
+
     /// <summary>Computes everything that the assembly asks for.</summary>
     /// <returns>The result, or null after an error in <paramref name="diagnostics"/>.</returns>
     public static PredictionResult? Predict(
         AssemblyModel assembly, DiagnosticBag diagnostics, CancellationToken cancellation = default)
     {
-        var layout = new CouplingLayout(assembly.Parts, assembly.Joints);
-        int[] responseRows = [.. assembly.Responses.Select(response => layout[response.Part].AddResponse(response.Dof))];
-        var cases = new ForceCases(assembly, layout);
-        if (!AssemblyRules.Check(assembly, layout, diagnostics) || EvaluateParts(assembly, layout, diagnostics) is not { } frfs)
-        {
-            return null;
-        }
-
-        CouplingSolution solution = new CouplingSolver(layout, assembly.Axis, frfs).Solve(cases.Forces, cases.Count, cancellation);
-        var condition = new ConditionCheck(layout, assembly.Axis, frfs);
-        if (!condition.Check(solution.Condition, diagnostics))
-        {
-            return null;
-        }
-
-        IReadOnlyList<OperationResult> operations =
-            [.. assembly.Operations.Select((operation, i) => new OperationReader(assembly, layout, solution, responseRows).Read(operation, cases[i]))];
-        return new PredictionResult(
-            assembly.Title,
-            assembly.Axis,
-            operations,
-            new Conditioning(assembly.Joints.Count == 0 ? [] : solution.Condition, layout.RotationLength),
-            KernelChoice.Name,
-            [.. diagnostics.Items]);
+        var predictor = new Predictor(assembly);
+        return predictor.ReadParts(diagnostics) is { } frfs ? predictor.Solve(frfs, diagnostics, cancellation) : null;
     }
 
-    private static TiledMatrix?[]? EvaluateParts(AssemblyModel assembly, CouplingLayout layout, DiagnosticBag diagnostics)
+    /// <summary>Judges an assembly and the FRFs that it needs without coupling them.</summary>
+    public static void Check(AssemblyModel assembly, DiagnosticBag diagnostics) => new Predictor(assembly).ReadParts(diagnostics);
+
+    private TiledMatrix?[]? ReadParts(DiagnosticBag diagnostics)
     {
-        var frfs = new TiledMatrix?[layout.Parts.Count];
-        DiagnosticBag[] bags = [.. layout.Parts.Select(_ => new DiagnosticBag())];
-        Parallel.For(0, layout.Parts.Count, i =>
+        if (!AssemblyRules.Check(_assembly, _layout, diagnostics))
         {
-            PartLayout part = layout.Parts[i];
-            if (part.IsUsed)
+            return null;
+        }
+
+        var frfs = new TiledMatrix?[_layout.Parts.Count];
+        DiagnosticBag[] bags = [.. _layout.Parts.Select(_ => new DiagnosticBag())];
+        Parallel.For(0, frfs.Length, i =>
+        {
+            if (_layout.Parts[i].IsUsed)
             {
-                frfs[i] = EvaluatePart(part, assembly.Axis, bags[i]);
+                frfs[i] = ReadPart(_layout.Parts[i], _assembly.Axis, bags[i]);
             }
         });
         foreach (DiagnosticBag bag in bags)
@@ -57,10 +55,10 @@ public static class Predictor
             diagnostics.AddRange(bag.Items);
         }
 
-        return diagnostics.HasErrors ? null : frfs;
+        return Array.Exists(bags, bag => bag.HasErrors) ? null : frfs;
     }
 
-    private static TiledMatrix? EvaluatePart(PartLayout part, FrequencyAxis axis, DiagnosticBag diagnostics)
+    private static TiledMatrix? ReadPart(PartLayout part, FrequencyAxis axis, DiagnosticBag diagnostics)
     {
         TiledMatrix? frf = part.Part.Evaluate(axis, part.Rows, part.Columns, diagnostics);
         if (frf is not null)
@@ -69,5 +67,23 @@ public static class Predictor
         }
 
         return frf;
+    }
+
+    private PredictionResult? Solve(TiledMatrix?[] frfs, DiagnosticBag diagnostics, CancellationToken cancellation)
+    {
+        CouplingSolution solution = new CouplingSolver(_layout, _assembly.Axis, frfs).Solve(_cases.Forces, _cases.Count, cancellation);
+        if (!new ConditionCheck(_layout, _assembly.Axis, frfs).Check(solution.Condition, diagnostics))
+        {
+            return null;
+        }
+
+        var reader = new OperationReader(_assembly, _layout, solution, _responseRows);
+        return new PredictionResult(
+            _assembly.Title,
+            _assembly.Axis,
+            [.. _assembly.Operations.Select((operation, i) => reader.Read(operation, _cases[i]))],
+            new Conditioning(_layout.Constraints.Count == 0 ? [] : solution.Condition, _layout.RotationLength),
+            KernelChoice.Name,
+            [.. diagnostics.Items]);
     }
 }

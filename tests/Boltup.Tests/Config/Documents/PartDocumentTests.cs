@@ -16,7 +16,7 @@ public class PartDocumentTests
 
         Assert.Equal(new Vector3d(0.092, 0.061, 0), part.Points[0].At!.Value);
         Assert.Equal((101, new SourceSpan("parts/compressor.part.yaml", 4, 15, 3)), (part.Points[0].Node!.Value, part.Points[0].Node!.Span));
-        Assert.Equal(new PointAxes(new(0, 1, 0), new(-1, 0, 0), new(0, 0, 1)), part.Points[1].Axes!.Value);
+        Assert.Equal(new Rotation(new(0, 1, 0), new(-1, 0, 0), new(0, 0, 1)), part.Points[1].Axes!.Value);
         var model = Assert.IsType<FrfModelDocument>(part.Model);
         Assert.Null(model.Files[0].MotionQuantity);
         Assert.Equal(FrfQuantity.Accelerance, model.Files[1].MotionQuantity!.Value);
@@ -57,8 +57,8 @@ public class PartDocumentTests
     {
         using ConfigFolder folder = new ConfigFolder().With("a.part.yaml",
             $"boltup: part/1\nlumped: {{ direction: x, masses: {{ s: 1 kg }} }}\npoints: {{ s: {{ axes: {{ {axes} }} }} }}\n");
-        PointAxes found = folder.LoadPart().Document!.Points[0].Axes!.Value;
-        Assert.Equal(new PointAxes(new(0, 1, 0), new(-1, 0, 0), new(0, 0, 1)), found);
+        Rotation found = folder.LoadPart().Document!.Points[0].Axes!.Value;
+        Assert.Equal(new Rotation(new(0, 1, 0), new(-1, 0, 0), new(0, 0, 1)), found);
     }
 
     [Fact]

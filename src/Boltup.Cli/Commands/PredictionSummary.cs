@@ -1,0 +1,73 @@
+using System.Globalization;
+using Boltup.Cli.Terminal;
+using Boltup.Engine.Prediction;
+using Boltup.Reports.Results;
+using Spectre.Console;
+
+namespace Boltup.Cli.Commands;
+
+/// <summary>What a prediction prints: levels of every response, how well the interface could be solved, what was written.</summary>
+internal static class PredictionSummary
+{
+    private const int Width = 80;
+
+    public static void Print(Screen screen, PredictionResult result, string folder, IReadOnlyList<string> files)
+    {
+        screen.Out.WriteLine(screen.Ink.Strong(result.Title));
+        screen.Out.WriteLine(DescribeRun(result));
+        screen.Out.WriteLine();
+        if (result.Operations.Any(operation => operation.Responses.Count > 0))
+        {
+            PrintLevels(screen, result);
+        }
+
+        screen.Out.WriteLine(Cautions.Text);
+        screen.Out.WriteLine($"wrote {files.Count} files to {folder}: {string.Join(", ", files.Where(IsMain))}");
+        screen.Out.WriteLine($"next: look at {Path.Combine(folder, files.FirstOrDefault(file => file == "overview.png") ?? ResultWriter.SummaryFile)}; change a mount and predict into another folder");
+    }
+
+    private static bool IsMain(string file) => file is ResultWriter.ResponsesFile or ResultWriter.JointForcesFile or ResultWriter.SummaryFile;
+
+    private static string DescribeRun(PredictionResult result)
+    {
+        string condition = result.Conditioning.PerLine.Count == 0
+            ? "nothing is joined"
+            : string.Create(CultureInfo.InvariantCulture, $"interface condition up to {result.Conditioning.Worst:0.#E+0}");
+        return $"{result.Axis}; {condition}; kernels {result.Kernels}";
+    }
+
+    private static void PrintLevels(Screen screen, PredictionResult result)
+    {
+        var table = new Table { Border = TableBorder.Simple };
+        table.AddColumn("operation").AddColumn("response");
+        table.AddColumn(new TableColumn("overall").RightAligned()).AddColumn("dB re");
+        table.AddColumn(new TableColumn("strongest line").RightAligned());
+        foreach (OperationResult operation in result.Operations)
+        {
+            foreach (ResponseSpectrum response in operation.Responses)
+            {
+                OverallLevel level = OverallLevel.Of(response, operation.Axis, operation.Amplitude);
+                table.AddRow(
+                    Markup.Escape(operation.Name),
+                    Markup.Escape(response.Name),
+                    string.Create(CultureInfo.InvariantCulture, $"{level.Decibels:F1}"),
+                    level.Reference.Text,
+                    string.Create(CultureInfo.InvariantCulture, $"{level.PeakDecibels:F1} at {level.PeakHz:G5} Hz"));
+            }
+        }
+
+        Render(screen, table);
+    }
+
+    private static void Render(Screen screen, Table table)
+    {
+        IAnsiConsole console = AnsiConsole.Create(new AnsiConsoleSettings
+        {
+            Ansi = AnsiSupport.No,
+            ColorSystem = ColorSystemSupport.NoColors,
+            Out = new AnsiConsoleOutput(screen.Out),
+        });
+        console.Profile.Width = Width;
+        console.Write(table);
+    }
+}

@@ -1,0 +1,87 @@
+using System.Numerics;
+using Boltup.Config.Binding;
+using Boltup.Config.Documents;
+using Boltup.Engine.Diagnostics;
+using Boltup.Engine.Mounts;
+using Boltup.Engine.Spectra;
+using Boltup.Files;
+
+namespace Boltup.Config.Planning;
+
+/// <summary>Turns the mounts of an assembly into engine laws, each once.</summary>
+internal sealed class MountPlanner(AssemblyDocument assembly, DataLibrary library, DiagnosticBag diagnostics)
+{
+    private static readonly Direction[] SixDirections =
+        [Direction.X, Direction.Y, Direction.Z, Direction.RX, Direction.RY, Direction.RZ];
+
+    private readonly Dictionary<string, MountLaw?> _laws = [];
+
+    /// <summary>The law of a mount, or null after an error.</summary>
+    public MountLaw? Plan(string name)
+    {
+        if (!_laws.TryGetValue(name, out MountLaw? law))
+        {
+            ScaledLaw scaled = assembly.LawOf(name);
+            law = PlanLaw(scaled.Law);
+            law = law is null || scaled.Scale == 1 ? law : new ScaledMount(law, scaled.Scale);
+            _laws.Add(name, law);
+        }
+
+        return law;
+    }
+
+    private MountLaw? PlanLaw(MountLawDocument document) => document switch
+    {
+        DirectionalLawDocument law => new DiagonalMount(SixDirections.Select(direction => new SpringDamper(
+            direction,
+            law.Stiffness.GetValueOrDefault(direction)?.Value ?? 0,
+            law.LossFactor,
+            law.Damping.GetValueOrDefault(direction)?.Value ?? 0))),
+        MatrixLawDocument law => PlanMatrix(law),
+        TableLawDocument law => PlanTable(law),
+        _ => throw new InvalidOperationException($"no planner for {document.GetType().Name}"),
+    };
+
+    private static MatrixMount PlanMatrix(MatrixLawDocument law)
+    {
+        Direction[] directions = SixDirections[..law.Stiffness.Value.GetLength(0)];
+        return new MatrixMount(
+            directions,
+            law.Stiffness.Value,
+            law.LossFactor,
+            [.. directions.Select(direction => law.Damping.GetValueOrDefault(direction)?.Value ?? 0)]);
+    }
+
+    private TabledMount? PlanTable(TableLawDocument law)
+    {
+        if (library.Open(law.File) is not { } file)
+        {
+            return null;
+        }
+
+        Curve[] curves = [.. file.Curves.Where(curve => curve.Kind == FunctionKind.MountStiffness)];
+        if (curves.Length == 0)
+        {
+            diagnostics.Error(
+                PlanCodes.NoCurves,
+                $"`{law.File.Written}` is no table of dynamic stiffness",
+                law.File.Span,
+                "a table is a CSV with the header `direction,frequency_hz,real,imag`");
+            return null;
+        }
+
+        var tables = new List<StiffnessTable>();
+        foreach (Curve curve in curves)
+        {
+            var values = new Complex[curve.Axis.Count];
+            if (!file.ReadSpectrum(curve, values, diagnostics))
+            {
+                return null;
+            }
+
+            tables.Add(new StiffnessTable(curve.Response!.Value.Direction, curve.Axis, values));
+        }
+
+        return new TabledMount(tables);
+    }
+}

@@ -1,0 +1,187 @@
+using ScottPlot;
+using ScottPlot.TickGenerators;
+using SkiaSharp;
+
+namespace Boltup.Reports.Pictures;
+
+/// <summary>Turns pictures into PNG. Equal pictures give equal bytes; may be used by several threads at a time.</summary>
+public static class PictureDrawer
+{
+    private const float Edge = 28;
+    private const float HeaderHeight = 78;
+    private const float FooterHeight = 34;
+
+    private static readonly SKColor PaperColour = ToSkia(PictureStyle.Paper);
+
+    public static byte[] DrawPng(Picture picture)
+    {
+        _ = PictureFonts.Regular;
+        using var bitmap = new SKBitmap(picture.Width, picture.Height, SKColorType.Rgba8888, SKAlphaType.Opaque);
+        using var canvas = new SKCanvas(bitmap);
+        canvas.Clear(PaperColour);
+        DrawWords(canvas, picture);
+        foreach (Panel panel in picture.Panels)
+        {
+            DrawPanel(canvas, panel, AreaOf(panel, picture));
+        }
+
+        using SKData png = bitmap.Encode(SKEncodedImageFormat.Png, 100);
+        return png.ToArray();
+    }
+
+    private static void DrawWords(SKCanvas canvas, Picture picture)
+    {
+        DrawText(canvas, picture.Title, Edge, 40, PictureFonts.Strong, PictureStyle.TitleSize, PictureStyle.Text, picture.Width - 2 * Edge);
+        DrawText(canvas, picture.Subtitle, Edge, 66, PictureFonts.Regular, PictureStyle.SubtitleSize, PictureStyle.Quiet, picture.Width - 2 * Edge);
+        DrawText(
+            canvas, picture.Caption, Edge, picture.Height - 13, PictureFonts.Regular, PictureStyle.CaptionSize, PictureStyle.Quiet, picture.Width - 2 * Edge);
+    }
+
+    private static void DrawText(
+        SKCanvas canvas, string text, float x, float y, SKTypeface typeface, float size, Rgb colour, float width)
+    {
+        using var font = new SKFont(typeface, size) { Subpixel = true, Edging = SKFontEdging.Antialias };
+        using var paint = new SKPaint { Color = ToSkia(colour), IsAntialias = true };
+        canvas.DrawText(Fit(text, font, width), x, y, font, paint);
+    }
+
+    /// <summary>Cuts a text that is too long, and shows that it was cut.</summary>
+    private static string Fit(string text, SKFont font, float width)
+    {
+        if (font.MeasureText(text) <= width)
+        {
+            return text;
+        }
+
+        int length = text.Length;
+        while (length > 1 && font.MeasureText(text[..length] + "…") > width)
+        {
+            length--;
+        }
+
+        return text[..length] + "…";
+    }
+
+    private static PixelRect AreaOf(Panel panel, Picture picture)
+    {
+        float width = picture.Width - Edge;
+        float height = picture.Height - HeaderHeight - FooterHeight;
+        float left = (float)(Edge / 2 + panel.Place.Left * width);
+        float top = (float)(HeaderHeight + panel.Place.Top * height);
+        return new PixelRect(left, left + (float)(panel.Place.Width * width), top + (float)(panel.Place.Height * height), top);
+    }
+
+    private static void DrawPanel(SKCanvas canvas, Panel panel, PixelRect area)
+    {
+        using var plot = new Plot();
+        StyleFrame(plot, panel);
+        foreach (Series series in panel.Series)
+        {
+            AddLine(plot, series, panel.X.IsLogarithmic);
+        }
+
+        SetAxis(plot.Axes.Bottom, panel.X);
+        SetAxis(plot.Axes.Left, panel.Y);
+        plot.Axes.SetLimits(Along(panel.X, panel.X.From), Along(panel.X, panel.X.To), panel.Y.From, panel.Y.To);
+        plot.Layout.Fixed(new PixelPadding(76, 22, panel.X.Label.Length > 0 ? 52 : 30, panel.Title.Length > 0 ? 34 : 10));
+        if (panel.Marker is { } marker)
+        {
+            AddMarker(plot, marker, panel);
+        }
+
+        AddLegend(plot, panel);
+
+        // The library clears whatever canvas it is given, so each panel gets its own.
+        using var own = new SKBitmap((int)area.Width, (int)area.Height, SKColorType.Rgba8888, SKAlphaType.Opaque);
+        using var ownCanvas = new SKCanvas(own);
+        plot.Render(ownCanvas, own.Width, own.Height);
+        canvas.DrawBitmap(own, MathF.Round(area.Left), MathF.Round(area.Top));
+    }
+
+    private static void StyleFrame(Plot plot, Panel panel)
+    {
+        plot.FigureBackground.Color = ToColour(PictureStyle.Paper);
+        plot.DataBackground.Color = ToColour(PictureStyle.Paper);
+        plot.Axes.Title.Label.Text = panel.Title;
+        plot.Axes.Title.Label.FontName = PictureFonts.Family;
+        plot.Axes.Title.Label.FontSize = PictureStyle.LabelSize;
+        plot.Axes.Title.Label.Bold = true;
+        plot.Axes.Title.Label.ForeColor = ToColour(PictureStyle.Text);
+        plot.Axes.Title.IsVisible = panel.Title.Length > 0;
+        plot.Axes.Right.FrameLineStyle.Width = 0;
+        plot.Axes.Top.FrameLineStyle.Width = 0;
+        plot.Grid.MajorLineColor = ToColour(PictureStyle.Grid);
+        plot.Grid.MinorLineColor = ToColour(PictureStyle.FineGrid);
+        plot.Grid.MinorLineWidth = 1;
+    }
+
+    private static void SetAxis(IAxis axis, PictureAxis wanted)
+    {
+        var ticks = new NumericManual([.. wanted.Ticks.Select(tick => new Tick(Along(wanted, tick.At), tick.Label, tick.IsMajor))]);
+        axis.TickGenerator = ticks;
+        axis.TickLabelStyle.FontName = PictureFonts.Family;
+        axis.TickLabelStyle.FontSize = PictureStyle.TickSize;
+        axis.TickLabelStyle.ForeColor = ToColour(PictureStyle.Text);
+        axis.MajorTickStyle.Color = ToColour(PictureStyle.Quiet);
+        axis.MinorTickStyle.Color = ToColour(PictureStyle.Quiet);
+        axis.FrameLineStyle.Color = ToColour(PictureStyle.Quiet);
+        axis.FrameLineStyle.Width = 1;
+        if (axis is ScottPlot.AxisPanels.AxisBase labelled)
+        {
+            labelled.LabelText = wanted.Label;
+            labelled.LabelFontName = PictureFonts.Family;
+            labelled.LabelFontSize = PictureStyle.LabelSize;
+            labelled.LabelBold = false;
+            labelled.LabelFontColor = ToColour(PictureStyle.Text);
+        }
+    }
+
+    private static void AddLine(Plot plot, Series series, bool isLogarithmic)
+    {
+        int[] shown = [.. Enumerable.Range(0, series.X.Count).Where(i => !isLogarithmic || series.X[i] > 0)];
+        double[] x = [.. shown.Select(i => isLogarithmic ? Math.Log10(series.X[i]) : series.X[i])];
+        double[] y = [.. shown.Select(i => series.Y[i])];
+        ScottPlot.Plottables.Scatter line = plot.Add.ScatterLine(x, y, ToColour(series.Colour));
+        line.LineWidth = series.Thin ? PictureStyle.ComparisonWeight : PictureStyle.PredictionWeight;
+        line.LegendText = series.Name;
+    }
+
+    private static void AddMarker(Plot plot, Marker marker, Panel panel)
+    {
+        double x = Along(panel.X, marker.X);
+        bool isRight = x > (Along(panel.X, panel.X.From) + Along(panel.X, panel.X.To)) / 2;
+        ScottPlot.Plottables.Marker point = plot.Add.Marker(x, marker.Y, MarkerShape.OpenCircle, 10, ToColour(PictureStyle.Text));
+        point.MarkerLineWidth = 1.5f;
+        ScottPlot.Plottables.Text text = plot.Add.Text(marker.Text, x, marker.Y);
+        text.LabelFontName = PictureFonts.Family;
+        text.LabelFontSize = PictureStyle.TickSize;
+        text.LabelFontColor = ToColour(PictureStyle.Text);
+        text.LabelAlignment = isRight ? Alignment.LowerRight : Alignment.LowerLeft;
+        text.OffsetX = isRight ? -10 : 10;
+        text.OffsetY = -4;
+        text.LabelBackgroundColor = ToColour(PictureStyle.Paper).WithAlpha(0.85);
+    }
+
+    private static void AddLegend(Plot plot, Panel panel)
+    {
+        if (!panel.HasLegend)
+        {
+            plot.Legend.IsVisible = false;
+            return;
+        }
+
+        plot.ShowLegend(Alignment.UpperRight, Orientation.Vertical);
+        plot.Legend.FontName = PictureFonts.Family;
+        plot.Legend.FontSize = PictureStyle.TickSize;
+        plot.Legend.FontColor = ToColour(PictureStyle.Text);
+        plot.Legend.OutlineWidth = 0;
+        plot.Legend.ShadowColor = Colors.Transparent;
+        plot.Legend.BackgroundColor = ToColour(PictureStyle.Paper).WithAlpha(0.9);
+    }
+
+    private static double Along(PictureAxis axis, double value) => axis.IsLogarithmic ? Math.Log10(value) : value;
+
+    private static SKColor ToSkia(Rgb colour) => new(colour.Red, colour.Green, colour.Blue);
+
+    private static Color ToColour(Rgb colour) => new(colour.Red, colour.Green, colour.Blue);
+}

@@ -1,0 +1,154 @@
+using System.Globalization;
+using System.Numerics;
+using Boltup.Engine.Prediction;
+using Boltup.Engine.Spectra;
+using Boltup.Reports.Results;
+
+namespace Boltup.Reports.Pictures;
+
+/// <summary>The pictures of a prediction.</summary>
+/// <param name="provenance">Closes every caption: program version and fingerprint of the inputs.</param>
+public sealed class PicturePages(PredictionResult result, string provenance)
+{
+    /// <summary>The overview sheet, then a page per response and one for the joints of each operation.</summary>
+    public IReadOnlyList<Picture> All()
+    {
+        var pictures = new List<Picture>();
+        if (result.Operations.Any(operation => operation.Responses.Count > 0))
+        {
+            pictures.Add(Overview());
+        }
+
+        foreach (OperationResult operation in result.Operations)
+        {
+            pictures.AddRange(operation.Responses.Select((_, i) => Response(operation, i)));
+            if (operation.JointForces.Count > 0)
+            {
+                pictures.Add(JointForces(operation));
+            }
+        }
+
+        return pictures;
+    }
+
+    /// <summary>Level and phase of one response in one operation.</summary>
+    public Picture Response(OperationResult operation, int index)
+    {
+        ResponseSpectrum response = operation.Responses[index];
+        OverallLevel overall = OverallLevel.Of(response, operation.Axis, operation.Amplitude);
+        Rgb colour = PictureStyle.LineAt(index);
+        double[] hz = operation.Axis.Hz.ToArray();
+        double[] level = Level(response.Values, operation.Amplitude, overall.Reference);
+        double[] phase = Phase(response.Values);
+        string subtitle = string.Create(
+            CultureInfo.InvariantCulture, $"{operation.Name} · overall {overall.Decibels:F1} dB re {overall.Reference.Text} · {response.Dof}");
+        var levels = new Panel("", FrequencyAxisOf(operation.Axis, ""), LevelAxis([level], overall.Reference, 8), [new Series("", hz, level, colour)], (0, 0, 1, 0.7))
+        {
+            Marker = new Marker(
+                overall.PeakHz,
+                overall.PeakDecibels,
+                string.Create(CultureInfo.InvariantCulture, $"{overall.PeakDecibels:F1} dB at {overall.PeakHz:G5} Hz")),
+        };
+        var phases = new Panel("", FrequencyAxisOf(operation.Axis, "Frequency in Hz"), PhaseAxis, [new Series("", hz, phase, colour, Thin: true)], (0, 0.7, 1, 0.3));
+        return Page($"{FileNames.FromName(operation.Name)}-{FileNames.FromName(response.Name)}", response.Name, subtitle, [levels, phases]);
+    }
+
+    /// <summary>Every response, its operations in one diagram; made for one slide.</summary>
+    public Picture Overview()
+    {
+        int count = result.Operations.Max(operation => operation.Responses.Count);
+        int columns = count <= 1 ? 1 : count <= 4 ? 2 : count <= 9 ? 3 : 4;
+        int rows = (count + columns - 1) / columns;
+        Panel[] panels = [.. Enumerable.Range(0, count).Select(i => OverviewPanel(
+            i, ((double)(i % columns) / columns, (double)(i / columns) / rows, 1.0 / columns, 1.0 / rows)))];
+        string operations = string.Join(", ", result.Operations.Select(operation => operation.Name));
+        return new Picture(
+            "overview", result.Title, $"Responses in {operations}", provenance, PictureStyle.SheetWidth, PictureStyle.SheetHeight, panels);
+    }
+
+    /// <summary>What each joint carries: the root of the summed powers of its forces.</summary>
+    public Picture JointForces(OperationResult operation)
+    {
+        double[] hz = operation.Axis.Hz.ToArray();
+        Series[] series = [.. operation.JointForces
+            .Where(force => force.Direction <= Direction.Z)
+            .GroupBy(force => force.Joint)
+            .Select((joint, i) => new Series(joint.Key, hz, JointLevel([.. joint], operation.Amplitude), PictureStyle.LineAt(i)))];
+        var panel = new Panel(
+            "", FrequencyAxisOf(operation.Axis, "Frequency in Hz"), LevelAxis(series.Select(line => line.Y), LevelReference.Force, 8), series, (0, 0, 1, 1))
+        { HasLegend = true };
+        return Page(
+            $"{FileNames.FromName(operation.Name)}-joint-forces",
+            "Forces through the joints",
+            $"{operation.Name} · root of the summed powers of the directions",
+            [panel]);
+    }
+
+    private static PictureAxis PhaseAxis => new(
+        "Phase in °", -190, 190, false, [new(-180, "−180"), new(-90, ""), new(0, "0"), new(90, ""), new(180, "180")]);
+
+    private Picture Page(string name, string title, string subtitle, IReadOnlyList<Panel> panels) =>
+        new(name, title, subtitle, $"{result.Title} · {provenance}", PictureStyle.PageWidth, PictureStyle.PageHeight, panels);
+
+    private Panel OverviewPanel(int index, (double, double, double, double) place)
+    {
+        ResponseSpectrum first = result.Operations[0].Responses[index];
+        LevelReference reference = LevelReference.For(first.Quantity, first.Unit);
+        bool several = result.Operations.Count > 1;
+        Series[] series = [.. result.Operations.Select((operation, i) => new Series(
+            operation.Name,
+            operation.Axis.Hz.ToArray(),
+            Level(operation.Responses[index].Values, operation.Amplitude, reference),
+            PictureStyle.LineAt(several ? i : index)))];
+        string levels = string.Join(" / ", result.Operations.Select(operation => OverallLevel
+            .Of(operation.Responses[index], operation.Axis, operation.Amplitude).Decibels.ToString("F1", CultureInfo.InvariantCulture)));
+        return new Panel(
+            $"{first.Name} · {levels} dB",
+            FrequencyAxisOf(result.Axis, "Frequency in Hz"),
+            LevelAxis(series.Select(line => line.Y), reference, 4),
+            series,
+            place)
+        { HasLegend = several && index == 0 };
+    }
+
+    private static PictureAxis FrequencyAxisOf(FrequencyAxis axis, string label)
+    {
+        double from = axis.FirstHz > 0 ? axis.FirstHz : axis.Count > 1 ? axis[1] : 1;
+        double to = Math.Max(axis.LastHz, 2 * from);
+        return new PictureAxis(label, from, to, true, Ticks.OfFrequency(from, to));
+    }
+
+    private static PictureAxis LevelAxis(IEnumerable<IReadOnlyList<double>> lines, LevelReference reference, int ticks)
+    {
+        (double from, double to) = LevelLimits.Of(lines.SelectMany(line => line));
+        return new PictureAxis($"Level in dB re {reference.Text}", from, to, false, Ticks.Even(from, to, ticks));
+    }
+
+    private static double[] Level(IReadOnlyList<Complex> values, Amplitude amplitude, LevelReference reference)
+    {
+        double toRms = amplitude == Amplitude.Peak ? Math.Sqrt(0.5) : 1;
+        return [.. values.Select(value => Finite(reference.Decibels(toRms * Complex.Abs(value))))];
+    }
+
+    private static double[] Phase(IReadOnlyList<Complex> values)
+    {
+        // A jump from −180° to 180° is no line: the gap hides it.
+        double[] phase = [.. values.Select(value => value.Phase * 180 / Math.PI)];
+        double[] shown = [.. phase];
+        for (int i = 1; i < phase.Length; i++)
+        {
+            shown[i] = Math.Abs(phase[i] - phase[i - 1]) > 270 ? double.NaN : phase[i];
+        }
+
+        return shown;
+    }
+
+    private static double[] JointLevel(JointForceSpectrum[] forces, Amplitude amplitude)
+    {
+        double toRms = amplitude == Amplitude.Peak ? Math.Sqrt(0.5) : 1;
+        return [.. Enumerable.Range(0, forces[0].Values.Count).Select(line => Finite(LevelReference.Force.Decibels(
+            toRms * Math.Sqrt(forces.Sum(force => Math.Pow(Complex.Abs(force.Values[line]), 2))))))];
+    }
+
+    private static double Finite(double decibels) => double.IsFinite(decibels) ? decibels : double.NaN;
+}

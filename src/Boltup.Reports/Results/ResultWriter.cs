@@ -1,0 +1,43 @@
+using Boltup.Engine.Diagnostics;
+using Boltup.Engine.Prediction;
+using Boltup.Reports.Pictures;
+
+namespace Boltup.Reports.Results;
+
+/// <summary>Writes everything that a prediction leaves behind.</summary>
+public static class ResultWriter
+{
+    public const string ResponsesFile = "responses.csv";
+    public const string JointForcesFile = "joint_forces.csv";
+    public const string SummaryFile = "summary.json";
+
+    /// <summary>Writes data files, and pictures side by side with them, and replaces earlier results as a whole.</summary>
+    /// <param name="fingerprints">Fingerprints of all inputs.</param>
+    /// <returns>Names of the files in the folder, or null after an error in <paramref name="diagnostics"/>.</returns>
+    public static IReadOnlyList<string>? Write(
+        PredictionResult result, IReadOnlyList<InputFingerprint> fingerprints, string folder, ResultOptions options, DiagnosticBag diagnostics)
+    {
+        using OutputFolder? output = OutputFolder.Prepare(folder, diagnostics);
+        if (output is null)
+        {
+            return null;
+        }
+
+        Parallel.Invoke(
+            () => output.Write(ResponsesFile, stream => ResultTables.WriteResponses(stream, result)),
+            () => output.Write(JointForcesFile, stream => ResultTables.WriteJointForces(stream, result)),
+            () => output.Write(SummaryFile, stream => SummaryJson.Write(stream, result, fingerprints, options.ProgramVersion)),
+            () => WritePictures(result, fingerprints, output, options));
+        return output.Commit(diagnostics);
+    }
+
+    private static void WritePictures(
+        PredictionResult result, IReadOnlyList<InputFingerprint> fingerprints, OutputFolder output, ResultOptions options)
+    {
+        if (options.Pictures)
+        {
+            var pages = new PicturePages(result, $"inputs {InputFingerprint.Abbreviate(fingerprints)} · boltup {options.ProgramVersion}");
+            Parallel.ForEach(pages.All(), picture => output.Write($"{picture.Name}.png", stream => stream.Write(PictureDrawer.DrawPng(picture))));
+        }
+    }
+}
