@@ -16,6 +16,9 @@ internal sealed class LineReader(ByteSource source)
     /// <summary>Offset in the file of the line that is read next.</summary>
     public long Position => _bufferStart + _next;
 
+    /// <summary>Offset in the file of the line that was read last.</summary>
+    public long LineStart { get; private set; }
+
     /// <summary>Number, from 1, of the line that was read last; meaningless after binary data.</summary>
     public int LineNumber { get; private set; }
 
@@ -57,6 +60,7 @@ internal sealed class LineReader(ByteSource source)
             length = _buffer.AsSpan(_next, _filled - _next).IndexOfAny((byte)'\n', (byte)'\r');
         }
 
+        LineStart = Position;
         int available = _filled - _next;
         length = Math.Min(length < 0 ? available : length, LongestLine);
         line = _buffer.AsSpan(_next, length);

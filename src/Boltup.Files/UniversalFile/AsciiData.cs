@@ -25,7 +25,10 @@ internal static class AsciiData
                 int end = Math.Min(start + widths[field], line.Length);
                 if (start >= end || !TryField(line[start..end], out numbers[filled], field > 0, ref forms))
                 {
-                    Refuse(line, Math.Min(start, line.Length), end, layout.FirstLine + row, displayPath, diagnostics);
+                    SourceSpan place = layout.FirstLine > 0
+                        ? new(displayPath, layout.FirstLine + row, Math.Min(start, line.Length) + 1, Math.Max(1, end - start))
+                        : new(displayPath, ByteOffset: lines.LineStart + start);
+                    Refuse(line[Math.Min(start, line.Length)..Math.Max(Math.Min(start, line.Length), end)], place, diagnostics);
                     return false;
                 }
 
@@ -57,10 +60,10 @@ internal static class AsciiData
         return fields;
     }
 
-    private static void Refuse(ReadOnlySpan<byte> line, int start, int end, int lineNumber, string displayPath, DiagnosticBag diagnostics) =>
+    private static void Refuse(ReadOnlySpan<byte> field, SourceSpan place, DiagnosticBag diagnostics) =>
         diagnostics.Error(
             FileCodes.BadNumber,
-            $"`{Encoding.Latin1.GetString(line[start..Math.Max(start, end)]).Trim()}` is no number",
-            new SourceSpan(displayPath, lineNumber, start + 1, Math.Max(1, end - start)),
+            $"`{Encoding.Latin1.GetString(field).Trim()}` is no number",
+            place,
             "export the file again; values stand in fixed columns of 13 or 20");
 }

@@ -2,7 +2,7 @@ namespace Boltup.Files.UniversalFile;
 
 /// <summary>Where and how the values of a record are stored.</summary>
 /// <param name="Offset">Byte offset of the first value.</param>
-/// <param name="FirstLine">Line number of the first row of ASCII data.</param>
+/// <param name="FirstLine">Line number of the first row of ASCII data; 0 where binary data before it make lines meaningless.</param>
 /// <param name="Points">Number of points that are really there.</param>
 internal sealed record DataLayout(long Offset, int FirstLine, int Points, bool IsBinary, bool IsBigEndian, bool HasAbscissa, int Parts, bool IsDouble)
 {

@@ -136,7 +136,7 @@ internal sealed partial class DatasetWalker
     private DataLayout? FindAscii(FunctionHeader header, SourceSpan place)
     {
         var layout = new DataLayout(
-            _lines.Position, _lines.LineNumber + 1, header.Count, false, false, !header.IsEven, header.Parts, header.IsDouble);
+            _lines.Position, _hasBinary ? 0 : _lines.LineNumber + 1, header.Count, false, false, !header.IsEven, header.Parts, header.IsDouble);
         return JumpOverRows(layout) ? layout : CountRows(layout, place);
     }
 

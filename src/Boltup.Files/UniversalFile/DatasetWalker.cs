@@ -21,6 +21,7 @@ internal sealed partial class DatasetWalker
     private readonly List<FunctionRecord> _records = [];
     private readonly List<MeasuredPoint> _points = [];
     private NumberForms _forms;
+    private bool _hasBinary;
     private UnitSystem _units = UnitSystem.Si;
     private Amplitude? _amplitude;
 
@@ -127,7 +128,8 @@ internal sealed partial class DatasetWalker
     {
         int idLineNumber = _lines.LineNumber;
         bool isBinary = id.Length > 6 && id[6] is 'b' or 'B';
-        SourceSpan Place(int line = 0) => isBinary
+        _hasBinary |= isBinary;
+        SourceSpan Place(int line = 0) => _hasBinary
             ? new SourceSpan(_displayPath, ByteOffset: offset)
             : new SourceSpan(_displayPath, idLineNumber + line);
         _liberties.Place = Place();

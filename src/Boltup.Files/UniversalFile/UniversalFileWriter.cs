@@ -12,6 +12,7 @@ public sealed class UniversalFileWriter(Stream output)
     private const string Delimiter = "    -1";
     private const string NoDate = "NONE";
     private const int LineWidth = 80;
+    private const int EntityWidth = 10;
 
     /// <summary>Dataset 151: what the file is and which program wrote it; without a date, so that equal data give equal bytes.</summary>
     public void WriteHeader(string title, string program) => WriteDataset(
@@ -145,8 +146,9 @@ public sealed class UniversalFileWriter(Stream output)
     {
         int node = dof is { } named && int.TryParse(named.Point, NumberStyles.None, CultureInfo.InvariantCulture, out int number) ? number : 0;
         int direction = dof is { IsMotion: true } moving ? (int)moving.Direction + 1 : 0;
-        string entity = dof is not null && node == 0 ? dof.Value.ToString() : "NONE";
-        return Line($"{entity[..Math.Min(10, entity.Length)],-10}{node,10}{direction,4}");
+        string name = dof is not null && node == 0 ? dof.Value.ToString() : "NONE";
+        string entity = name.Length <= EntityWidth ? name : "NONE"; // a name cut off could read as another dof
+        return Line($"{entity,-EntityWidth}{node,10}{direction,4}");
     }
 
     private static string AxisOf(Quantity quantity) => quantity switch

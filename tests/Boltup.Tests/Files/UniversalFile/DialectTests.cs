@@ -93,6 +93,16 @@ public class DialectTests
         AssertPlain(read);
     }
 
+    [Fact]
+    public void Read_TextBehindBinary_IsPlacedByItsOffset()
+    {
+        byte[] binary = File.ReadAllBytes(Repository.Data("files", "dialects", "binary.uff"));
+        byte[] text = File.ReadAllBytes(Repository.Data("files", "dialects", "plain.uff"));
+        ReadFile read = ReadFile.Of([.. binary, .. text]);
+        Assert.Equal(binary.Length + 7, read.Curves[1].Span.ByteOffset);
+        Assert.Equal(Plain, read[1]);
+    }
+
     [Theory]
     [InlineData("dof_in_name")]
     [InlineData("dof_in_id_line")]
