@@ -19,6 +19,7 @@ internal sealed class CsvTable(CsvHeader header, string displayPath, DiagnosticB
     private byte[] _lastName = [];
     private CsvCurve? _last;
     private int _errors;
+    private bool _hasNotFinite;
 
     /// <summary>Values of the finished curves.</summary>
     public List<Complex[]> Values { get; } = [];
@@ -119,7 +120,7 @@ internal sealed class CsvTable(CsvHeader header, string displayPath, DiagnosticB
                     FileCodes.BadCsvRow,
                     $"`{names[i]}` is not {expected}",
                     line,
-                    fields[i].Start.Value + 1,
+                    ColumnOf(row, fields[i]),
                     names[i].Length,
                     "directions are x, y, z, rx, ry, rz, p and q");
                 return null;
@@ -158,7 +159,7 @@ internal sealed class CsvTable(CsvHeader header, string displayPath, DiagnosticB
                 FileCodes.BadAxis,
                 $"frequency {Encoding.UTF8.GetString(row[field])}{last} in `{string.Join(" / ", curve.Names)}`, expected increasing frequencies from 0 on",
                 line,
-                field.Start.Value + 1,
+                ColumnOf(row, field),
                 field.End.Value - field.Start.Value,
                 null);
             return;
@@ -171,8 +172,10 @@ internal sealed class CsvTable(CsvHeader header, string displayPath, DiagnosticB
     private bool TryNumber(ReadOnlySpan<byte> row, Range field, int line, out double value)
     {
         ReadOnlySpan<byte> text = row[field];
-        if (NumberParser.TryParse(text, out value))
+        NumberForms forms = NumberForms.Plain;
+        if (NumberParser.TryParse(text.Trim((byte)' '), out value, ref forms) && (forms & ~NumberForms.NotFinite) == 0)
         {
+            NoteNotFinite(forms, line, ColumnOf(row, field));
             return true;
         }
 
@@ -180,10 +183,22 @@ internal sealed class CsvTable(CsvHeader header, string displayPath, DiagnosticB
             FileCodes.BadNumber,
             $"`{Encoding.UTF8.GetString(text)}` is no number",
             line,
-            field.Start.Value + 1,
+            ColumnOf(row, field),
             text.Length,
             "write numbers with a decimal point, such as 1.25e-3");
         return false;
+    }
+
+    private static int ColumnOf(ReadOnlySpan<byte> row, Range field) => Encoding.UTF8.GetCharCount(row[..field.Start.Value]) + 1;
+
+    private void NoteNotFinite(NumberForms forms, int line, int column)
+    {
+        if (forms == NumberForms.NotFinite && !_hasNotFinite)
+        {
+            _hasNotFinite = true;
+            diagnostics.Note(
+                FileCodes.Liberty, "a row holds a value that is no finite number: such values were kept", new SourceSpan(displayPath, line, column));
+        }
     }
 
     private void Error(DiagnosticCode code, string message, int line, int column, int length, string? help)

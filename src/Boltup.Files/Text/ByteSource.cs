@@ -20,6 +20,8 @@ internal sealed class ByteSource : IDisposable
     /// <summary>Reads as much as is there, up to the length of the buffer.</summary>
     public int ReadAt(long offset, Span<byte> buffer)
     {
+        long left = Math.Max(0, Length - offset);
+        buffer = buffer[..(int)Math.Min(buffer.Length, left)];
         int total = 0;
         while (total < buffer.Length)
         {

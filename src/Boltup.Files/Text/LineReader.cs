@@ -8,7 +8,7 @@ internal sealed class LineReader(ByteSource source)
     /// <summary>No line of any format is longer; what is longer is cut into pieces, so that binary bytes cannot fill the memory.</summary>
     private const int LongestLine = 1 << 16;
 
-    private readonly byte[] _buffer = new byte[InitialBuffer + LongestLine];
+    private readonly byte[] _buffer = new byte[Math.Min(InitialBuffer + LongestLine, source.Length + 1)];
     private long _bufferStart;
     private int _filled;
     private int _next;
@@ -16,8 +16,17 @@ internal sealed class LineReader(ByteSource source)
     /// <summary>Offset in the file of the line that is read next.</summary>
     public long Position => _bufferStart + _next;
 
+    /// <summary>Offset in the file of the line that was read last.</summary>
+    public long LineStart { get; private set; }
+
     /// <summary>Number, from 1, of the line that was read last; meaningless after binary data.</summary>
     public int LineNumber { get; private set; }
+
+    /// <summary>The kinds of line end met so far.</summary>
+    public LineEnds Ends { get; private set; }
+
+    /// <summary>Whether the line that was read last had a line end; the last one of a file may have none.</summary>
+    public bool LineIsEnded { get; private set; }
 
     public bool AtEnd => Position >= source.Length;
 
@@ -51,22 +60,27 @@ internal sealed class LineReader(ByteSource source)
             length = _buffer.AsSpan(_next, _filled - _next).IndexOfAny((byte)'\n', (byte)'\r');
         }
 
+        LineStart = Position;
         int available = _filled - _next;
         length = Math.Min(length < 0 ? available : length, LongestLine);
         line = _buffer.AsSpan(_next, length);
-        _next += length + EndLength(_next + length);
+        int endLength = PassEnd(_next + length);
+        LineIsEnded = endLength > 0;
+        _next += length + endLength;
         LineNumber++;
         return true;
     }
 
-    private int EndLength(int at)
+    private int PassEnd(int at)
     {
         if (at >= _filled || _buffer[at] is not ((byte)'\n' or (byte)'\r'))
         {
             return 0;
         }
 
-        return _buffer[at] == '\r' && at + 1 < _filled && _buffer[at + 1] == '\n' ? 2 : 1;
+        bool isPair = _buffer[at] == '\r' && at + 1 < _filled && _buffer[at + 1] == '\n';
+        Ends |= isPair ? LineEnds.CrLf : _buffer[at] == '\r' ? LineEnds.Cr : LineEnds.Lf;
+        return isPair ? 2 : 1;
     }
 
     private void Refill()

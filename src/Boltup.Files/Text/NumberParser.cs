@@ -1,6 +1,3 @@
-using System.Buffers.Text;
-using System.Globalization;
-
 namespace Boltup.Files.Text;
 
 /// <summary>
@@ -12,122 +9,91 @@ internal static class NumberParser
     private const int ExactPower = 22;
     private const ulong ExactMantissa = 1UL << 53;
 
+    /// <summary>More digits than this may overflow 64 bits before the limit of the mantissa is looked at.</summary>
+    private const int MostDigits = 19;
+
     private static readonly double[] PowersOfTen =
     [
         1e0, 1e1, 1e2, 1e3, 1e4, 1e5, 1e6, 1e7, 1e8, 1e9, 1e10, 1e11, 1e12, 1e13, 1e14, 1e15, 1e16, 1e17, 1e18, 1e19, 1e20, 1e21, 1e22,
     ];
 
-    /// <summary>Reads a number with blanks around it; exponents may be written E, e, D or d, or with a bare sign (<c>1.5-101</c>).</summary>
+    /// <summary>Reads a number with blanks around it.</summary>
     public static bool TryParse(ReadOnlySpan<byte> text, out double value)
     {
-        text = text.Trim((byte)' ');
+        NumberForms forms = NumberForms.Plain;
+        return TryParse(text.Trim((byte)' '), out value, ref forms);
+    }
+
+    /// <summary>
+    /// Reads a number that may have blanks before it, not behind; exponents may be written E, e, D or d, or with a bare sign
+    /// (<c>1.5-101</c>).
+    /// </summary>
+    /// <param name="forms">Gathers the forms that were met.</param>
+    public static bool TryParse(ReadOnlySpan<byte> text, out double value, ref NumberForms forms)
+    {
         int i = 0;
+        while (i < text.Length && text[i] == ' ')
+        {
+            i++;
+        }
+
+        int begin = i;
         bool negative = i < text.Length && text[i] == '-';
         i += negative || (i < text.Length && text[i] == '+') ? 1 : 0;
         ulong mantissa = 0;
-        int digits = 0;
+        int first = i;
+        ReadDigits(text, ref i, ref mantissa);
+        int digits = i - first;
         int scale = 0;
-        ReadDigits(text, ref i, ref mantissa, ref digits);
-        int whole = digits;
         if (i < text.Length && text[i] == '.')
         {
-            i++;
-            ReadDigits(text, ref i, ref mantissa, ref digits);
-            scale = whole - digits;
+            int point = ++i;
+            ReadDigits(text, ref i, ref mantissa);
+            scale = point - i;
+            digits -= scale;
         }
 
-        if (digits is 0 or > 19 || mantissa >= ExactMantissa || !TryReadExponent(text, ref i, out int exponent))
+        if (digits is 0 or > MostDigits || mantissa >= ExactMantissa || !TryAddExponent(text[i..], ref scale) || scale is < -ExactPower or > ExactPower)
         {
-            return TryParseByLibrary(text, out value);
+            return RareNumber.TryParse(text[begin..], out value, ref forms);
         }
 
-        int power = exponent + scale;
-        if (i != text.Length || power is < -ExactPower or > ExactPower)
-        {
-            return TryParseByLibrary(text, out value);
-        }
-
-        double magnitude = power < 0 ? mantissa / PowersOfTen[-power] : mantissa * PowersOfTen[power];
+        double magnitude = scale < 0 ? mantissa / PowersOfTen[-scale] : mantissa * PowersOfTen[scale];
         value = negative ? -magnitude : magnitude;
         return true;
     }
 
-    private static void ReadDigits(ReadOnlySpan<byte> text, ref int i, ref ulong mantissa, ref int digits)
+    private static void ReadDigits(ReadOnlySpan<byte> text, ref int i, ref ulong mantissa)
     {
-        while (i < text.Length)
+        for (; i < text.Length && (uint)(text[i] - '0') <= 9; i++)
         {
-            uint digit = (uint)(text[i] - '0');
-            if (digit > 9)
-            {
-                return;
-            }
-
-            mantissa = 10 * mantissa + digit;
-            digits++;
-            i++;
+            mantissa = 10 * mantissa + (uint)(text[i] - '0');
         }
     }
 
-    private static bool TryReadExponent(ReadOnlySpan<byte> text, ref int i, out int exponent)
+    /// <summary>Takes nothing, or a letter E, a sign and one to three digits.</summary>
+    private static bool TryAddExponent(ReadOnlySpan<byte> text, ref int scale)
     {
-        exponent = 0;
-        if (i == text.Length)
+        if (text.IsEmpty)
         {
             return true;
         }
 
-        bool hasLetter = text[i] is (byte)'E' or (byte)'e' or (byte)'D' or (byte)'d';
-        i += hasLetter ? 1 : 0;
-        bool negative = i < text.Length && text[i] == '-';
-        bool hasSign = negative || (i < text.Length && text[i] == '+');
-        i += hasSign ? 1 : 0;
+        if (text.Length is < 2 or > 5 || (text[0] | 0x20) != 'e')
+        {
+            return false;
+        }
+
+        bool negative = text[1] == '-';
+        int i = negative || text[1] == '+' ? 2 : 1;
+        int exponent = 0;
         int first = i;
-        while (i < text.Length && (uint)(text[i] - '0') <= 9 && i - first < 4)
+        for (; i < text.Length && (uint)(text[i] - '0') <= 9; i++)
         {
-            exponent = 10 * exponent + (text[i++] - '0');
+            exponent = 10 * exponent + (text[i] - '0');
         }
 
-        exponent = negative ? -exponent : exponent;
-        return i > first && (hasLetter || hasSign);
-    }
-
-    /// <summary>The library reads what is left, once Fortran's exponents are written as it expects them.</summary>
-    private static bool TryParseByLibrary(ReadOnlySpan<byte> text, out double value)
-    {
-        if (Utf8Parser.TryParse(text, out value, out int used) && used == text.Length)
-        {
-            return true;
-        }
-
-        Span<char> rewritten = stackalloc char[72];
-        int length = 0;
-        for (int i = 0; i < text.Length && length < rewritten.Length - 2; i++)
-        {
-            bool bareSign = text[i] is (byte)'+' or (byte)'-' && i > 0 && (char.IsAsciiDigit((char)text[i - 1]) || text[i - 1] == '.');
-            if (bareSign)
-            {
-                rewritten[length++] = 'E';
-            }
-
-            rewritten[length++] = text[i] is (byte)'D' or (byte)'d' ? 'E' : (char)text[i];
-        }
-
-        return double.TryParse(rewritten[..length], NumberStyles.Float, CultureInfo.InvariantCulture, out value)
-            || TryParseName(rewritten[..length], out value);
-    }
-
-    private static bool TryParseName(ReadOnlySpan<char> text, out double value)
-    {
-        bool negative = text.StartsWith("-");
-        ReadOnlySpan<char> name = text.TrimStart("+-");
-        value = name switch
-        {
-            _ when name.Equals("nan", StringComparison.OrdinalIgnoreCase) => double.NaN,
-            _ when name.Equals("inf", StringComparison.OrdinalIgnoreCase) => double.PositiveInfinity,
-            _ when name.Equals("infinity", StringComparison.OrdinalIgnoreCase) => double.PositiveInfinity,
-            _ => 0,
-        };
-        value = negative ? -value : value;
-        return value != 0;
+        scale += negative ? -exponent : exponent;
+        return i == text.Length && i > first;
     }
 }

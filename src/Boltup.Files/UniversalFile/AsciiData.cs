@@ -8,8 +8,10 @@ namespace Boltup.Files.UniversalFile;
 internal static class AsciiData
 {
     /// <summary>Reads as many numbers as there is room for.</summary>
+    /// <param name="forms">Gathers the forms of numbers that were met.</param>
     /// <param name="numbers">Abscissa (where there is one) and parts of each point in turn.</param>
-    public static bool Read(LineReader lines, DataLayout layout, Span<double> numbers, string displayPath, DiagnosticBag diagnostics)
+    public static bool Read(
+        LineReader lines, DataLayout layout, Span<double> numbers, string displayPath, DiagnosticBag diagnostics, ref NumberForms forms)
     {
         int[] widths = layout.RowWidths;
         lines.MoveTo(layout.Offset);
@@ -21,9 +23,12 @@ internal static class AsciiData
             for (int field = 0; field < widths.Length && filled < numbers.Length; field++)
             {
                 int end = Math.Min(start + widths[field], line.Length);
-                if (start >= end || !NumberParser.TryParse(line[start..end], out numbers[filled]))
+                if (start >= end || !TryField(line[start..end], out numbers[filled], field > 0, ref forms))
                 {
-                    Refuse(line, Math.Min(start, line.Length), end, layout.FirstLine + row, displayPath, diagnostics);
+                    SourceSpan place = layout.FirstLine > 0
+                        ? new(displayPath, layout.FirstLine + row, Math.Min(start, line.Length) + 1, Math.Max(1, end - start))
+                        : new(displayPath, ByteOffset: lines.LineStart + start);
+                    Refuse(line[Math.Min(start, line.Length)..Math.Max(Math.Min(start, line.Length), end)], place, diagnostics);
                     return false;
                 }
 
@@ -33,6 +38,13 @@ internal static class AsciiData
         }
 
         return true;
+    }
+
+    private static bool TryField(ReadOnlySpan<byte> field, out double value, bool hasNeighbour, ref NumberForms forms)
+    {
+        bool fine = NumberParser.TryParse(field[^1] == ' ' ? field.TrimEnd((byte)' ') : field, out value, ref forms);
+        forms |= hasNeighbour && field[0] != ' ' ? NumberForms.Touching : NumberForms.Plain;
+        return fine;
     }
 
     /// <summary>Number of fields that a row really holds.</summary>
@@ -48,10 +60,10 @@ internal static class AsciiData
         return fields;
     }
 
-    private static void Refuse(ReadOnlySpan<byte> line, int start, int end, int lineNumber, string displayPath, DiagnosticBag diagnostics) =>
+    private static void Refuse(ReadOnlySpan<byte> field, SourceSpan place, DiagnosticBag diagnostics) =>
         diagnostics.Error(
             FileCodes.BadNumber,
-            $"`{Encoding.Latin1.GetString(line[start..Math.Max(start, end)]).Trim()}` is no number",
-            new SourceSpan(displayPath, lineNumber, start + 1, Math.Max(1, end - start)),
+            $"`{Encoding.Latin1.GetString(field).Trim()}` is no number",
+            place,
             "export the file again; values stand in fixed columns of 13 or 20");
 }

@@ -5,6 +5,8 @@ namespace Boltup.Files.UniversalFile;
 /// <summary>What the numbers of a dataset 58 mean.</summary>
 internal static class DataTypes
 {
+    public const int ReactionForce = 9;
+
     public const int Frequency = 18;
 
     private static readonly string[] VolumeVelocityUnits = ["m^3/s", "m3/s", "m³/s"];
@@ -27,7 +29,7 @@ internal static class DataTypes
     public static Quantity QuantityOf(AxisField field) => field.DataType switch
     {
         8 => Quantity.Displacement,
-        9 or 13 => Quantity.Force,
+        ReactionForce or 13 => Quantity.Force,
         11 => Quantity.Velocity,
         12 => Quantity.Acceleration,
         15 => Quantity.Pressure,

@@ -136,7 +136,7 @@ internal sealed partial class DatasetWalker
     private DataLayout? FindAscii(FunctionHeader header, SourceSpan place)
     {
         var layout = new DataLayout(
-            _lines.Position, _lines.LineNumber + 1, header.Count, false, false, !header.IsEven, header.Parts, header.IsDouble);
+            _lines.Position, _hasBinary ? 0 : _lines.LineNumber + 1, header.Count, false, false, !header.IsEven, header.Parts, header.IsDouble);
         return JumpOverRows(layout) ? layout : CountRows(layout, place);
     }
 
@@ -159,7 +159,7 @@ internal sealed partial class DatasetWalker
         long lastRow = layout.Offset + (rows - 1) * (rowWidth + lineEnd);
         if (isRegular && lastRow + lastWidth <= _source.Length)
         {
-            _lines.MoveTo(lastRow, (int)(rows - 1));
+            _lines.MoveTo(lastRow, (int)(rows - 2)); // one row has been read
             if (_lines.TryRead(out ReadOnlySpan<byte> last) && last.Length == lastWidth
                 && _lines.TryRead(out ReadOnlySpan<byte> delimiter) && IsDelimiter(delimiter))
             {
@@ -187,6 +187,11 @@ internal sealed partial class DatasetWalker
             }
 
             int fields = AsciiData.FieldsIn(line, widths);
+            if (!_lines.LineIsEnded && line.Length < widths.Take(fields).Sum())
+            {
+                fields--; // the file ends within a number
+            }
+
             padded |= fields < widths.Length && line.Length > widths.Take(fields).Sum();
             found += fields;
         }

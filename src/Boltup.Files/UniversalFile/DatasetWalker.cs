@@ -1,3 +1,4 @@
+using System.Numerics;
 using System.Text;
 using Boltup.Engine.Diagnostics;
 using Boltup.Engine.Prediction;
@@ -19,6 +20,8 @@ internal sealed partial class DatasetWalker
     private readonly List<Curve> _curves = [];
     private readonly List<FunctionRecord> _records = [];
     private readonly List<MeasuredPoint> _points = [];
+    private NumberForms _forms;
+    private bool _hasBinary;
     private UnitSystem _units = UnitSystem.Si;
     private Amplitude? _amplitude;
 
@@ -59,23 +62,28 @@ internal sealed partial class DatasetWalker
                 new SourceSpan(_displayPath));
         }
 
+        if (BitOperations.PopCount((uint)_lines.Ends) > 1)
+        {
+            _liberties.Place = new SourceSpan(_displayPath);
+            _liberties.Take(Liberty.MixedLineEnds);
+        }
+
         _liberties.SayAll(_diagnostics);
     }
 
     private void ReadDataset()
     {
-        long offset = _lines.Position;
-        if (!_lines.TryRead(out ReadOnlySpan<byte> idLine))
+        long offset;
+        ReadOnlySpan<byte> idLine;
+        do
         {
-            return;
+            offset = _lines.Position;
+            if (!_lines.TryRead(out idLine))
+            {
+                return;
+            }
         }
-
-        // Two delimiters in a row: the first closed a dataset that a damaged one left open.
-        if (IsDelimiter(idLine))
-        {
-            ReadDataset();
-            return;
-        }
+        while (IsDelimiter(idLine)); // of two delimiters in a row, the first closed a dataset that a damaged one left open
 
         string id = Encoding.Latin1.GetString(idLine);
         if (!FixedColumns.TryInteger(id, 0, 6, out int number))
@@ -120,14 +128,15 @@ internal sealed partial class DatasetWalker
     {
         int idLineNumber = _lines.LineNumber;
         bool isBinary = id.Length > 6 && id[6] is 'b' or 'B';
-        SourceSpan Place(int line = 0) => isBinary
+        _hasBinary |= isBinary;
+        SourceSpan Place(int line = 0) => _hasBinary
             ? new SourceSpan(_displayPath, ByteOffset: offset)
             : new SourceSpan(_displayPath, idLineNumber + line);
         _liberties.Place = Place();
         var headerLines = new List<string>(FunctionHeaderParser.LineCount);
         while (headerLines.Count < FunctionHeaderParser.LineCount && _lines.TryRead(out ReadOnlySpan<byte> line))
         {
-            headerLines.Add(FixedColumns.Decode(line));
+            headerLines.Add(FixedColumns.Decode(line, _liberties));
         }
 
         if (headerLines.Count < FunctionHeaderParser.LineCount)
@@ -186,7 +195,7 @@ internal sealed partial class DatasetWalker
         var numbers = new double[layout.Points * layout.NumbersPerPoint];
         bool complete = layout.IsBinary
             ? new BinaryData(_source).Read(layout, numbers)
-            : AsciiData.Read(_lines, layout, numbers, _displayPath, _diagnostics);
+            : AsciiData.Read(_lines, layout, numbers, _displayPath, _diagnostics, ref _forms);
         _lines.MoveTo(next, lines - _lines.LineNumber);
         double[] hz = [.. Enumerable.Range(0, layout.Points).Select(i => numbers[i * layout.NumbersPerPoint])];
         return complete ? _builder.UnevenAxis(hz) : null;

@@ -13,7 +13,7 @@ internal static class DelimiterSearch
     /// </summary>
     public static long FindEnd(ByteSource source, long from)
     {
-        var buffer = new byte[Window];
+        var buffer = new byte[Math.Min(Window, source.Length)];
         long start = from;
         while (start < source.Length)
         {
@@ -38,7 +38,7 @@ internal static class DelimiterSearch
 
             // Delimiters that straddle the edge of the window are found in the next one.
             start += Math.Max(1, filled - 6);
-            if (filled < Window)
+            if (filled < buffer.Length)
             {
                 break;
             }

@@ -1,5 +1,6 @@
 using System.Globalization;
 using System.Text;
+using System.Text.Unicode;
 using Boltup.Files.Text;
 
 namespace Boltup.Files.UniversalFile;
@@ -27,17 +28,15 @@ internal static class FixedColumns
     }
 
     /// <summary>Header text: UTF-8 where it is valid, otherwise Latin-1.</summary>
-    public static string Decode(ReadOnlySpan<byte> line)
+    public static string Decode(ReadOnlySpan<byte> line, Liberties liberties)
     {
-        try
+        if (Ascii.IsValid(line))
         {
-            return Strict.GetString(line);
+            return Encoding.ASCII.GetString(line);
         }
-        catch (DecoderFallbackException)
-        {
-            return Encoding.Latin1.GetString(line);
-        }
-    }
 
-    private static readonly UTF8Encoding Strict = new(encoderShouldEmitUTF8Identifier: false, throwOnInvalidBytes: true);
+        bool isUtf8 = Utf8.IsValid(line);
+        liberties.Take(isUtf8 ? Liberty.Utf8Header : Liberty.Latin1Header);
+        return (isUtf8 ? Encoding.UTF8 : Encoding.Latin1).GetString(line);
+    }
 }

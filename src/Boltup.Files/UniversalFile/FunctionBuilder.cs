@@ -10,6 +10,9 @@ internal sealed class FunctionBuilder(Liberties liberties)
     /// <summary>Standard acceleration of free fall in m/s² (ISO 80000-3).</summary>
     private const double StandardGravity = 9.80665;
 
+    /// <summary>Smallest step relative to the last line; below, lines would merge when an axis is rounded to 12 digits.</summary>
+    private const double SmallestStep = 1e-10;
+
     private readonly List<FrequencyAxis> _axes = [];
     private (double First, double Step, int Count) _lastEven;
     private FrequencyAxis? _lastEvenAxis;
@@ -32,16 +35,19 @@ internal sealed class FunctionBuilder(Liberties liberties)
     {
         if (_lastEvenAxis is null || _lastEven != (first, step, count))
         {
-            bool isAxis = first >= 0 && (step > 0 || count == 1) && double.IsFinite(first + step * count) && first + step > first;
-            if (!isAxis && count > 1)
-            {
-                return null;
-            }
-
-            (_lastEven, _lastEvenAxis) = ((first, step, count), Share(FrequencyAxis.Even(Math.Max(first, 0), step, count)));
+            FrequencyAxis? axis = RebuildEven(first, step, count);
+            (_lastEven, _lastEvenAxis) = ((first, step, count), axis is null ? null : Share(axis));
         }
 
         return _lastEvenAxis;
+    }
+
+    /// <summary>The axis that first line, step and number of lines in a header stand for, or null.</summary>
+    public static FrequencyAxis? RebuildEven(double first, double step, int count)
+    {
+        double last = first + step * (count - 1);
+        bool isAxis = first >= 0 && double.IsFinite(last) && (count == 1 || step > SmallestStep * last);
+        return isAxis ? FrequencyAxis.Even(first, count == 1 ? 0 : step, count) : null;
     }
 
     public FrequencyAxis? UnevenAxis(double[] hz) => FrequencyAxis.TryFromHertz(hz, out FrequencyAxis? axis) ? Share(axis!) : null;
@@ -57,9 +63,12 @@ internal sealed class FunctionBuilder(Liberties liberties)
         bool isRatio = kind is FunctionKind.Coherence;
         bool isReal = isRatio || kind is FunctionKind.AutoSpectrum or FunctionKind.PowerSpectralDensity;
         SayStorage(header, kind, isReal);
-        double factor = isRatio ? 1 : responseSign * referenceSign
-            * ToSi(header.Numerator, numerator, response?.Direction, units)
-            / ToSi(header.Denominator, denominator, reference?.Direction, units);
+        double factor = FactorOf(
+            kind,
+            responseSign * referenceSign,
+            ToSi(header.Numerator, numerator, response?.Direction, units),
+            ToSi(header.Denominator, denominator, reference?.Direction, units),
+            header.Numerator.HasExponents);
         var curve = new Curve
         {
             Index = index,
@@ -78,8 +87,27 @@ internal sealed class FunctionBuilder(Liberties liberties)
         return (curve, new FunctionRecord(layout, factor, KeepsImaginary: !isReal));
     }
 
+    /// <summary>Power goes with the square of its quantity, and has no sign; exponents of the file are those of the power already.</summary>
+    private static double FactorOf(FunctionKind kind, double sign, double numerator, double denominator, bool isPowerFactor) => kind switch
+    {
+        FunctionKind.Coherence => 1,
+        FunctionKind.AutoSpectrum or FunctionKind.PowerSpectralDensity => isPowerFactor ? numerator : numerator * numerator,
+        FunctionKind.CrossSpectrum => sign * numerator * denominator,
+        _ => sign * numerator / denominator,
+    };
+
     private void SayStorage(FunctionHeader header, FunctionKind kind, bool isReal)
     {
+        if (header.IdLines.All(string.IsNullOrEmpty))
+        {
+            liberties.Take(Liberty.BlankIdentification);
+        }
+
+        if (header.Numerator.DataType == DataTypes.ReactionForce || header.Denominator.DataType == DataTypes.ReactionForce)
+        {
+            liberties.Take(Liberty.ReactionForce);
+        }
+
         if (isReal && header.IsComplex)
         {
             liberties.Take(Liberty.ComplexRatio);

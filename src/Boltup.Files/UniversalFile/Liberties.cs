@@ -1,4 +1,5 @@
 using Boltup.Engine.Diagnostics;
+using Boltup.Files.Text;
 
 namespace Boltup.Files.UniversalFile;
 
@@ -6,6 +7,14 @@ namespace Boltup.Files.UniversalFile;
 internal sealed class Liberties(string displayPath)
 {
     private readonly Dictionary<(DiagnosticCode Code, string Text), (SourceSpan Span, int Count)> _taken = [];
+
+    private static readonly (NumberForms Form, Liberty Liberty)[] OfForms =
+    [
+        (NumberForms.LetterD, Liberty.LetterD),
+        (NumberForms.NoLetter, Liberty.NoExponentLetter),
+        (NumberForms.NotFinite, Liberty.NotANumber),
+        (NumberForms.Touching, Liberty.TouchingNumbers),
+    ];
 
     /// <summary>Where the record stands that is being read.</summary>
     public SourceSpan Place { get; set; } = new(displayPath);
@@ -16,6 +25,18 @@ internal sealed class Liberties(string displayPath)
     {
         (SourceSpan span, int count) = _taken.GetValueOrDefault((code, text), (Place, 0));
         _taken[(code, text)] = (span, count + 1);
+    }
+
+    /// <summary>Takes the liberties that reading numbers of these forms means.</summary>
+    public void Take(NumberForms forms)
+    {
+        foreach ((NumberForms form, Liberty liberty) in OfForms)
+        {
+            if (forms.HasFlag(form))
+            {
+                Take(liberty);
+            }
+        }
     }
 
     /// <summary>Says everything that was noted.</summary>

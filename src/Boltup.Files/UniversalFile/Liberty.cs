@@ -30,5 +30,21 @@ internal sealed record Liberty(string Rule)
 
     public static readonly Liberty RealFrf = new("an FRF or spectrum is stored real: its imaginary part is zero");
 
+    public static readonly Liberty LetterD = new("exponents are written with a D: read as E");
+
+    public static readonly Liberty NoExponentLetter = new("exponents of three digits have no letter, such as `1.5-101`: read as `1.5E-101`");
+
+    public static readonly Liberty TouchingNumbers = new("numbers stand next to each other without a blank: read by their columns");
+
+    public static readonly Liberty Utf8Header = new("a header line holds characters beyond ASCII: read as UTF-8");
+
+    public static readonly Liberty Latin1Header = new("a header line holds characters beyond ASCII that are not UTF-8: read as Latin-1");
+
+    public static readonly Liberty MixedLineEnds = new("lines end in different ways: LF, CR LF and CR were all taken");
+
+    public static readonly Liberty BlankIdentification = new("the identification lines of a function are blank: it has no title");
+
+    public static readonly Liberty ReactionForce = new("a force is called a reaction force (data type 9): read as a force, its sign as it is");
+
     public static readonly Liberty NotANumber = new("a record holds values that are no finite numbers: they were kept as they are");
 }

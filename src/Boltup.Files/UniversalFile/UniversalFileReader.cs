@@ -16,6 +16,7 @@ internal sealed class UniversalFileReader : IDataReader
     private readonly LineReader _lines;
     private readonly BinaryData _binary;
     private double[] _numbers = [];
+    private NumberForms _saidForms;
 
     private UniversalFileReader(ByteSource source, string displayPath, DatasetWalker walker)
     {
@@ -84,18 +85,36 @@ internal sealed class UniversalFileReader : IDataReader
 
     private bool ReadNumbers(FunctionRecord record, Span<double> numbers, Curve curve, DiagnosticBag diagnostics)
     {
-        if (!record.Layout.IsBinary)
-        {
-            return AsciiData.Read(_lines, record.Layout, numbers, _displayPath, diagnostics);
-        }
+        NumberForms forms = NumberForms.Plain;
+        bool complete = record.Layout.IsBinary
+            ? ReadBinary(record, numbers, curve, diagnostics, ref forms)
+            : AsciiData.Read(_lines, record.Layout, numbers, _displayPath, diagnostics, ref forms);
+        SayForms(forms, curve, diagnostics);
+        return complete;
+    }
 
+    private bool ReadBinary(FunctionRecord record, Span<double> numbers, Curve curve, DiagnosticBag diagnostics, ref NumberForms forms)
+    {
         bool complete = _binary.Read(record.Layout, numbers);
         if (!complete)
         {
             diagnostics.Error(FileCodes.Truncated, "the file has become shorter while it was read", curve.Span);
         }
 
+        forms |= FiniteCheck.AreFinite(numbers) ? NumberForms.Plain : NumberForms.NotFinite;
         return complete;
+    }
+
+    /// <summary>Notes each form of number once per file.</summary>
+    private void SayForms(NumberForms forms, Curve curve, DiagnosticBag diagnostics)
+    {
+        if ((forms & ~_saidForms) != 0)
+        {
+            var liberties = new Liberties(_displayPath) { Place = curve.Span };
+            liberties.Take(forms & ~_saidForms);
+            liberties.SayAll(diagnostics);
+            _saidForms |= forms;
+        }
     }
 
     private static void Compose(FunctionRecord record, ReadOnlySpan<double> numbers, Span<Complex> values)

@@ -6,18 +6,17 @@ using Boltup.Engine.Spectra;
 
 namespace Boltup.Files.UniversalFile;
 
-/// <summary>How functions are stored in a Universal File.</summary>
-/// <param name="IsBinary">58b, otherwise ASCII.</param>
-/// <param name="IsBigEndian">Byte order of 58b.</param>
-/// <param name="IsDouble">Double precision, otherwise single.</param>
-/// <param name="IsComplex">Complex values, otherwise their real parts.</param>
-public sealed record UniversalFileStorage(bool IsBinary = true, bool IsBigEndian = false, bool IsDouble = true, bool IsComplex = true);
-
 /// <summary>Writes Universal Files: header (151), units (164), points (2411) and functions (58 or 58b), in SI units.</summary>
 public sealed class UniversalFileWriter(Stream output)
 {
     private const string Delimiter = "    -1";
     private const string NoDate = "NONE";
+    private const int LineWidth = 80;
+    private const int EntityWidth = 10;
+
+    /// <summary>Dataset 151: what the file is and which program wrote it; without a date, so that equal data give equal bytes.</summary>
+    public void WriteHeader(string title, string program) => WriteDataset(
+        151, title, title, program, Line($"{NoDate,-10}{NoDate,-10}{0,10}{0,10}{0,10}"), NoDate, program, NoDate);
 
     /// <summary>Dataset 164 with SI factors.</summary>
     public void WriteUnits() => WriteDataset(
@@ -26,13 +25,20 @@ public sealed class UniversalFileWriter(Stream output)
         Line($"{D(1)}{D(1)}{D(1)}"),
         Line($"{D(273.15)}"));
 
+    /// <summary>Dataset 15, coordinates with six digits, for readers that do not know 2411.</summary>
+    /// <param name="points">Points whose node is a number.</param>
+    public void WriteRoundedPoints(IEnumerable<MeasuredPoint> points) => WriteDataset(
+        15,
+        [.. points.Select(point => Line(
+            $"{NodeOf(point),10}{0,10}{0,10}{0,10}{Single(point.X)}{Single(point.Y)}{Single(point.Z)}"))]);
+
     /// <summary>Dataset 2411.</summary>
     /// <param name="points">Points whose node is a number.</param>
     public void WritePoints(IEnumerable<MeasuredPoint> points) => WriteDataset(
         2411,
         [.. points.SelectMany(point => new[]
         {
-            Line($"{int.Parse(point.Node, CultureInfo.InvariantCulture),10}{0,10}{0,10}{0,10}"),
+            Line($"{NodeOf(point),10}{0,10}{0,10}{0,10}"),
             Line($"{D(point.X)}{D(point.Y)}{D(point.Z)}"),
         })]);
 
@@ -41,7 +47,7 @@ public sealed class UniversalFileWriter(Stream output)
     /// <param name="values">One value per line.</param>
     public void WriteFunction(Curve curve, ReadOnlySpan<Complex> values, UniversalFileStorage storage)
     {
-        bool isEven = curve.Axis.Count > 1 && curve.Axis.IsEven;
+        bool isEven = IsEvenInSixDigits(curve.Axis);
         double[] numbers = Flatten(curve.Axis, values, isEven, storage.IsComplex);
         int bytes = numbers.Length * (storage.IsDouble ? 8 : 4);
         WriteLine(Delimiter);
@@ -66,6 +72,8 @@ public sealed class UniversalFileWriter(Stream output)
     }
 
     private static string Line(FormattableString text) => text.ToString(CultureInfo.InvariantCulture);
+
+    private static int NodeOf(MeasuredPoint point) => int.Parse(point.Node, CultureInfo.InvariantCulture);
 
     private static string D(double value) => value.ToString("E16", CultureInfo.InvariantCulture).Replace('E', 'D').PadLeft(25);
 
@@ -92,22 +100,34 @@ public sealed class UniversalFileWriter(Stream output)
     private static string[] Header(Curve curve, bool isEven, UniversalFileStorage storage)
     {
         int type = (storage.IsComplex ? 4 : 0) + (storage.IsDouble ? (storage.IsComplex ? 2 : 4) : storage.IsComplex ? 1 : 2);
-        double step = isEven ? (curve.Axis.LastHz - curve.Axis.FirstHz) / (curve.Axis.Count - 1) : 0;
+        double step = isEven ? StepOf(curve.Axis) : 0;
         return
         [
-            curve.Title,
+            curve.Title[..Math.Min(LineWidth, curve.Title.Length)],
             $"{curve.Response} / {curve.Excitation}",
             NoDate,
             NoDate,
             NoDate,
             Line($"{FunctionTypeOf(curve.Kind),5}{0,10}{1,5}{0,10} {Channel(curve.Response)} {Channel(curve.Excitation)}"),
-            Line($"{type,10}{curve.Axis.Count,10}{(isEven ? 1 : 0),10}{curve.Axis.FirstHz,13:E5}{step,13:E5}{0.0,13:E5}").Replace("E+0", "E+", StringComparison.Ordinal).Replace("E-0", "E-", StringComparison.Ordinal),
+            Line($"{type,10}{curve.Axis.Count,10}{(isEven ? 1 : 0),10}{Single(curve.Axis.FirstHz)}{Single(step)}{Single(0)}"),
             Axis(DataTypes.Frequency, "Frequency", "Hz"),
             AxisOf(curve.ResponseQuantity),
             AxisOf(curve.ExcitationQuantity),
             Axis(0, "NONE", "NONE"),
         ];
     }
+
+    private static double StepOf(FrequencyAxis axis) => axis.Count > 1 ? (axis.LastHz - axis.FirstHz) / (axis.Count - 1) : 0;
+
+    /// <summary>Whether the axis comes back exactly from the six digits that a header has for its first line and step.</summary>
+    private static bool IsEvenInSixDigits(FrequencyAxis axis)
+    {
+        double first = double.Parse(Single(axis.FirstHz), CultureInfo.InvariantCulture);
+        double step = double.Parse(Single(StepOf(axis)), CultureInfo.InvariantCulture);
+        return axis.IsEven && FunctionBuilder.RebuildEven(first, step, axis.Count) is { } rebuilt && rebuilt.Hz.SequenceEqual(axis.Hz);
+    }
+
+    private static string Single(double value) => Number(value, 5).PadLeft(13);
 
     private static int FunctionTypeOf(FunctionKind kind) => kind switch
     {
@@ -126,8 +146,9 @@ public sealed class UniversalFileWriter(Stream output)
     {
         int node = dof is { } named && int.TryParse(named.Point, NumberStyles.None, CultureInfo.InvariantCulture, out int number) ? number : 0;
         int direction = dof is { IsMotion: true } moving ? (int)moving.Direction + 1 : 0;
-        string entity = dof is not null && node == 0 ? dof.Value.ToString() : "NONE";
-        return Line($"{entity[..Math.Min(10, entity.Length)],-10}{node,10}{direction,4}");
+        string name = dof is not null && node == 0 ? dof.Value.ToString() : "NONE";
+        string entity = name.Length <= EntityWidth ? name : "NONE"; // a name cut off could read as another dof
+        return Line($"{entity,-EntityWidth}{node,10}{direction,4}");
     }
 
     private static string AxisOf(Quantity quantity) => quantity switch
