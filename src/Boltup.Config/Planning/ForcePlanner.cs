@@ -114,7 +114,7 @@ internal sealed class ForcePlanner(AssemblyDocument assembly, DataLibrary librar
             document.Kind,
             document.Part.Value,
             curves[0].Axis,
-            [.. curves.Select(curve => names.Resolve(curve.Response!.Value) ?? curve.Response!.Value)],
+            [.. curves.Select(curve => names.Resolve(curve.Response!) ?? curve.Response!)],
             spectra)
         { Origin = document.File.Span };
     }

@@ -10,7 +10,7 @@ namespace Boltup.Config.Planning;
 /// <summary>Collects the FRFs of a part from its data files.</summary>
 internal sealed class FrfPlanner(DataLibrary library, DiagnosticBag diagnostics)
 {
-    private readonly Dictionary<(Dof Response, Dof Excitation), DataCurve> _curves = [];
+    private readonly Dictionary<DofPair, DataCurve> _curves = [];
 
     /// <summary>The part, or null after an error.</summary>
     public MeasuredPart? Plan(string name, PartDocument document, FrfModelDocument model)
@@ -49,7 +49,7 @@ internal sealed class FrfPlanner(DataLibrary library, DiagnosticBag diagnostics)
         int leftOut = 0;
         foreach (Curve curve in frfs)
         {
-            if (names.Resolve(curve.Response!.Value) is { } response && names.Resolve(curve.Excitation!.Value) is { } excitation)
+            if (names.Resolve(curve.Response!) is { } response && names.Resolve(curve.Excitation!) is { } excitation)
             {
                 complete &= QuantityOf(curve, document) is { } quantity && Add(new DataCurve(file, curve, response, excitation, quantity));
             }
@@ -77,25 +77,26 @@ internal sealed class FrfPlanner(DataLibrary library, DiagnosticBag diagnostics)
 
     private bool Add(DataCurve curve)
     {
-        if (_curves.TryAdd((curve.Response, curve.Excitation), curve))
+        var pair = new DofPair(curve.Response, curve.Excitation);
+        if (_curves.TryAdd(pair, curve))
         {
             return true;
         }
 
         diagnostics.Error(
             PlanCodes.DuplicateCurve,
-            $"the FRF {curve.Response} / {curve.Excitation} is given twice",
+            $"the FRF {pair} is given twice",
             curve.Origin,
             "remove one of the two",
-            $"first at {_curves[(curve.Response, curve.Excitation)].Origin}");
+            $"first at {_curves[pair].Origin}");
         return false;
     }
 
     /// <summary>What the file says, or else what the document says; both must agree.</summary>
     private FrfQuantity? QuantityOf(Curve curve, FrfFileDocument document)
     {
-        Dof response = curve.Response!.Value;
-        Dof excitation = curve.Excitation!.Value;
+        Dof response = curve.Response!;
+        Dof excitation = curve.Excitation!;
         Quantity excited = curve.ExcitationQuantity != Quantity.Unknown ? curve.ExcitationQuantity
             : excitation.Direction == Direction.Q ? Quantity.VolumeVelocity
             : Quantity.Force;

@@ -79,7 +79,7 @@ internal sealed class MountPlanner(AssemblyDocument assembly, DataLibrary librar
                 return null;
             }
 
-            tables.Add(new StiffnessTable(curve.Response!.Value.Direction, curve.Axis, values));
+            tables.Add(new StiffnessTable(curve.Response!.Direction, curve.Axis, values));
         }
 
         return new TabledMount(tables);

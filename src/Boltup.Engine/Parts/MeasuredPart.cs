@@ -7,7 +7,7 @@ namespace Boltup.Engine.Parts;
 /// <summary>A part known by FRFs from files, measured or computed elsewhere.</summary>
 public sealed class MeasuredPart : IPartModel
 {
-    private readonly Dictionary<(Dof Response, Dof Excitation), IFrfCurve> _curves;
+    private readonly Dictionary<DofPair, IFrfCurve> _curves;
     private readonly bool _fillByReciprocity;
     private readonly string _name;
 
@@ -19,10 +19,10 @@ public sealed class MeasuredPart : IPartModel
     {
         _name = name;
         _fillByReciprocity = fillByReciprocity;
-        _curves = curves.ToDictionary(curve => (curve.Response, curve.Excitation));
+        _curves = curves.ToDictionary(curve => new DofPair(curve.Response, curve.Excitation));
         Axis = axis;
-        var pairs = fillByReciprocity
-            ? _curves.Keys.Concat(_curves.Keys.Select(pair => Reciprocity.Swap(pair.Response, pair.Excitation)))
+        IEnumerable<DofPair> pairs = fillByReciprocity
+            ? _curves.Keys.Concat(_curves.Keys.Select(Reciprocity.Swap))
             : _curves.Keys;
         Responses = pairs.Select(pair => pair.Response).ToHashSet();
         Excitations = pairs.Select(pair => pair.Excitation).ToHashSet();
@@ -77,13 +77,14 @@ public sealed class MeasuredPart : IPartModel
     private IFrfCurve? Find(Dof response, Dof excitation, out bool reciprocal)
     {
         reciprocal = false;
-        if (_curves.TryGetValue((response, excitation), out IFrfCurve? direct))
+        var pair = new DofPair(response, excitation);
+        if (_curves.TryGetValue(pair, out IFrfCurve? direct))
         {
             return direct;
         }
 
         reciprocal = _fillByReciprocity;
-        return reciprocal ? _curves.GetValueOrDefault(Reciprocity.Swap(response, excitation)) : null;
+        return reciprocal ? _curves.GetValueOrDefault(Reciprocity.Swap(pair)) : null;
     }
 
     /// <summary>Reads curves into tiles: axis mapping, quantity conversion and the check for numbers that are none.</summary>

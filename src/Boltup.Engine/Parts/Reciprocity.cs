@@ -10,7 +10,7 @@ namespace Boltup.Engine.Parts;
 public static class Reciprocity
 {
     /// <summary>The response and excitation of the reciprocal experiment: <c>i.p / j.x</c> ↔ <c>j.x / i.q</c>.</summary>
-    public static (Dof Response, Dof Excitation) Swap(Dof response, Dof excitation) => (AsResponse(excitation), AsExcitation(response));
+    public static DofPair Swap(DofPair pair) => new(AsResponse(pair.Excitation), AsExcitation(pair.Response));
 
     /// <summary>
     /// Power of jω with which an internal value of the reciprocal experiment, negated when not zero, becomes the value wanted:

@@ -73,7 +73,7 @@ internal sealed class CsvTable(CsvHeader header, string displayPath, DiagnosticB
             Response = first,
             Excitation = second,
             ResponseQuantity = first.Direction == Direction.P ? Quantity.Pressure : Quantity.Unknown,
-            ExcitationQuantity = second is null ? Quantity.Unknown : second.Value.Direction == Direction.Q ? Quantity.VolumeVelocity : Quantity.Force,
+            ExcitationQuantity = second is null ? Quantity.Unknown : second.Direction == Direction.Q ? Quantity.VolumeVelocity : Quantity.Force,
             Axis = AxisOf(CollectionsMarshal.AsSpan(curve.Hz)),
             Title = string.Join(" / ", curve.Names),
             Span = curve.Span,

@@ -169,7 +169,7 @@ internal sealed class FunctionBuilder(Liberties liberties)
             .Prepend(channel.Entity);
         foreach (string name in names)
         {
-            if (Dof.TryParse(name, out Dof dof))
+            if (Dof.TryParse(name, out Dof? dof))
             {
                 liberties.Take(Liberty.DofFromName);
                 return dof;

@@ -146,7 +146,7 @@ public sealed class UniversalFileWriter(Stream output)
     {
         int node = dof is { } named && int.TryParse(named.Point, NumberStyles.None, CultureInfo.InvariantCulture, out int number) ? number : 0;
         int direction = dof is { IsMotion: true } moving ? (int)moving.Direction + 1 : 0;
-        string name = dof is not null && node == 0 ? dof.Value.ToString() : "NONE";
+        string name = dof is not null && node == 0 ? dof.ToString() : "NONE";
         string entity = name.Length <= EntityWidth ? name : "NONE"; // a name cut off could read as another dof
         return Line($"{entity,-EntityWidth}{node,10}{direction,4}");
     }

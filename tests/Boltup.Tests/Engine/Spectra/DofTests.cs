@@ -10,7 +10,7 @@ public class DofTests
     [InlineData("a.b.p", "a.b", Direction.P)]
     public void TryParse_PointAndDirection_SplitsAtTheLastStop(string text, string point, Direction direction)
     {
-        Assert.True(Dof.TryParse(text, out Dof dof));
+        Assert.True(Dof.TryParse(text, out Dof? dof));
         Assert.Equal(new Dof(point, direction), dof);
         Assert.Equal(text, dof.ToString());
     }
