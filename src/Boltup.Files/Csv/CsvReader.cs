@@ -49,6 +49,14 @@ internal sealed class CsvReader : IDataReader
                 table.Add(row, lines.LineNumber);
             }
 
+            if (!lines.LineIsEnded)
+            {
+                diagnostics.Note(
+                    FileCodes.Liberty,
+                    "the last row has no line end: it was read, but the file may have been cut off",
+                    new SourceSpan(displayPath, lines.LineNumber));
+            }
+
             return table.Finish() is { } curves ? new CsvReader(header.Format, curves, table.Values) : null;
         }
     }

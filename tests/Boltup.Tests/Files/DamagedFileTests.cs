@@ -50,6 +50,18 @@ public class DamagedFileTests
     }
 
     [Fact]
+    public void Read_CsvTruncatedAnywhere_GivesWholeRowsOrADiagnostic()
+    {
+        byte[] whole = "dof,frequency_hz,real,imag\nm1.x,20,1.5,-2.25\nm1.x,25,1.25e-3,0.125\n"u8.ToArray();
+        Complex[] expected = ReadFile.Of(whole)[0];
+        for (int length = 0; length < whole.Length; length++)
+        {
+            ReadFile read = ReadBounded(whole.AsSpan(0, length));
+            Assert.True(read.Diagnostics.Count > 0 || expected.Take(read[0].Length).SequenceEqual(read[0]), $"length {length}");
+        }
+    }
+
+    [Fact]
     public void Read_FlippedBytesOfCsv_NeverThrowsNorTakesMuchMemory()
     {
         byte[] whole = "response,excitation,frequency_hz,real,imag\nm1.x,m2.x,20,1.5,-2\nm1.x,m2.x,25,1.25e-3,0\nm1.p,m2.x,20,7,8\n"u8.ToArray();
