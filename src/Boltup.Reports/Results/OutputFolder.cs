@@ -101,7 +101,7 @@ public sealed class OutputFolder : IDisposable
     private static string Resolve(string path)
     {
         var folder = new DirectoryInfo(Path.TrimEndingDirectorySeparator(Path.GetFullPath(path)));
-        return folder.ResolveLinkTarget(returnFinalTarget: true)?.FullName ?? folder.FullName;
+        return folder.LinkTarget is null ? folder.FullName : folder.ResolveLinkTarget(returnFinalTarget: true)!.FullName;
     }
 
     /// <summary>A new folder beside the target, or inside it where the folder above is closed.</summary>
