@@ -5,10 +5,7 @@ namespace Boltup.Reports.Diagnostics;
 /// <summary>Renders diagnostics for people: message, place, the line itself with carets, notes and cures.</summary>
 public sealed class DiagnosticText(TextWriter output, Ink ink)
 {
-    private const int TabWidth = 4;
-    private const int WidestLine = 120;
-
-    private readonly Dictionary<string, string[]?> _files = [];
+    private readonly SourceLines _lines = new();
 
     /// <summary>Writes diagnostics in full, and a closing count when there are errors or warnings.</summary>
     public void WriteAll(IReadOnlyList<Diagnostic> diagnostics)
@@ -81,52 +78,23 @@ public sealed class DiagnosticText(TextWriter output, Ink ink)
     private void WritePlace(SourceSpan span, Severity severity)
     {
         output.WriteLine($"  {ink.Frame("-->")} {span}");
-        if (span.Line > 0 && LinesOf(span.File) is { } lines && span.Line <= lines.Length)
+        if (_lines.Find(span.File, span.Line) is { } line)
         {
-            WriteExcerpt(lines[span.Line - 1], span, severity);
+            WriteExcerpt(SourceExcerpt.Of(line, span.Column, span.Length), span, severity);
         }
     }
 
-    private void WriteExcerpt(string line, SourceSpan span, Severity severity)
+    private void WriteExcerpt(SourceExcerpt excerpt, SourceSpan span, Severity severity)
     {
         string number = FormattableString.Invariant($"{span.Line}");
         string gutter = new(' ', number.Length + 1);
         string bar = ink.Frame("|");
-        int column = Math.Clamp(span.Column, 1, line.Length + 1);
-        string before = Expand(line[..(column - 1)]);
-        string marked = Expand(line.Substring(column - 1, Math.Clamp(span.Length, 0, line.Length - column + 1)));
-        string shown = before + marked + Expand(line[Math.Min(line.Length, column - 1 + span.Length)..]);
-        int cut = Math.Max(0, before.Length + Math.Min(marked.Length, 20) - WidestLine);
-        shown = shown[cut..];
-        shown = shown.Length > WidestLine ? shown[..WidestLine] + " …" : shown;
         output.WriteLine($"{gutter}{bar}");
-        output.WriteLine($"{ink.Frame(number)} {bar} {(cut > 0 ? "… " : "")}{shown}");
+        output.WriteLine($"{ink.Frame(number)} {bar} {excerpt.Text}".TrimEnd());
         if (span.Column > 0)
         {
-            int width = Math.Clamp(marked.Length, 1, Math.Max(1, WidestLine - (before.Length - cut)));
-            output.WriteLine($"{gutter}{bar} {(cut > 0 ? "  " : "")}{new string(' ', before.Length - cut)}{Coloured(severity, new string('^', width))}");
+            string carets = Coloured(severity, new string('^', excerpt.MarkWidth));
+            output.WriteLine($"{gutter}{bar} {new string(' ', excerpt.MarkAt)}{carets}");
         }
-    }
-
-    private static string Expand(string text) => text.Replace("\t", new string(' ', TabWidth), StringComparison.Ordinal);
-
-    /// <summary>A file that cannot be read again, or is no text, has no excerpt.</summary>
-    private string[]? LinesOf(string file)
-    {
-        if (!_files.TryGetValue(file, out string[]? lines))
-        {
-            try
-            {
-                lines = File.ReadAllLines(file);
-            }
-            catch (Exception exception) when (exception is IOException or UnauthorizedAccessException)
-            {
-                lines = null;
-            }
-
-            _files.Add(file, lines);
-        }
-
-        return lines;
     }
 }

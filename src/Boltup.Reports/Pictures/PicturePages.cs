@@ -28,7 +28,7 @@ public sealed class PicturePages(PredictionResult result, string provenance)
             }
         }
 
-        return pictures;
+        return PictureNames.MakeDistinct(pictures);
     }
 
     /// <summary>Level and phase of one response in one operation.</summary>

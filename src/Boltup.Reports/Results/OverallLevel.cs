@@ -5,8 +5,8 @@ using Boltup.Engine.Spectra;
 namespace Boltup.Reports.Results;
 
 /// <summary>The level of a spectrum as a whole, and its strongest line.</summary>
-/// <param name="Rms">Root of the summed powers of all lines, in the unit of the spectrum.</param>
-/// <param name="PeakHz">Frequency of the strongest line.</param>
+/// <param name="Rms">Root of the summed powers of all lines, in the unit of the spectrum; NaN when a line is missing.</param>
+/// <param name="PeakHz">Frequency of the strongest line that is not missing.</param>
 /// <param name="PeakRms">Its rms value.</param>
 /// <param name="Reference">What 0 dB is.</param>
 public sealed record OverallLevel(double Rms, double PeakHz, double PeakRms, LevelReference Reference)
@@ -27,7 +27,7 @@ public sealed record OverallLevel(double Rms, double PeakHz, double PeakRms, Lev
         {
             double size = Complex.Abs(response.Values[line]);
             power += size * size;
-            peak = size > Complex.Abs(response.Values[peak]) ? line : peak;
+            peak = size > Complex.Abs(response.Values[peak]) || double.IsNaN(Complex.Abs(response.Values[peak])) ? line : peak;
         }
 
         return new OverallLevel(
