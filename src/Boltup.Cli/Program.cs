@@ -1,4 +1,5 @@
 using System.CommandLine;
+using System.Runtime.InteropServices;
 using Boltup.Cli.Commands;
 using Boltup.Cli.Terminal;
 using Boltup.Config;
@@ -17,11 +18,11 @@ internal static class Program
             KernelWarmUp.Run();
         });
         using var cancellation = new CancellationTokenSource();
-        Console.CancelKeyPress += (_, pressed) =>
+        using PosixSignalRegistration interrupt = PosixSignalRegistration.Create(PosixSignal.SIGINT, signal =>
         {
-            pressed.Cancel = true;
+            signal.Cancel = true;
             cancellation.Cancel();
-        };
+        });
         return Run(args, new Screen(Console.Out, Console.Error), cancellation.Token);
     }
 

@@ -24,7 +24,7 @@ public class LayerTests
         ["Boltup.Files"] = [],
         ["Boltup.Config"] = ["YamlDotNet"],
         ["Boltup.Reports"] = ["ScottPlot"],
-        ["Boltup.Cli"] = ["Spectre.Console", "System.CommandLine"],
+        ["Boltup.Cli"] = ["System.CommandLine"],
     };
 
     public static TheoryData<string> Projects => [.. AllowedProjects.Keys];
