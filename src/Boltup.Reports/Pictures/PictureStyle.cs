@@ -8,6 +8,12 @@ public static class PictureStyle
     public const int SheetWidth = 1600;
     public const int SheetHeight = 900;
 
+    /// <summary>From the rim of the page to its words.</summary>
+    public const float Edge = 28;
+
+    /// <summary>Share of the width that the legend may take from the subtitle.</summary>
+    public const float LegendShare = 0.65f;
+
     public const float TitleSize = 24;
     public const float SubtitleSize = 17;
     public const float LabelSize = 16;
