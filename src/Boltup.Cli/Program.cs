@@ -2,6 +2,7 @@ using System.CommandLine;
 using Boltup.Cli.Commands;
 using Boltup.Cli.Terminal;
 using Boltup.Config;
+using Boltup.Engine.Kernels;
 
 namespace Boltup.Cli;
 
@@ -9,8 +10,12 @@ internal static class Program
 {
     private static int Main(string[] args)
     {
-        // The YAML reader takes longest to get ready; it does so while the command line is read.
-        _ = Task.Run(WarmUp.Run);
+        // The YAML reader and the kernels take longest to get ready; they do so while the command line and the headers are read.
+        _ = Task.Run(() =>
+        {
+            WarmUp.Run();
+            KernelWarmUp.Run();
+        });
         using var cancellation = new CancellationTokenSource();
         Console.CancelKeyPress += (_, pressed) =>
         {

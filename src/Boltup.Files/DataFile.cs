@@ -36,9 +36,15 @@ public sealed class DataFile : IDisposable
         {
             source = ByteSource.Open(path);
         }
-        catch (Exception exception) when (exception is IOException or UnauthorizedAccessException)
+        catch (Exception exception) when (exception is IOException or UnauthorizedAccessException or ArgumentException)
         {
             diagnostics.Error(FileCodes.CannotRead, $"`{displayPath}` cannot be read", new SourceSpan(displayPath), notes: exception.Message);
+            return null;
+        }
+        catch (NotSupportedException)
+        {
+            diagnostics.Error(
+                FileCodes.CannotRead, $"`{displayPath}` is a pipe or device", new SourceSpan(displayPath), "save the data as a file, which can be read at any place");
             return null;
         }
 

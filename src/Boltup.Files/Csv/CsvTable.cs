@@ -15,7 +15,7 @@ internal sealed class CsvTable(CsvHeader header, string displayPath, DiagnosticB
 
     private readonly Dictionary<string, CsvCurve> _byName = new(StringComparer.Ordinal);
     private readonly List<CsvCurve> _curves = [];
-    private readonly List<FrequencyAxis> _axes = [];
+    private readonly AxisPool _axes = new();
     private byte[] _lastName = [];
     private CsvCurve? _last;
     private int _errors;
@@ -74,25 +74,10 @@ internal sealed class CsvTable(CsvHeader header, string displayPath, DiagnosticB
             Excitation = second,
             ResponseQuantity = first.Direction == Direction.P ? Quantity.Pressure : Quantity.Unknown,
             ExcitationQuantity = second is null ? Quantity.Unknown : second.Direction == Direction.Q ? Quantity.VolumeVelocity : Quantity.Force,
-            Axis = AxisOf(CollectionsMarshal.AsSpan(curve.Hz)),
+            Axis = _axes.Share(CollectionsMarshal.AsSpan(curve.Hz))!, // rows were checked to increase
             Title = string.Join(" / ", curve.Names),
             Span = curve.Span,
         };
-    }
-
-    /// <summary>Equal axes become one instance, so that comparing them is cheap.</summary>
-    private FrequencyAxis AxisOf(ReadOnlySpan<double> hz)
-    {
-        foreach (FrequencyAxis known in _axes)
-        {
-            if (known.Hz.SequenceEqual(hz))
-            {
-                return known;
-            }
-        }
-
-        _axes.Add(FrequencyAxis.FromHertz(hz));
-        return _axes[^1];
     }
 
     private Dof DofOf(string name)

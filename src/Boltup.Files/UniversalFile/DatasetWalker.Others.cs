@@ -10,14 +10,19 @@ internal sealed partial class DatasetWalker
     private void ReadPoints(int dataset)
     {
         _liberties.Place = new(_displayPath, _lines.LineNumber);
-        while (_lines.TryRead(out ReadOnlySpan<byte> line) && !IsDelimiter(line))
+        while (TryReadInside(out ReadOnlySpan<byte> line))
         {
+            if (line.Trim((byte)' ').IsEmpty)
+            {
+                continue;
+            }
+
             string node = Encoding.Latin1.GetString(line);
             string coordinates = node;
             (int start, int width) = (40, 13);
             if (dataset == 2411)
             {
-                if (!_lines.TryRead(out ReadOnlySpan<byte> second) || IsDelimiter(second))
+                if (!TryReadInside(out ReadOnlySpan<byte> second))
                 {
                     return;
                 }
@@ -33,9 +38,10 @@ internal sealed partial class DatasetWalker
     private void AddPoint(string nodeLine, string coordinates, int start, int width)
     {
         if (FixedColumns.TryInteger(nodeLine, 0, 10, out int node)
-            && FixedColumns.TryReal(coordinates, start, width, out double x)
-            && FixedColumns.TryReal(coordinates, start + width, width, out double y)
-            && FixedColumns.TryReal(coordinates, start + 2 * width, width, out double z))
+            && node > 0
+            && TryCoordinate(coordinates, start, width, out double x)
+            && TryCoordinate(coordinates, start + width, width, out double y)
+            && TryCoordinate(coordinates, start + 2 * width, width, out double z))
         {
             double metres = 1 / _units.LengthFactor;
             _points.Add(new MeasuredPoint(FormattableString.Invariant($"{node}"), metres * x, metres * y, metres * z));
@@ -45,18 +51,28 @@ internal sealed partial class DatasetWalker
         LeaveOut(FileCodes.BadHeader, "a point has no readable number or place", new(_displayPath, _lines.LineNumber));
     }
 
+    /// <summary>A place is never guessed: blank is no coordinate.</summary>
+    private static bool TryCoordinate(string line, int start, int width, out double value) =>
+        FixedColumns.TryReal(line, start, width, out value) && double.IsFinite(value) && FixedColumns.Text(line, start, width).Length > 0;
+
     /// <summary>Dataset 164: code and name, then the factors for length, force and temperature (3D25.17).</summary>
     private void ReadUnits()
     {
-        var lines = new List<string>();
-        while (_lines.TryRead(out ReadOnlySpan<byte> line) && !IsDelimiter(line))
+        if (!TryReadInside(out _))
         {
-            lines.Add(Encoding.Latin1.GetString(line));
+            return;
         }
 
-        if (lines.Count >= 2
-            && FixedColumns.TryReal(lines[1], 0, 25, out double length)
-            && FixedColumns.TryReal(lines[1], 25, 25, out double force)
+        bool hasFactors = TryReadInside(out ReadOnlySpan<byte> line);
+        string factors = Encoding.Latin1.GetString(line);
+        if (hasFactors)
+        {
+            SkipDataset();
+        }
+
+        if (hasFactors
+            && FixedColumns.TryReal(factors, 0, 25, out double length)
+            && FixedColumns.TryReal(factors, 25, 25, out double force)
             && length > 0 && force > 0 && double.IsFinite(length) && double.IsFinite(force))
         {
             _units = new UnitSystem(length, force);
@@ -74,8 +90,12 @@ internal sealed partial class DatasetWalker
     /// <summary>Dataset 1858: the third field of its second line is 2 for peak and 3 for rms amplitudes (from memory).</summary>
     private void ReadQualifiers()
     {
-        _lines.TryRead(out _);
-        if (_lines.TryRead(out ReadOnlySpan<byte> line) && FixedColumns.TryInteger(Encoding.Latin1.GetString(line), 12, 6, out int amplitude))
+        if (!TryReadInside(out _) || !TryReadInside(out ReadOnlySpan<byte> line))
+        {
+            return;
+        }
+
+        if (FixedColumns.TryInteger(Encoding.Latin1.GetString(line), 12, 6, out int amplitude))
         {
             _amplitude = amplitude switch
             {

@@ -10,6 +10,12 @@ namespace Boltup.Files.UniversalFile;
 /// <summary>Walks from dataset to dataset and keeps what can be used. Text between datasets is comment.</summary>
 internal sealed partial class DatasetWalker
 {
+    /// <summary>Beyond this the file is not what it says, and more messages help nobody.</summary>
+    private const int MaximumWarnings = 50;
+
+    /// <summary>Kinds of skipped dataset that are named one by one.</summary>
+    private const int MaximumKinds = 20;
+
     private readonly ByteSource _source;
     private readonly LineReader _lines;
     private readonly string _displayPath;
@@ -22,6 +28,7 @@ internal sealed partial class DatasetWalker
     private readonly List<MeasuredPoint> _points = [];
     private NumberForms _forms;
     private bool _hasBinary;
+    private int _leftOut;
     private UnitSystem _units = UnitSystem.Si;
     private Amplitude? _amplitude;
 
@@ -54,12 +61,11 @@ internal sealed partial class DatasetWalker
             }
         }
 
-        foreach ((int number, int count) in _skipped)
+        SaySkipped();
+        if (_leftOut > MaximumWarnings)
         {
-            _diagnostics.Note(
-                FileCodes.SkippedDataset,
-                $"{count} dataset{(count == 1 ? "" : "s")} {number} {(count == 1 ? "was" : "were")} skipped",
-                new SourceSpan(_displayPath));
+            _diagnostics.Warning(
+                FileCodes.BadHeader, $"{_leftOut - MaximumWarnings} more records or points were left out", new SourceSpan(_displayPath));
         }
 
         if (BitOperations.PopCount((uint)_lines.Ends) > 1)
@@ -69,6 +75,31 @@ internal sealed partial class DatasetWalker
         }
 
         _liberties.SayAll(_diagnostics);
+    }
+
+    private void SaySkipped()
+    {
+        int named = 0;
+        foreach ((int number, int count) in _skipped)
+        {
+            if (++named > MaximumKinds)
+            {
+                break;
+            }
+
+            _diagnostics.Note(
+                FileCodes.SkippedDataset,
+                $"{count} dataset{(count == 1 ? "" : "s")} {number} {(count == 1 ? "was" : "were")} skipped",
+                new SourceSpan(_displayPath));
+        }
+
+        if (_skipped.Count > MaximumKinds)
+        {
+            _diagnostics.Note(
+                FileCodes.SkippedDataset,
+                $"datasets of {_skipped.Count - MaximumKinds} more numbers were skipped",
+                new SourceSpan(_displayPath));
+        }
     }
 
     private void ReadDataset()
@@ -119,10 +150,13 @@ internal sealed partial class DatasetWalker
 
     private void SkipDataset()
     {
-        while (_lines.TryRead(out ReadOnlySpan<byte> line) && !IsDelimiter(line))
+        while (TryReadInside(out _))
         {
         }
     }
+
+    /// <summary>Reads a line of the dataset; false at its end, with the delimiter passed.</summary>
+    private bool TryReadInside(out ReadOnlySpan<byte> line) => _lines.TryRead(out line) && !IsDelimiter(line);
 
     private void ReadFunction(string id, long offset)
     {
@@ -201,6 +235,11 @@ internal sealed partial class DatasetWalker
         return complete ? _builder.UnevenAxis(hz) : null;
     }
 
-    private void LeaveOut(DiagnosticCode code, string message, SourceSpan place, params string[] notes) =>
-        _diagnostics.Warning(code, message + "; it was left out", place, null, notes);
+    private void LeaveOut(DiagnosticCode code, string message, SourceSpan place, params string[] notes)
+    {
+        if (++_leftOut <= MaximumWarnings)
+        {
+            _diagnostics.Warning(code, message + "; it was left out", place, null, notes);
+        }
+    }
 }

@@ -13,7 +13,7 @@ internal sealed class FunctionBuilder(Liberties liberties)
     /// <summary>Smallest step relative to the last line; below, lines would merge when an axis is rounded to 12 digits.</summary>
     private const double SmallestStep = 1e-10;
 
-    private readonly List<FrequencyAxis> _axes = [];
+    private readonly AxisPool _axes = new();
     private (double First, double Step, int Count) _lastEven;
     private FrequencyAxis? _lastEvenAxis;
 
@@ -36,7 +36,7 @@ internal sealed class FunctionBuilder(Liberties liberties)
         if (_lastEvenAxis is null || _lastEven != (first, step, count))
         {
             FrequencyAxis? axis = RebuildEven(first, step, count);
-            (_lastEven, _lastEvenAxis) = ((first, step, count), axis is null ? null : Share(axis));
+            (_lastEven, _lastEvenAxis) = ((first, step, count), axis is null ? null : _axes.Share(axis.Hz));
         }
 
         return _lastEvenAxis;
@@ -50,7 +50,7 @@ internal sealed class FunctionBuilder(Liberties liberties)
         return isAxis ? FrequencyAxis.Even(first, count == 1 ? 0 : step, count) : null;
     }
 
-    public FrequencyAxis? UnevenAxis(double[] hz) => FrequencyAxis.TryFromHertz(hz, out FrequencyAxis? axis) ? Share(axis!) : null;
+    public FrequencyAxis? UnevenAxis(double[] hz) => _axes.Share(hz);
 
     public (Curve Curve, FunctionRecord Record) Build(
         FunctionHeader header, DataLayout layout, FrequencyAxis axis, UnitSystem units, Amplitude? amplitude, int index, SourceSpan place)
@@ -63,12 +63,12 @@ internal sealed class FunctionBuilder(Liberties liberties)
         bool isRatio = kind is FunctionKind.Coherence;
         bool isReal = isRatio || kind is FunctionKind.AutoSpectrum or FunctionKind.PowerSpectralDensity;
         SayStorage(header, kind, isReal);
-        double factor = FactorOf(
+        double factor = isRatio ? 1 : FactorOf(
             kind,
             responseSign * referenceSign,
             ToSi(header.Numerator, numerator, response?.Direction, units),
             ToSi(header.Denominator, denominator, reference?.Direction, units),
-            header.Numerator.HasExponents);
+            units != UnitSystem.Si && UnitSystem.AreOfPower(header.Numerator, numerator, response?.Direction));
         var curve = new Curve
         {
             Index = index,
@@ -87,10 +87,9 @@ internal sealed class FunctionBuilder(Liberties liberties)
         return (curve, new FunctionRecord(layout, factor, KeepsImaginary: !isReal));
     }
 
-    /// <summary>Power goes with the square of its quantity, and has no sign; exponents of the file are those of the power already.</summary>
+    /// <summary>Power goes with the square of its quantity, and has no sign; the exponents of the file may be those of the power already.</summary>
     private static double FactorOf(FunctionKind kind, double sign, double numerator, double denominator, bool isPowerFactor) => kind switch
     {
-        FunctionKind.Coherence => 1,
         FunctionKind.AutoSpectrum or FunctionKind.PowerSpectralDensity => isPowerFactor ? numerator : numerator * numerator,
         FunctionKind.CrossSpectrum => sign * numerator * denominator,
         _ => sign * numerator / denominator,
@@ -177,19 +176,5 @@ internal sealed class FunctionBuilder(Liberties liberties)
         }
 
         return null;
-    }
-
-    private FrequencyAxis Share(FrequencyAxis axis)
-    {
-        foreach (FrequencyAxis known in _axes)
-        {
-            if (known.Hz.SequenceEqual(axis.Hz))
-            {
-                return known;
-            }
-        }
-
-        _axes.Add(axis);
-        return axis;
     }
 }

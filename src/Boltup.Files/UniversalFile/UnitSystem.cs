@@ -14,17 +14,24 @@ internal sealed record UnitSystem(double LengthFactor, double ForceFactor)
     /// <param name="field">The axis, whose exponents count where it has any.</param>
     public double ToSi(AxisField field, Quantity quantity, Direction? direction)
     {
-        bool rotates = direction is >= Direction.RX and <= Direction.RZ;
-        (int length, int force) = (field.LengthExponent, field.ForceExponent) != (0, 0)
-            ? (field.LengthExponent, field.ForceExponent)
-            : quantity switch
-            {
-                Quantity.Displacement or Quantity.Velocity or Quantity.Acceleration => (rotates ? 0 : 1, 0),
-                Quantity.Force => (rotates ? 1 : 0, 1),
-                Quantity.Pressure => (-2, 1),
-                Quantity.VolumeVelocity => (3, 0),
-                _ => (0, 0),
-            };
+        (int length, int force) = field.HasExponents ? (field.LengthExponent, field.ForceExponent) : ExponentsOf(quantity, direction);
         return 1 / (Math.Pow(LengthFactor, length) * Math.Pow(ForceFactor, force));
+    }
+
+    /// <summary>Whether the exponents of a power's axis differ from those of its quantity, and so must be those of the power.</summary>
+    public static bool AreOfPower(AxisField field, Quantity quantity, Direction? direction) =>
+        field.HasExponents && (field.LengthExponent, field.ForceExponent) != ExponentsOf(quantity, direction);
+
+    private static (int Length, int Force) ExponentsOf(Quantity quantity, Direction? direction)
+    {
+        bool rotates = direction is >= Direction.RX and <= Direction.RZ;
+        return quantity switch
+        {
+            Quantity.Displacement or Quantity.Velocity or Quantity.Acceleration => (rotates ? 0 : 1, 0),
+            Quantity.Force => (rotates ? 1 : 0, 1),
+            Quantity.Pressure => (-2, 1),
+            Quantity.VolumeVelocity => (3, 0),
+            _ => (0, 0),
+        };
     }
 }

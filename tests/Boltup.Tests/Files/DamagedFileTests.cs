@@ -1,3 +1,4 @@
+using System.IO.Pipes;
 using System.Numerics;
 using System.Text;
 using Boltup.Engine.Diagnostics;
@@ -88,6 +89,34 @@ public class DamagedFileTests
     }
 
     [Theory]
+    [InlineData("x")]
+    [InlineData("")]
+    public void Read_PointsOfSenselessLines_GiveNoPointsAndFewWarnings(string line)
+    {
+        ReadFile read = ReadFile.Of(DatasetOf("    15", line));
+        Assert.Single(read.Curves);
+        Assert.Empty(read.Points);
+        Assert.InRange(read.Diagnostics.Count, 0, 51);
+    }
+
+    [Fact]
+    public void Read_UnitsOfManyLines_AreNotKept() => Assert.Single(ReadBounded(DatasetOf("   164", new string('y', 64))).Curves);
+
+    [Fact]
+    public void Read_ManyKindsOfUnknownDatasets_NamesSome()
+    {
+        var text = new StringBuilder();
+        for (int number = 3000; number < 5000; number++)
+        {
+            text.Append("    -1\n  ").Append(number).Append("\n    -1\n");
+        }
+
+        ReadFile read = ReadFile.Of(text.Append(Encoding.Latin1.GetString(Bytes("plain"))).ToString());
+        Assert.Equal(21, read.Diagnostics.Count);
+        read.HasNote("1980 more numbers");
+    }
+
+    [Theory]
     [InlineData("         6 999999999         1  2.00000E+01  5.00000E+00  0.00000E+00")]
     [InlineData("         6         4         1  1.00000E+09  1.00000E-07  0.00000E+00")]
     [InlineData("         6         4         1  2.00000E+01  1.0000E+308  0.00000E+00")]
@@ -124,6 +153,24 @@ public class DamagedFileTests
     [Fact]
     public void Open_Folder_IsADiagnostic() => Assert.Equal(FileCodes.CannotRead, Assert.Single(ReadFile.At(Path.GetTempPath()).Diagnostics).Code);
 
+    [Theory]
+    [InlineData("")]
+    [InlineData("a\0b")]
+    public void Open_PathThatCannotBe_IsADiagnostic(string path) => Assert.Equal(FileCodes.CannotRead, Assert.Single(ReadFile.At(path).Diagnostics).Code);
+
+    [Fact]
+    public void Open_Pipe_IsADiagnostic()
+    {
+        using var pipe = new AnonymousPipeServerStream(PipeDirection.Out);
+        string path = $"/dev/fd/{pipe.GetClientHandleAsString()}";
+        if (File.Exists(path))
+        {
+            Diagnostic error = Assert.Single(ReadFile.At(path).Diagnostics);
+            Assert.Equal(FileCodes.CannotRead, error.Code);
+            Assert.Contains("pipe", error.Message, StringComparison.Ordinal);
+        }
+    }
+
     [Fact]
     public void Open_UnknownFormat_NamesTheKnownOnes()
     {
@@ -153,6 +200,13 @@ public class DamagedFileTests
     }
 
     private static byte[] Bytes(string name) => File.ReadAllBytes(Repository.Data("files", "dialects", name + ".uff"));
+
+    /// <summary>A dataset of many equal lines, and a function behind it.</summary>
+    private static byte[] DatasetOf(string number, string line)
+    {
+        string lines = string.Concat(Enumerable.Repeat(line + "\n", 100_000));
+        return Encoding.Latin1.GetBytes($"    -1\n{number}\n{lines}    -1\n{Encoding.Latin1.GetString(Bytes("plain"))}");
+    }
 
     private static ReadFile ReadBounded(ReadOnlySpan<byte> bytes)
     {

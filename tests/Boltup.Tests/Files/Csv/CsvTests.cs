@@ -66,6 +66,22 @@ public class CsvTests
     }
 
     [Fact]
+    public void Read_ManyDifferentAxes_TakesWorkInProportion()
+    {
+        const int curves = 100_000; // comparing each axis with each would take minutes
+        var text = new System.Text.StringBuilder("dof,frequency_hz,real,imag\n");
+        for (int i = 0; i < curves; i++)
+        {
+            text.Append(CultureInfo.InvariantCulture, $"p{i}.x,{i % (curves - 1)},1,2\n");
+        }
+
+        ReadFile read = ReadFile.Of(text.ToString());
+        Assert.Equal(curves, read.Curves.Count);
+        Assert.Same(read.Curves[0].Axis, read.Curves[^1].Axis);
+        Assert.Equal(1, read.Curves[1].Axis.FirstHz);
+    }
+
+    [Fact]
     public void Read_MountTable_HasDirectionsWithoutPoint()
     {
         ReadFile read = ReadFile.Of("\uFEFFdirection,frequency_hz,real,imag\r\nz,10,2e5,3e4\r\n"u8);

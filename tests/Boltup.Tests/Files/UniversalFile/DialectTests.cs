@@ -163,6 +163,40 @@ public class DialectTests
     public void Read_AutoSpectrumInG_IsConvertedBySquare() =>
         Assert.Equal(1.5 * 9.80665 * 9.80665, Dialect("unit_g_auto_spectrum")[0][0].Real, 1e-12);
 
+    [Theory]
+    [InlineData("millimetres_auto_spectrum")]
+    [InlineData("millimetres_auto_spectrum_exponents")]
+    [InlineData("millimetres_auto_spectrum_power_exponents")]
+    public void Read_AutoSpectrumInMillimetres_IsConvertedBySquare(string name) => Assert.Equal(1.5e-6, Dialect(name)[0][0].Real, 1e-18);
+
+    [Fact]
+    public void Read_CoherenceInG_IsNotConverted()
+    {
+        string text = File.ReadAllText(Repository.Data("files", "dialects", "unit_g_auto_spectrum.uff"));
+        ReadFile read = ReadFile.Of(text.Replace("    2         0    1", "    6         0    1", StringComparison.Ordinal));
+        Assert.Equal(FunctionKind.Coherence, read.Curves[0].Kind);
+        Assert.Equal(1.5, read[0][0].Real);
+        Assert.Empty(read.Diagnostics);
+    }
+
+    [Fact]
+    public void Read_BlankLinesAndPlacesInPoints_AreNoPoints()
+    {
+        ReadFile read = Dialect("blank_lines_in_points");
+        Assert.Equal([new MeasuredPoint("101", 0.092, -0.061, 0)], read.Points);
+        Diagnostic refusal = Assert.Single(read.Diagnostics);
+        Assert.Equal((Severity.Warning, FileCodes.BadHeader, 7), (refusal.Severity, refusal.Code, refusal.Span!.Line));
+        AssertPlain(read);
+    }
+
+    [Fact]
+    public void Read_QualifierThatEndsEarly_TakesNoFunctionAway()
+    {
+        ReadFile read = Dialect("short_qualifier");
+        AssertPlain(read);
+        Assert.Null(read.Curves[0].Amplitude);
+    }
+
     [Fact]
     public void Read_UnitsOfMillimetres_GovernPointsAndValues()
     {
