@@ -1,5 +1,6 @@
 using System.Globalization;
 using System.Numerics;
+using System.Text;
 using Boltup.Engine.Prediction;
 using Boltup.Engine.Spectra;
 using Boltup.Reports.Results;
@@ -10,6 +11,8 @@ namespace Boltup.Reports.Pictures;
 /// <param name="provenance">Closes every caption: program version and fingerprint of the inputs.</param>
 public sealed class PicturePages(PredictionResult result, string provenance)
 {
+    private const int LongestName = 200;
+
     /// <summary>The overview sheet, then a page per response and one for the joints of each operation.</summary>
     public IReadOnlyList<Picture> All()
     {
@@ -28,7 +31,7 @@ public sealed class PicturePages(PredictionResult result, string provenance)
             }
         }
 
-        return pictures;
+        return WithDistinctNames(pictures);
     }
 
     /// <summary>Level and phase of one response in one operation.</summary>
@@ -40,14 +43,10 @@ public sealed class PicturePages(PredictionResult result, string provenance)
         double[] hz = operation.Axis.Hz.ToArray();
         double[] level = Level(response.Values, operation.Amplitude, overall.Reference);
         double[] phase = Phase(response.Values);
-        string subtitle = string.Create(
-            CultureInfo.InvariantCulture, $"{operation.Name} · overall {overall.Decibels:F1} dB re {overall.Reference.Text} · {response.Dof}");
+        string subtitle = $"{operation.Name} · overall {overall.Text} re {overall.Reference.Text} · {response.Dof}";
         var levels = new Panel("", FrequencyAxisOf(operation.Axis, ""), LevelAxis([level], overall.Reference, 8), [new Series("", hz, level, colour)], (0, 0, 1, 0.7))
         {
-            Marker = new Marker(
-                overall.PeakHz,
-                overall.PeakDecibels,
-                string.Create(CultureInfo.InvariantCulture, $"{overall.PeakDecibels:F1} dB at {overall.PeakHz:G5} Hz")),
+            Marker = double.IsFinite(overall.PeakDecibels) ? StrongestLine(overall) : null,
         };
         var phases = new Panel("", FrequencyAxisOf(operation.Axis, "Frequency in Hz"), PhaseAxis, [new Series("", hz, phase, colour, Thin: true)], (0, 0.7, 1, 0.3));
         return Page($"{FileNames.FromName(operation.Name)}-{FileNames.FromName(response.Name)}", response.Name, subtitle, [levels, phases]);
@@ -84,8 +83,42 @@ public sealed class PicturePages(PredictionResult result, string provenance)
             [panel]);
     }
 
+    private static Marker StrongestLine(OverallLevel level) => new(
+        level.PeakHz,
+        level.PeakDecibels,
+        string.Create(CultureInfo.InvariantCulture, $"{level.PeakDecibels:F1} dB at {level.PeakHz:G5} Hz"));
+
     private static PictureAxis PhaseAxis => new(
         "Phase in °", -190, 190, false, [new(-180, "−180"), new(-90, ""), new(0, "0"), new(90, ""), new(180, "180")]);
+
+    /// <summary>Two names may become one file name, and a file system bounds its length: the first keeps the name, the next get a number.</summary>
+    private static Picture[] WithDistinctNames(IEnumerable<Picture> pictures)
+    {
+        var taken = new HashSet<string>();
+        return [.. pictures.Select(picture => picture with { Name = Distinct(Shorten(picture.Name), taken) })];
+    }
+
+    private static string Distinct(string name, HashSet<string> taken)
+    {
+        string candidate = name;
+        for (int number = 2; !taken.Add(candidate); number++)
+        {
+            candidate = string.Create(CultureInfo.InvariantCulture, $"{name}-{number}");
+        }
+
+        return candidate;
+    }
+
+    /// <summary>File systems allow 255 bytes; ending and number need some, and a letter may take four.</summary>
+    private static string Shorten(string name)
+    {
+        while (Encoding.UTF8.GetByteCount(name) > LongestName)
+        {
+            name = name[..^(char.IsLowSurrogate(name[^1]) ? 2 : 1)];
+        }
+
+        return name;
+    }
 
     private Picture Page(string name, string title, string subtitle, IReadOnlyList<Panel> panels) =>
         new(name, title, subtitle, $"{result.Title} · {provenance}", PictureStyle.PageWidth, PictureStyle.PageHeight, panels);
@@ -101,9 +134,9 @@ public sealed class PicturePages(PredictionResult result, string provenance)
             Level(operation.Responses[index].Values, operation.Amplitude, reference),
             PictureStyle.LineAt(several ? i : index)))];
         string levels = string.Join(" / ", result.Operations.Select(operation => OverallLevel
-            .Of(operation.Responses[index], operation.Axis, operation.Amplitude).Decibels.ToString("F1", CultureInfo.InvariantCulture)));
+            .Of(operation.Responses[index], operation.Axis, operation.Amplitude).Text));
         return new Panel(
-            $"{first.Name} · {levels} dB",
+            $"{first.Name} · {levels}",
             FrequencyAxisOf(result.Axis, "Frequency in Hz"),
             LevelAxis(series.Select(line => line.Y), reference, 6),
             series,
@@ -132,8 +165,8 @@ public sealed class PicturePages(PredictionResult result, string provenance)
 
     private static double[] Phase(IReadOnlyList<Complex> values)
     {
-        // A jump from −180° to 180° is no line: the gap hides it.
-        double[] phase = [.. values.Select(value => value.Phase * 180 / Math.PI)];
+        // A jump from −180° to 180° is no line: the gap hides it. Zero has no phase.
+        double[] phase = [.. values.Select(value => value == Complex.Zero ? double.NaN : value.Phase * 180 / Math.PI)];
         double[] shown = [.. phase];
         for (int i = 1; i < phase.Length; i++)
         {
