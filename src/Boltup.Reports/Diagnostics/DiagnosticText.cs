@@ -7,6 +7,7 @@ public sealed class DiagnosticText(TextWriter output, Ink ink)
 {
     private const int TabWidth = 4;
     private const int WidestLine = 120;
+    private const int LargestFile = 8 << 20;
 
     private readonly Dictionary<string, string[]?> _files = [];
 
@@ -28,7 +29,7 @@ public sealed class DiagnosticText(TextWriter output, Ink ink)
     public void Write(Diagnostic diagnostic)
     {
         string head = $"{WordOf(diagnostic.Severity)}[{diagnostic.Code}]";
-        output.WriteLine($"{Coloured(diagnostic.Severity, head)}: {ink.Strong(diagnostic.Message)}");
+        output.WriteLine($"{Coloured(diagnostic.Severity, head)}: {ink.Strong(Harmless(diagnostic.Message))}");
         if (diagnostic.Span is { } span)
         {
             WritePlace(span, diagnostic.Severity);
@@ -36,12 +37,12 @@ public sealed class DiagnosticText(TextWriter output, Ink ink)
 
         foreach (string note in diagnostic.Notes)
         {
-            output.WriteLine($"{ink.Note("note")}: {note}");
+            output.WriteLine($"{ink.Note("note")}: {Harmless(note)}");
         }
 
         foreach (string help in diagnostic.Helps)
         {
-            output.WriteLine($"{ink.Help("help")}: {help}");
+            output.WriteLine($"{ink.Help("help")}: {Harmless(help)}");
         }
 
         output.WriteLine();
@@ -50,8 +51,8 @@ public sealed class DiagnosticText(TextWriter output, Ink ink)
     /// <summary><c>file:line:column: error[CODE]: message</c>, for editors and search.</summary>
     public static string OneLine(Diagnostic diagnostic)
     {
-        string place = diagnostic.Span is { } span ? $"{span}: " : "";
-        return $"{place}{WordOf(diagnostic.Severity)}[{diagnostic.Code}]: {diagnostic.Message}";
+        string place = diagnostic.Span is { } span ? $"{Harmless(span.ToString())}: " : "";
+        return $"{place}{WordOf(diagnostic.Severity)}[{diagnostic.Code}]: {Harmless(diagnostic.Message)}";
     }
 
     /// <summary>Such as <c>2 errors, 1 warning</c>; null when there are neither.</summary>
@@ -80,7 +81,7 @@ public sealed class DiagnosticText(TextWriter output, Ink ink)
 
     private void WritePlace(SourceSpan span, Severity severity)
     {
-        output.WriteLine($"  {ink.Frame("-->")} {span}");
+        output.WriteLine($"  {ink.Frame("-->")} {Harmless(span.ToString())}");
         if (span.Line > 0 && LinesOf(span.File) is { } lines && span.Line <= lines.Length)
         {
             WriteExcerpt(lines[span.Line - 1], span, severity);
@@ -108,16 +109,20 @@ public sealed class DiagnosticText(TextWriter output, Ink ink)
         }
     }
 
-    private static string Expand(string text) => text.Replace("\t", new string(' ', TabWidth), StringComparison.Ordinal);
+    private static string Expand(string text) => Harmless(text.Replace("\t", new string(' ', TabWidth), StringComparison.Ordinal));
 
-    /// <summary>A file that cannot be read again, or is no text, has no excerpt.</summary>
+    /// <summary>A file must not steer the terminal: control characters are shown as a replacement character.</summary>
+    private static string Harmless(string text) =>
+        text.Any(char.IsControl) ? string.Concat(text.Select(c => char.IsControl(c) ? '\ufffd' : c)) : text;
+
+    /// <summary>A file that cannot be read again, or would take long to read, has no excerpt.</summary>
     private string[]? LinesOf(string file)
     {
         if (!_files.TryGetValue(file, out string[]? lines))
         {
             try
             {
-                lines = File.ReadAllLines(file);
+                lines = new FileInfo(file).Length <= LargestFile ? File.ReadAllLines(file) : null;
             }
             catch (Exception exception) when (exception is IOException or UnauthorizedAccessException)
             {

@@ -24,19 +24,19 @@ public static class PictureStyle
     public static readonly Rgb FineGrid = new(0xF1, 0xF3, 0xF5);
 
     /// <summary>
-    /// Line colours in the order of use. Neighbours differ in hue and in lightness, so that they stay apart for colour-blind readers and in
-    /// grey print; each has a contrast of at least 3:1 with paper.
+    /// Line colours in the order of use. Any two stay apart for readers who lack red or green cones, neighbours differ in lightness
+    /// for grey print, and each has a contrast of at least 3:1 with paper.
     /// </summary>
     public static IReadOnlyList<Rgb> Lines { get; } =
     [
         new(0x12, 0x3F, 0x8C),
         new(0xD9, 0x5F, 0x0E),
         new(0x00, 0x6D, 0x55),
-        new(0xC2, 0x4C, 0x9B),
+        new(0xB8, 0x45, 0x8F),
         new(0x1E, 0x8F, 0xC4),
-        new(0x6E, 0x14, 0x23),
-        new(0x8C, 0x82, 0x00),
-        new(0x3A, 0x3A, 0x3A),
+        new(0x6E, 0x14, 0x00),
+        new(0x82, 0x73, 0xF5),
+        new(0x14, 0x32, 0x4F),
     ];
 
     /// <summary>The colour of the series at a place; more series than colours begin again.</summary>
