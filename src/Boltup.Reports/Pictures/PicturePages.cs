@@ -40,7 +40,7 @@ public sealed class PicturePages(PredictionResult result, string provenance)
         double[] hz = operation.Axis.Hz.ToArray();
         double[] level = Level(response.Values, operation.Amplitude, overall.Reference);
         double[] phase = Phase(response.Values);
-        string subtitle = $"{operation.Name} · overall {Words(overall.Decibels)} dB re {overall.Reference.Text} · {response.Dof}";
+        string subtitle = $"{operation.Name} · overall {overall.Text} re {overall.Reference.Text} · {response.Dof}";
         var levels = new Panel("", FrequencyAxisOf(operation.Axis, ""), LevelAxis([level], overall.Reference, 8), [new Series("", hz, level, colour)], (0, 0, 1, 0.7))
         {
             Marker = MarkerOf(overall),
@@ -101,9 +101,9 @@ public sealed class PicturePages(PredictionResult result, string provenance)
             Level(operation.Responses[index].Values, operation.Amplitude, reference),
             PictureStyle.LineAt(AreSeveral ? i : index)))];
         string levels = string.Join(" / ", result.Operations.Select(operation => OverallLevel
-            .Of(operation.Responses[index], operation.Axis, operation.Amplitude).Decibels).Select(Words));
+            .Of(operation.Responses[index], operation.Axis, operation.Amplitude).Text));
         return new Panel(
-            $"{first.Name} · {levels} dB",
+            $"{first.Name} · {levels}",
             FrequencyAxisOf(result.Axis, "Frequency in Hz"),
             LevelAxis(series.Select(line => line.Y), reference, 6),
             series,
@@ -123,12 +123,8 @@ public sealed class PicturePages(PredictionResult result, string provenance)
     private static double LowestHz(FrequencyAxis axis) => axis.FirstHz > 0 ? axis.FirstHz : axis.Count > 1 ? axis[1] : 1;
 
     private static Marker? MarkerOf(OverallLevel level) => double.IsFinite(level.PeakDecibels) && level.PeakHz > 0
-        ? new Marker(level.PeakHz, level.PeakDecibels, string.Create(CultureInfo.InvariantCulture, $"{Words(level.PeakDecibels)} dB at {level.PeakHz:G5} Hz"))
+        ? new Marker(level.PeakHz, level.PeakDecibels, string.Create(CultureInfo.InvariantCulture, $"{level.PeakDecibels:F1} dB at {level.PeakHz:G5} Hz"))
         : null;
-
-    /// <summary>A level to a tenth; a dash where there is none.</summary>
-    private static string Words(double decibels) =>
-        double.IsFinite(decibels) ? decibels.ToString("F1", CultureInfo.InvariantCulture).Replace('-', '−') : "–";
 
     private static PictureAxis LevelAxis(IEnumerable<IReadOnlyList<double>> lines, LevelReference reference, int ticks)
     {
@@ -144,8 +140,8 @@ public sealed class PicturePages(PredictionResult result, string provenance)
 
     private static double[] Phase(IReadOnlyList<Complex> values)
     {
-        // A jump from −180° to 180° is no line: the gap hides it.
-        double[] phase = [.. values.Select(value => value.Phase * 180 / Math.PI)];
+        // A jump from −180° to 180° is no line: the gap hides it. Zero has no phase.
+        double[] phase = [.. values.Select(value => value == Complex.Zero ? double.NaN : value.Phase * 180 / Math.PI)];
         double[] shown = [.. phase];
         for (int i = 1; i < phase.Length; i++)
         {

@@ -79,19 +79,8 @@ public class PicturePagesTests
         Assert.All(sheet.Panels, panel => Assert.Equal(["idle", "full"], panel.Series.Select(series => series.Name)));
         Assert.Equal(["idle", "full"], sheet.Legend.Select(entry => entry.Name));
         Assert.Equal(sheet.Panels[1].Series.Select(series => series.Colour), sheet.Legend.Select(entry => entry.Colour));
-        Assert.Equal("ear, left · 108.0 / 108.0 dB", sheet.Panels[0].Title);
+        Assert.Equal("ear, left · 108.0 dB / 108.0 dB", sheet.Panels[0].Title);
         Assert.Equal("provenance", sheet.Caption);
-    }
-
-    [Fact]
-    public void Response_Silence_HasNoLevelAndNoMarker()
-    {
-        OperationResult silent = TinyResult.Operation("idle", Amplitude.Rms, TinyResult.Ear with { Values = [0, 0, 0] });
-        Picture page = Pages(silent).Response(silent, 0);
-
-        Assert.Equal("idle · overall – dB re 20 µPa · cabin.ear.p", page.Subtitle);
-        Assert.Null(page.Panels[0].Marker);
-        Assert.NotEmpty(PictureDrawer.DrawPng(page));
     }
 
     [Fact]
