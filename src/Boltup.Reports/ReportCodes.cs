@@ -18,11 +18,4 @@ public static class ReportCodes
         "The output folder holds a file of the same name as a result, which no earlier run wrote. It is not overwritten.",
         "boltup predict minibus.assembly.yaml -o configs",
         "Choose another output folder with `-o`, or move the file away.");
-
-    public static readonly DiagnosticCode LeftBehind = new(
-        "OUT003",
-        "files of yours were not carried over",
-        "Results replace an output folder as a whole, and other files in it move along. The system refused to move some of them. Nothing is lost: they lie in the folder that is named.",
-        "a file in the output folder that another program holds open",
-        "Move the files back by hand, and keep your own files apart from results.");
 }

@@ -25,7 +25,7 @@ public sealed class DiagnosticText(TextWriter output, Ink ink)
     public void Write(Diagnostic diagnostic)
     {
         string head = $"{WordOf(diagnostic.Severity)}[{diagnostic.Code}]";
-        output.WriteLine($"{Coloured(diagnostic.Severity, head)}: {ink.Strong(diagnostic.Message)}");
+        output.WriteLine($"{Coloured(diagnostic.Severity, head)}: {ink.Strong(Harmless(diagnostic.Message))}");
         if (diagnostic.Span is { } span)
         {
             WritePlace(span, diagnostic.Severity);
@@ -33,12 +33,12 @@ public sealed class DiagnosticText(TextWriter output, Ink ink)
 
         foreach (string note in diagnostic.Notes)
         {
-            output.WriteLine($"{ink.Note("note")}: {note}");
+            output.WriteLine($"{ink.Note("note")}: {Harmless(note)}");
         }
 
         foreach (string help in diagnostic.Helps)
         {
-            output.WriteLine($"{ink.Help("help")}: {help}");
+            output.WriteLine($"{ink.Help("help")}: {Harmless(help)}");
         }
 
         output.WriteLine();
@@ -47,8 +47,8 @@ public sealed class DiagnosticText(TextWriter output, Ink ink)
     /// <summary><c>file:line:column: error[CODE]: message</c>, for editors and search.</summary>
     public static string OneLine(Diagnostic diagnostic)
     {
-        string place = diagnostic.Span is { } span ? $"{span}: " : "";
-        return $"{place}{WordOf(diagnostic.Severity)}[{diagnostic.Code}]: {diagnostic.Message}";
+        string place = diagnostic.Span is { } span ? $"{Harmless(span.ToString())}: " : "";
+        return $"{place}{WordOf(diagnostic.Severity)}[{diagnostic.Code}]: {Harmless(diagnostic.Message)}";
     }
 
     /// <summary>Such as <c>2 errors, 1 warning</c>; null when there are neither.</summary>
@@ -68,6 +68,10 @@ public sealed class DiagnosticText(TextWriter output, Ink ink)
         _ => "note",
     };
 
+    /// <summary>A file must not steer the terminal: control characters are shown as a replacement character.</summary>
+    internal static string Harmless(string text) =>
+        text.Any(char.IsControl) ? string.Concat(text.Select(c => char.IsControl(c) ? '\ufffd' : c)) : text;
+
     private string Coloured(Severity severity, string text) => severity switch
     {
         Severity.Error => ink.Error(text),
@@ -77,7 +81,7 @@ public sealed class DiagnosticText(TextWriter output, Ink ink)
 
     private void WritePlace(SourceSpan span, Severity severity)
     {
-        output.WriteLine($"  {ink.Frame("-->")} {span}");
+        output.WriteLine($"  {ink.Frame("-->")} {Harmless(span.ToString())}");
         if (_lines.Find(span.File, span.Line) is { } line)
         {
             WriteExcerpt(SourceExcerpt.Of(line, span.Column, span.Length), span, severity);

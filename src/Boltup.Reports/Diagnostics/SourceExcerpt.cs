@@ -1,7 +1,7 @@
 namespace Boltup.Reports.Diagnostics;
 
 /// <summary>The part of a source line that fits a terminal, and where its marked text stands in it.</summary>
-/// <param name="Text">What to show: tabs as blanks, other control characters as dots.</param>
+/// <param name="Text">What to show: tabs as blanks, other control characters as replacement characters.</param>
 /// <param name="MarkAt">Blanks before the first caret.</param>
 /// <param name="MarkWidth">Number of carets, at least 1.</param>
 internal readonly record struct SourceExcerpt(string Text, int MarkAt, int MarkWidth)
@@ -32,7 +32,5 @@ internal readonly record struct SourceExcerpt(string Text, int MarkAt, int MarkW
             Math.Clamp(marked.Length, 1, Math.Max(1, WidestText - markAt)));
     }
 
-    /// <summary>An escape byte of a damaged file must not reach the terminal.</summary>
-    private static string Shown(string text) =>
-        string.Concat(text.Select(c => c == '\t' ? Tab : char.IsControl(c) ? "·" : c.ToString()));
+    private static string Shown(string text) => DiagnosticText.Harmless(text.Replace("\t", Tab, StringComparison.Ordinal));
 }

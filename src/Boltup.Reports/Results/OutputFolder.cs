@@ -3,25 +3,24 @@ using Boltup.Engine.Diagnostics;
 namespace Boltup.Reports.Results;
 
 /// <summary>
-/// Replaces the results in a folder as a whole: everything is written beside it first, then both folders change places. A run that fails
-/// or is killed leaves the earlier results as they were. Files that Boltup did not write are carried over.
+/// Replaces the results in a folder as a whole: everything is written elsewhere first. A folder that holds nothing but results changes places
+/// with the new one in one step, so that a run that fails or is killed leaves the earlier results as they were. Beside files that Boltup did
+/// not write, results are replaced file by file, and put back after a failure; those files are never moved or deleted.
 /// </summary>
-/// <remarks>A folder that cannot be renamed, a mount point or the working folder, has its files replaced one after the other.</remarks>
 public sealed class OutputFolder : IDisposable
 {
-    private readonly string _shownPath;
-    private readonly string _target;
-    private readonly string _staging;
-    private readonly SortedSet<string> _written = new(StringComparer.Ordinal);
-    private readonly Lock _lock = new();
-    private Exception? _failure;
-    private bool _isDone;
+    /// <summary>Lists, inside the folder, the files that are ours.</summary>
+    public const string Manifest = FolderManifest.FileName;
 
-    private OutputFolder(string shownPath, string target, string staging)
+    private readonly string _target;
+    private readonly StagingFolder _staging;
+    private Exception? _failure;
+
+    private OutputFolder(string target)
     {
-        _shownPath = shownPath;
         _target = target;
-        _staging = staging;
+        StagingFolder.SweepLeftovers(target);
+        _staging = StagingFolder.For(target);
     }
 
     /// <summary>Prepares to replace a folder.</summary>
@@ -30,38 +29,27 @@ public sealed class OutputFolder : IDisposable
     {
         try
         {
-            string target = Resolve(path);
-            return new OutputFolder(path, target, CreateStaging(target));
+            var named = new DirectoryInfo(Path.TrimEndingDirectorySeparator(Path.GetFullPath(path)));
+            FileSystemInfo target = named.LinkTarget is null ? named : named.ResolveLinkTarget(returnFinalTarget: true)!;
+            return new OutputFolder(target.FullName);
         }
-        catch (Exception exception) when (IsRefusal(exception))
+        catch (Exception exception) when (exception is IOException or UnauthorizedAccessException)
         {
             SayCannotWrite(path, exception, diagnostics);
             return null;
         }
     }
 
-    /// <summary>Writes one file; may be called from several threads. A refusal of the system is kept for <see cref="Commit"/>.</summary>
+    /// <summary>Writes one file; may be called from several threads. A failure shows at <see cref="Commit"/>.</summary>
     public void Write(string name, Action<Stream> write)
     {
-        lock (_lock)
-        {
-            if (!_written.Add(name))
-            {
-                throw new ArgumentException($"`{name}` is written twice", nameof(name));
-            }
-        }
-
         try
         {
-            using FileStream stream = File.Create(Path.Combine(_staging, name));
-            write(stream);
+            _staging.Write(name, write);
         }
-        catch (Exception exception) when (IsRefusal(exception))
+        catch (Exception exception) when (exception is IOException or UnauthorizedAccessException)
         {
-            lock (_lock)
-            {
-                _failure ??= exception;
-            }
+            Interlocked.CompareExchange(ref _failure, exception, null);
         }
     }
 
@@ -69,65 +57,35 @@ public sealed class OutputFolder : IDisposable
     /// <returns>Names of the files written, sorted; null after an error in <paramref name="diagnostics"/>.</returns>
     public IReadOnlyList<string>? Commit(DiagnosticBag diagnostics)
     {
+        if (_failure is { } failure)
+        {
+            SayCannotWrite(_target, failure, diagnostics);
+            return null;
+        }
+
         try
         {
-            if (_failure is not null)
+            string[] names = _staging.Seal();
+            string[] foreign = Directory.Exists(_target) ? FolderManifest.ForeignEntriesIn(_target) : [];
+            string[] inTheWay = [.. foreign.Intersect(names)];
+            if (inTheWay.Length > 0)
             {
-                SayCannotWrite(_shownPath, _failure, diagnostics);
+                SayForeign(inTheWay, diagnostics);
                 return null;
             }
 
-            return IsInTheWay(diagnostics) ? null : Replace(diagnostics);
+            PutInPlace(names, foreign);
+            return names;
         }
-        catch (Exception exception) when (IsRefusal(exception))
+        catch (Exception exception) when (exception is IOException or UnauthorizedAccessException)
         {
-            SayCannotWrite(_shownPath, exception, diagnostics);
+            SayCannotWrite(_target, exception, diagnostics);
             return null;
         }
     }
 
     /// <summary>Removes what an unfinished run has written.</summary>
-    public void Dispose()
-    {
-        if (!_isDone && Directory.Exists(_staging))
-        {
-            ResultManifest.Delete(_staging, [.. _written, ResultManifest.FileName]);
-        }
-    }
-
-    private static bool IsRefusal(Exception exception) => exception is IOException or UnauthorizedAccessException;
-
-    /// <summary>The folder behind a link, so that the link stays one.</summary>
-    private static string Resolve(string path)
-    {
-        var folder = new DirectoryInfo(Path.TrimEndingDirectorySeparator(Path.GetFullPath(path)));
-        return folder.LinkTarget is null ? folder.FullName : folder.ResolveLinkTarget(returnFinalTarget: true)!.FullName;
-    }
-
-    /// <summary>A new folder beside the target, or inside it where the folder above is closed.</summary>
-    private static string CreateStaging(string target)
-    {
-        try
-        {
-            return CreateNew($"{target}.boltup-{Environment.ProcessId}");
-        }
-        catch (UnauthorizedAccessException) when (Directory.Exists(target))
-        {
-            return CreateNew(Path.Combine(target, $".boltup-{Environment.ProcessId}"));
-        }
-    }
-
-    /// <summary>What a killed run left behind may hold files of the user's: it is not touched.</summary>
-    private static string CreateNew(string path)
-    {
-        string free = path;
-        for (int i = 2; Path.Exists(free); i++)
-        {
-            free = FormattableString.Invariant($"{path}-{i}");
-        }
-
-        return Directory.CreateDirectory(free).FullName;
-    }
+    public void Dispose() => _staging.Dispose();
 
     private static void SayCannotWrite(string path, Exception exception, DiagnosticBag diagnostics) => diagnostics.Error(
         ReportCodes.CannotWrite,
@@ -135,35 +93,36 @@ public sealed class OutputFolder : IDisposable
         help: "choose another folder with `-o`",
         notes: exception.Message);
 
-    private bool IsInTheWay(DiagnosticBag diagnostics)
-    {
-        HashSet<string> ours = Directory.Exists(_target) ? ResultManifest.Read(_target) : [];
-        string[] foreign = [.. _written.Where(name => !ours.Contains(name) && Path.Exists(Path.Combine(_target, name)))];
-        if (foreign.Length > 0)
-        {
-            diagnostics.Error(
-                ReportCodes.ForeignFile,
-                $"`{_shownPath}` holds {string.Join(", ", foreign.Select(name => $"`{name}`"))}, which Boltup did not write",
-                help: "choose another folder with `-o`, or move the file away");
-        }
+    private void SayForeign(string[] inTheWay, DiagnosticBag diagnostics) => diagnostics.Error(
+        ReportCodes.ForeignFile,
+        $"`{_target}` holds {string.Join(", ", inTheWay.Select(name => $"`{name}`"))}, which Boltup did not write",
+        help: "choose another folder with `-o`, or move the file away");
 
-        return foreign.Length > 0;
+    private void PutInPlace(string[] names, string[] foreign)
+    {
+        if (!Directory.Exists(_target))
+        {
+            _staging.Release();
+            Directory.Move(_staging.FullPath, _target);
+            File.Delete(Path.Combine(_target, FolderManifest.Journal));
+        }
+        else if (_staging.IsBeside && foreign.Length == 0 && FolderExchange.TryExchange(_staging.FullPath, _target))
+        {
+            File.Delete(Path.Combine(_target, FolderManifest.Journal));
+            GiveBackLateComers();
+        }
+        else
+        {
+            new FileReplacement(_staging, _target).Run(names);
+        }
     }
 
-    private List<string> Replace(DiagnosticBag diagnostics)
+    /// <summary>Files of others that came between the look into the folder and its exchange belong into the new one.</summary>
+    private void GiveBackLateComers()
     {
-        List<string> written = [.. _written];
-        ResultManifest.Write(_staging, written);
-        IReadOnlyList<string> left = FolderReplacement.Apply(_staging, _target, written);
-        _isDone = true;
-        if (left.Count > 0)
+        foreach (string name in FolderManifest.ForeignEntriesIn(_staging.FullPath))
         {
-            diagnostics.Warning(
-                ReportCodes.LeftBehind,
-                $"{string.Join(", ", left.Select(name => $"`{name}`"))} of `{_shownPath}` could not be carried over",
-                help: $"move what you need back from `{_staging}`");
+            Directory.Move(Path.Combine(_staging.FullPath, name), Path.Combine(_target, name));
         }
-
-        return written;
     }
 }

@@ -57,9 +57,10 @@ public static class SummaryJson
         json.WriteEndObject();
     }
 
-    /// <summary>Thousands of numbers in one line; three digits are plenty for a condition number. JSON has no infinity: null.</summary>
-    private static string OneLine(IReadOnlyList<double> values) =>
-        $"[{string.Join(", ", values.Select(value => double.IsFinite(value) ? value.ToString("G3", CultureInfo.InvariantCulture) : "null"))}]";
+    /// <summary>Thousands of numbers in one line, null for a singular line; three digits are plenty for a condition number.</summary>
+    private static string OneLine(IReadOnlyList<double> values) => $"[{string.Join(", ", values.Select(Short))}]";
+
+    private static string Short(double value) => double.IsFinite(value) ? value.ToString("G3", CultureInfo.InvariantCulture) : "null";
 
     private static void WriteLevels(Utf8JsonWriter json, PredictionResult result)
     {

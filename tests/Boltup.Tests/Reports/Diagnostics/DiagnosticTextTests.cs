@@ -1,6 +1,7 @@
 using Boltup.Engine;
 using Boltup.Engine.Diagnostics;
 using Boltup.Reports.Diagnostics;
+using Boltup.Tests.Support;
 
 namespace Boltup.Tests.Reports.Diagnostics;
 
@@ -13,7 +14,7 @@ public sealed class DiagnosticTextTests : IDisposable
     [Fact]
     public void WriteAll_EveryKindOfPlace_ReadsAsApproved()
     {
-        string yaml = _folder["minibus.assembly.yaml"];
+        string yaml = _folder.PathTo("minibus.assembly.yaml");
         File.WriteAllLines(yaml, ["mounts:", "    front: { stifness: 120 N/mm }", "\trear: \u001b[31m5\t# tab and escape"]);
         var bag = new DiagnosticBag();
         bag.Error(EngineCodes.MissingFrf, "unknown key `stifness`", new SourceSpan(yaml, 2, 14, 8), "did you mean `stiffness`?");
@@ -23,7 +24,7 @@ public sealed class DiagnosticTextTests : IDisposable
         bag.Error(EngineCodes.NoCommonAxis, "a file that is gone", new SourceSpan("gone.yaml", 7, 3, 2));
         bag.Note(EngineCodes.NoCommonAxis, "nowhere in particular", null, "do this", "found that", "expected this");
 
-        Golden.Check("diagnostics.txt", Render(Ink.Plain, bag.Items).Replace(_folder.Root, "configs", StringComparison.Ordinal));
+        Golden.Check("diagnostics.txt", Render(Ink.Plain, bag.Items).Replace(_folder.Path, "configs", StringComparison.Ordinal));
     }
 
     [Fact]

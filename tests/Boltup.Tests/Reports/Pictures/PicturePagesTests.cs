@@ -77,9 +77,21 @@ public class PicturePagesTests
 
         Assert.Equal(2, sheet.Panels.Count);
         Assert.All(sheet.Panels, panel => Assert.Equal(["idle", "full"], panel.Series.Select(series => series.Name)));
-        Assert.True(sheet.Panels[0].HasLegend);
-        Assert.Equal("ear, left · 108.0 / 108.0 dB", sheet.Panels[0].Title);
+        Assert.Equal(["idle", "full"], sheet.Legend.Select(entry => entry.Name));
+        Assert.Equal(sheet.Panels[1].Series.Select(series => series.Colour), sheet.Legend.Select(entry => entry.Colour));
+        Assert.Equal("ear, left · 108.0 dB / 108.0 dB", sheet.Panels[0].Title);
         Assert.Equal("provenance", sheet.Caption);
+    }
+
+    [Fact]
+    public void Response_OneLine_StandsInTheMiddleOfAnOctave()
+    {
+        var operation = new OperationResult(
+            "idle", FrequencyAxis.FromHertz([60]), Amplitude.Rms, [TinyResult.Seat with { Values = [1] }], []);
+        PictureAxis axis = Pages(operation).Response(operation, 0).Panels[0].X;
+
+        Assert.Equal(60, Math.Sqrt(axis.From * axis.To), 9);
+        Assert.Equal(2, axis.To / axis.From, 9);
     }
 
     [Fact]

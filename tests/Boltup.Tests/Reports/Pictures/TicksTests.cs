@@ -8,8 +8,9 @@ public class TicksTests
     [InlineData(20, 1000, "20 50 100 200 500 1k")]
     [InlineData(15, 2500, "20 50 100 200 500 1k 2k")]
     [InlineData(0.5, 12, "0.5 1 2 5 10")]
-    [InlineData(60, 90, "60 65 70 75 80 85 90")]
-    [InlineData(1000, 1500, "1000 1100 1200 1300 1400 1500")]
+    [InlineData(60, 95, "60 70 80 90")]
+    [InlineData(210, 409, "250 300 350 400")]
+    [InlineData(1000, 1004, "1k 1.001k 1.002k 1.003k 1.004k")]
     public void OfFrequency_Range_HasPlainNumbers(double fromHz, double toHz, string labels) =>
         Assert.Equal(labels, string.Join(' ', Ticks.OfFrequency(fromHz, toHz).Where(tick => tick.IsMajor).Select(tick => tick.Label)));
 

@@ -1,4 +1,5 @@
 using Boltup.Reports.Results;
+using Boltup.Tests.Support;
 
 namespace Boltup.Tests.Reports.Results;
 
@@ -9,9 +10,9 @@ public class InputFingerprintTests
     public void Of_File_IsItsSha256UnderTheNameThatIsShown()
     {
         using var folder = new TemporaryFolder();
-        File.WriteAllText(folder["input.csv"], "abc");
+        File.WriteAllText(folder.PathTo("input.csv"), "abc");
 
-        var fingerprint = InputFingerprint.Of(folder["input.csv"], "data/input.csv");
+        var fingerprint = InputFingerprint.Of(folder.PathTo("input.csv"), "data/input.csv");
 
         Assert.Equal("data/input.csv", fingerprint.File);
         Assert.Equal("ba7816bf8f01cfea414140de5dae2223b00361a396177a9cb410ff61f20015ad", fingerprint.Sha256);

@@ -1,5 +1,6 @@
 using Boltup.Engine.Diagnostics;
 using Boltup.Engine.Prediction;
+using Boltup.Tests.Support;
 
 namespace Boltup.Tests.Reports.Results;
 
@@ -13,7 +14,7 @@ public sealed class ResultWriterTests : IDisposable
     [Fact]
     public void Write_WithoutPictures_WritesTheDataFiles()
     {
-        IReadOnlyList<string>? names = TinyResult.Write(_folder["out"], _diagnostics);
+        IReadOnlyList<string>? names = TinyResult.Write(_folder.PathTo("out"), _diagnostics);
 
         Assert.Equal(["joint_forces.csv", "responses.csv", "summary.json"], names);
         Assert.Empty(_diagnostics.Items);
@@ -22,11 +23,11 @@ public sealed class ResultWriterTests : IDisposable
     [Fact]
     public void Write_Twice_GivesTheSameBytes()
     {
-        IReadOnlyList<string> names = TinyResult.Write(_folder["first"], _diagnostics, pictures: true)!;
-        TinyResult.Write(_folder["second"], _diagnostics, pictures: true);
+        IReadOnlyList<string> names = TinyResult.Write(_folder.PathTo("first"), _diagnostics, pictures: true)!;
+        TinyResult.Write(_folder.PathTo("second"), _diagnostics, pictures: true);
 
         Assert.Contains("idle-ear-left.png", names);
-        Assert.All(names, name => Assert.Equal(File.ReadAllBytes(_folder[$"first/{name}"]), File.ReadAllBytes(_folder[$"second/{name}"])));
+        Assert.All(names, name => Assert.Equal(File.ReadAllBytes(_folder.PathTo($"first/{name}")), File.ReadAllBytes(_folder.PathTo($"second/{name}"))));
     }
 
     /// <summary>`a b` with `c` and `a` with `b c` would both be `a-b-c`.</summary>
@@ -37,7 +38,7 @@ public sealed class ResultWriterTests : IDisposable
             TinyResult.Operation("a b", Amplitude.Rms, TinyResult.Seat with { Name = "c" }, TinyResult.Seat with { Name = "joint forces" }),
             TinyResult.Operation("a", Amplitude.Rms, TinyResult.Seat with { Name = "b c" }, TinyResult.Seat with { Name = "d" }));
 
-        IReadOnlyList<string> names = TinyResult.Write(_folder["out"], _diagnostics, pictures: true, result)!;
+        IReadOnlyList<string> names = TinyResult.Write(_folder.PathTo("out"), _diagnostics, pictures: true, result)!;
 
         Assert.Contains("a-b-c.png", names);
         Assert.Contains("a-b-c-2.png", names);
@@ -48,9 +49,9 @@ public sealed class ResultWriterTests : IDisposable
     [Fact]
     public void Write_FolderUnderAFile_IsADiagnostic()
     {
-        File.WriteAllText(_folder["file"], "");
+        File.WriteAllText(_folder.PathTo("file"), "");
 
-        Assert.Null(TinyResult.Write(_folder["file/out"], _diagnostics));
+        Assert.Null(TinyResult.Write(_folder.PathTo("file/out"), _diagnostics));
         Assert.True(_diagnostics.HasErrors);
     }
 }
