@@ -1,10 +1,11 @@
+using System.Globalization;
 using BenchmarkDotNet.Running;
 using Boltup.Benchmarks.Files;
 using Boltup.Benchmarks.Kernels;
 
-if (args is ["ratios"])
+if (args is ["ratios", .. string[] orders])
 {
-    NumPyRatios.Run(Console.Out);
+    NumPyRatios.Run(Console.Out, [.. orders.Select(order => int.Parse(order, CultureInfo.InvariantCulture))]);
     return;
 }
 

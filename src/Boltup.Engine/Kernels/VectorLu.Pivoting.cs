@@ -1,3 +1,5 @@
+using System.Runtime.CompilerServices;
+
 namespace Boltup.Engine.Kernels;
 
 /// <summary>Choice and exchange of pivot rows.</summary>
@@ -17,6 +19,7 @@ internal sealed unsafe partial class VectorLu<T>
         StoreReciprocal(a + rows[column] + (nint)column * Entry, inverse + (nint)column * Entry);
     }
 
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     private static T SizeOf(double* entry) => T.Abs(T.Load(entry)) + T.Abs(T.Load(entry + Imaginary));
 
     /// <summary>Largest |Re|+|Im| of the column per lane, and the row where it is.</summary>
@@ -52,6 +55,7 @@ internal sealed unsafe partial class VectorLu<T>
     }
 
     /// <summary>Whether a candidate is within a factor of two of the best in every regular lane; NaN is not.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     private static bool IsGoodInAllLanes(double* candidate, T best, uint regular)
     {
         T size = SizeOf(candidate);

@@ -96,11 +96,9 @@ internal sealed unsafe partial class VectorLu<T>
     {
         for (int i = height - 1; i >= 0; i--)
         {
+            double* beside = a + rows[row + i] + (nint)(row + i + 1) * Entry;
+            SubtractRows(beside, c, cRows + row + i + 1, height - 1 - i, c + cRows[row + i], 0, width);
             ScaleRow(inverse + (nint)(row + i) * Entry, c + cRows[row + i], width);
-            for (int k = 0; k < i; k++)
-            {
-                SubtractRow(a + rows[row + k] + (nint)(row + i) * Entry, c + cRows[row + i], c + cRows[row + k], 0, width);
-            }
         }
     }
 

@@ -13,6 +13,7 @@ namespace Boltup.Engine.Kernels;
 /// touches another lane, so NaN stays where it is. Remainders: odd orders are padded by a unit row and column. Hazard: the reciprocal of a
 /// pivot is scaled by its larger part (Smith 1962), so that it neither overflows nor underflows early.
 /// </remarks>
+[SkipLocalsInit]
 internal sealed unsafe partial class VectorLu<T> : LuKernel
     where T : unmanaged, ILanes<T>
 {
@@ -165,10 +166,26 @@ internal sealed unsafe partial class VectorLu<T> : LuKernel
     {
         for (int i = 1; i < height; i++)
         {
-            for (int k = 0; k < i; k++)
+            SubtractRows(a + rows[row + i] + (nint)row * Entry, c, cRows + row, i, c + cRows[row + i], from, to);
+        }
+    }
+
+    /// <summary>target[from…to) −= Σₖ m[k]·C[k, from…to): a few rows at once, so that the target is loaded and stored once.</summary>
+    private static void SubtractRows(double* m, double* c, long* cRows, int count, double* target, int from, int to)
+    {
+        for (int column = from; column < to; column++)
+        {
+            double* t = target + (nint)column * Entry;
+            T r = T.Load(t), i = T.Load(t + Imaginary);
+            for (int k = 0; k < count; k++)
             {
-                SubtractRow(a + rows[row + i] + (nint)(row + k) * Entry, c + cRows[row + k], c + cRows[row + i], from, to);
+                double* factor = m + (nint)k * Entry;
+                double* source = c + cRows[k] + (nint)column * Entry;
+                BlockKernel<T>.Subtract(
+                    ref r, ref i, T.Load(factor), T.Load(factor + Imaginary), T.Load(source), T.Load(source + Imaginary));
             }
+
+            BlockKernel<T>.Store(t, r, i);
         }
     }
 
@@ -186,6 +203,7 @@ internal sealed unsafe partial class VectorLu<T> : LuKernel
         }
     }
 
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     private static (T Real, T Imaginary) Times(T ar, T ai, T br, T bi) =>
         (T.MultiplySubtract(ai, bi, ar * br), T.MultiplyAdd(ar, bi, ai * br));
 

@@ -17,13 +17,13 @@ internal static class NumPyRatios
 
     private static readonly int[] Orders = [6, 12, 24, 48, 96];
 
-    public static void Run(TextWriter output)
+    public static void Run(TextWriter output, params int[] orders)
     {
         output.WriteLine($"kernels {KernelChoice.Name}, 2,000 lines of smooth FRFs, shortest of several runs");
         output.WriteLine();
         output.WriteLine("| n | right-hand sides | NumPy, 1 thread | Boltup, 1 thread | ratio | 2 threads to 1 | GFLOP/s |");
         output.WriteLine("| --- | --- | --- | --- | --- | --- | --- |");
-        foreach (int order in Orders)
+        foreach (int order in orders.Length > 0 ? orders : Orders)
         {
             WriteRow(output, order, order);
             WriteRow(output, order, 1);
@@ -67,14 +67,10 @@ internal static class NumPyRatios
 
     private static void SolveAll(TiledMatrix a, TiledMatrix b, int threads)
     {
-        var ranges = Enumerable.Range(0, threads).Select(i => (a.TileCount * i / threads, a.TileCount * (i + 1) / threads));
-        if (threads == 1)
-        {
-            SolveRange(a, b, 0, a.TileCount);
-            return;
-        }
-
-        Parallel.ForEach(ranges, range => SolveRange(a, b, range.Item1, range.Item2));
+        Task[] others = [.. Enumerable.Range(1, threads - 1).Select(i => Task.Run(
+            () => SolveRange(a, b, a.TileCount * i / threads, a.TileCount * (i + 1) / threads)))];
+        SolveRange(a, b, 0, a.TileCount / threads);
+        Task.WaitAll(others);
     }
 
     private static void SolveRange(TiledMatrix a, TiledMatrix b, int from, int to)
