@@ -1,7 +1,9 @@
 using System.CommandLine;
+using System.Runtime.InteropServices;
 using Boltup.Cli.Commands;
 using Boltup.Cli.Terminal;
 using Boltup.Config;
+using Boltup.Engine.Kernels;
 
 namespace Boltup.Cli;
 
@@ -9,14 +11,18 @@ internal static class Program
 {
     private static int Main(string[] args)
     {
-        // The YAML reader takes longest to get ready; it does so while the command line is read.
-        _ = Task.Run(WarmUp.Run);
-        using var cancellation = new CancellationTokenSource();
-        Console.CancelKeyPress += (_, pressed) =>
+        // The YAML reader and the kernels take longest to get ready; they do so while the command line and the headers are read.
+        _ = Task.Run(() =>
         {
-            pressed.Cancel = true;
+            WarmUp.Run();
+            KernelWarmUp.Run();
+        });
+        using var cancellation = new CancellationTokenSource();
+        using PosixSignalRegistration interrupt = PosixSignalRegistration.Create(PosixSignal.SIGINT, signal =>
+        {
+            signal.Cancel = true;
             cancellation.Cancel();
-        };
+        });
         return Run(args, new Screen(Console.Out, Console.Error), cancellation.Token);
     }
 

@@ -2,7 +2,6 @@ using System.CommandLine;
 using Boltup.Cli.Terminal;
 using Boltup.Config;
 using Boltup.Config.Planning;
-using Boltup.Config.Yaml;
 using Boltup.Engine.Diagnostics;
 using Boltup.Engine.Prediction;
 using Boltup.Reports.Results;
@@ -49,6 +48,7 @@ internal sealed class PredictCommand(Screen screen, CancellationToken cancellati
         KernelRequest.Check(diagnostics);
         string path = parsed.GetValue(_assembly)!;
         using AssemblyPlan? plan = AssemblyPlanner.Plan(path, parsed.LoadOptions(_allowOutside), diagnostics);
+        Task<InputFingerprint[]>? fingerprints = plan is null ? null : Task.Run(() => Fingerprints(plan), cancellation);
         stages.End("load and plan");
         PredictionResult? result = plan is null ? null : Predictor.Predict(plan.Assembly, diagnostics, cancellation);
         stages.End("read and couple");
@@ -56,7 +56,7 @@ internal sealed class PredictCommand(Screen screen, CancellationToken cancellati
         var options = new ResultOptions(ProgramVersion.Text, !parsed.GetValue(_noPictures));
         IReadOnlyList<string>? files = result is null
             ? null
-            : ResultWriter.Write(result, Fingerprints(plan!), folder, options, diagnostics);
+            : ResultWriter.Write(result, fingerprints!.Result, folder, options, diagnostics);
         stages.End("write");
         screen.Say(diagnostics, parsed.GetValue(_messages));
         if (files is not null)
@@ -72,14 +72,6 @@ internal sealed class PredictCommand(Screen screen, CancellationToken cancellati
         return ExitCode.Of(diagnostics);
     }
 
-    private static InputFingerprint[] Fingerprints(AssemblyPlan plan)
-    {
-        var fingerprints = new InputFingerprint[plan.Inputs.Count];
-        Parallel.For(0, fingerprints.Length, i =>
-        {
-            SourceFile input = plan.Inputs[i];
-            fingerprints[i] = InputFingerprint.Of(input.FullPath, input.DisplayPath);
-        });
-        return fingerprints;
-    }
+    private static InputFingerprint[] Fingerprints(AssemblyPlan plan) =>
+        [.. plan.Inputs.Select(input => InputFingerprint.Of(input.FullPath, input.DisplayPath))];
 }

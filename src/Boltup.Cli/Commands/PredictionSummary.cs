@@ -2,15 +2,12 @@ using System.Globalization;
 using Boltup.Cli.Terminal;
 using Boltup.Engine.Prediction;
 using Boltup.Reports.Results;
-using Spectre.Console;
 
 namespace Boltup.Cli.Commands;
 
 /// <summary>What a prediction prints: levels of every response, how well the interface could be solved, what was written.</summary>
 internal static class PredictionSummary
 {
-    private const int Width = 80;
-
     public static void Print(Screen screen, PredictionResult result, string folder, IReadOnlyList<string> files)
     {
         screen.Out.WriteLine(screen.Ink.Strong(result.Title));
@@ -38,36 +35,23 @@ internal static class PredictionSummary
 
     private static void PrintLevels(Screen screen, PredictionResult result)
     {
-        var table = new Table { Border = TableBorder.Simple };
-        table.AddColumn("operation").AddColumn("response");
-        table.AddColumn(new TableColumn("overall").RightAligned()).AddColumn("dB re");
-        table.AddColumn(new TableColumn("strongest line").RightAligned());
+        var table = new TextTable(
+            ("operation", false), ("response", false), ("overall", true), ("dB re", false), ("strongest line", true));
         foreach (OperationResult operation in result.Operations)
         {
             foreach (ResponseSpectrum response in operation.Responses)
             {
                 OverallLevel level = OverallLevel.Of(response, operation.Axis, operation.Amplitude);
-                table.AddRow(
-                    Markup.Escape(operation.Name),
-                    Markup.Escape(response.Name),
+                table.Add(
+                    operation.Name,
+                    response.Name,
                     string.Create(CultureInfo.InvariantCulture, $"{level.Decibels:F1}"),
                     level.Reference.Text,
                     string.Create(CultureInfo.InvariantCulture, $"{level.PeakDecibels:F1} at {level.PeakHz:G5} Hz"));
             }
         }
 
-        Render(screen, table);
-    }
-
-    private static void Render(Screen screen, Table table)
-    {
-        IAnsiConsole console = AnsiConsole.Create(new AnsiConsoleSettings
-        {
-            Ansi = AnsiSupport.No,
-            ColorSystem = ColorSystemSupport.NoColors,
-            Out = new AnsiConsoleOutput(screen.Out),
-        });
-        console.Profile.Width = Width;
-        console.Write(table);
+        table.Write(screen.Out);
+        screen.Out.WriteLine();
     }
 }

@@ -21,7 +21,6 @@ internal sealed class StageClock
     {
         long now = Stopwatch.GetTimestamp();
         _stages.Add((name, Stopwatch.GetElapsedTime(_last, now).TotalMilliseconds));
-        Console.Error.WriteLine($"{name}: jit {System.Runtime.JitInfo.GetCompiledMethodCount()} methods {System.Runtime.JitInfo.GetCompilationTime().TotalMilliseconds:F0} ms, threads {ThreadPool.ThreadCount}");
         _last = now;
     }
 

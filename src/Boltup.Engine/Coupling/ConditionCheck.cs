@@ -67,6 +67,7 @@ internal sealed class ConditionCheck(CouplingLayout layout, FrequencyAxis axis, 
     /// <summary>The constraints that take part in the motion that is constrained twice: the last right singular vector.</summary>
     private Constraint[] InvolvedAt(int line)
     {
+        DenseAlgebra.PickUpProvider();
         int order = layout.Constraints.Count;
         var tile = new TiledMatrix(Tiling.Lanes, order, order);
         new InterfaceMatrix(layout, axis, frfs).Fill(line / Tiling.Lanes, tile.Tile(0));

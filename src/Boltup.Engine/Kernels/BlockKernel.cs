@@ -23,7 +23,6 @@ internal static unsafe class BlockKernel<T>
     /// <param name="c">Four pointers to C[r, c].</param>
     /// <param name="x">Base of X, at the column.</param>
     /// <param name="offsets">For each k from k₀ the offset of row k of X, in doubles.</param>
-    [MethodImpl(MethodImplOptions.AggressiveOptimization)]
     public static void Subtract4x2(double** m, double** c, double* x, long* offsets, int count)
     {
         double* m0 = m[0], m1 = m[1], m2 = m[2], m3 = m[3];
@@ -63,7 +62,6 @@ internal static unsafe class BlockKernel<T>
     }
 
     /// <summary>Two columns of C −= M·X for 2 rows.</summary>
-    [MethodImpl(MethodImplOptions.AggressiveOptimization)]
     public static void Subtract2x2(double** m, double** c, double* x, long* offsets, int count)
     {
         double* m0 = m[0], m1 = m[1], c0 = c[0], c1 = c[1];
@@ -90,7 +88,6 @@ internal static unsafe class BlockKernel<T>
     }
 
     /// <summary>One column of C −= M·X for 4 rows.</summary>
-    [MethodImpl(MethodImplOptions.AggressiveOptimization)]
     public static void Subtract4x1(double** m, double** c, double* x, long* offsets, int count)
     {
         double* m0 = m[0], m1 = m[1], m2 = m[2], m3 = m[3];
@@ -116,7 +113,6 @@ internal static unsafe class BlockKernel<T>
     }
 
     /// <summary>One column of C −= M·X for 1 row.</summary>
-    [MethodImpl(MethodImplOptions.AggressiveOptimization)]
     public static void Subtract1x1(double* m, double* c, double* x, long* offsets, int count)
     {
         T r = T.Load(c), i = T.Load(c + Imaginary);

@@ -1,4 +1,3 @@
-using System.Numerics;
 using Boltup.Engine.Spectra;
 
 namespace Boltup.Engine.Parts;
@@ -45,11 +44,17 @@ public sealed class AxisMap
         return new AxisMap(below, share);
     }
 
-    /// <summary>Value of the mapped spectrum at a target line.</summary>
-    public Complex At(int line, ReadOnlySpan<Complex> source)
+    /// <summary>Maps a spectrum.</summary>
+    /// <param name="source">Real and imaginary part of each line of the source axis in turn.</param>
+    /// <param name="target">Receives the same for the target axis.</param>
+    public void Apply(ReadOnlySpan<double> source, Span<double> target)
     {
-        int below = _below[line];
-        double share = _share[line];
-        return share == 0 ? source[below] : (1 - share) * source[below] + share * source[below + 1];
+        for (int line = 0; line < _below.Length; line++)
+        {
+            int below = 2 * _below[line];
+            double share = _share[line];
+            target[2 * line] = share == 0 ? source[below] : (1 - share) * source[below] + share * source[below + 2];
+            target[2 * line + 1] = share == 0 ? source[below + 1] : (1 - share) * source[below + 1] + share * source[below + 3];
+        }
     }
 }

@@ -1,4 +1,5 @@
 using System.Numerics;
+using System.Runtime.InteropServices;
 using Boltup.Engine.Diagnostics;
 using Boltup.Engine.Spectra;
 
@@ -93,6 +94,7 @@ public sealed class MeasuredPart : IPartModel
         private readonly Dictionary<FrequencyAxis, AxisMap?> _maps = [];
         private readonly HashSet<FrequencyAxis> _interpolated = [];
         private readonly double[] _factors = new double[axis.Count];
+        private readonly double[] _mapped = new double[2 * axis.Count];
         private Complex[] _source = [];
         private (int Power, bool Valid) _factorsFor;
 
@@ -127,7 +129,8 @@ public sealed class MeasuredPart : IPartModel
 
             PrepareFactors(power);
             Complex unit = UnitFactor(power, negated: reciprocalPower != 0);
-            return Store(curve, values, map, unit, target, row, column);
+            map.Apply(MemoryMarshal.Cast<Complex, double>(values), _mapped);
+            return Store(curve, unit, target, row, column);
         }
 
         public void SayWhatWasInterpolated(string part)
@@ -198,23 +201,25 @@ public sealed class MeasuredPart : IPartModel
             return negated ? -unit : unit;
         }
 
-        private bool Store(
-            IFrfCurve curve, ReadOnlySpan<Complex> values, AxisMap map, Complex unit, TiledMatrix target, int row, int column)
+        /// <summary>Turns, scales and stores the mapped values; plain numbers, since this is where a measured part spends its time.</summary>
+        private bool Store(IFrfCurve curve, Complex unit, TiledMatrix target, int row, int column)
         {
+            (double re, double im) = (unit.Real, unit.Imaginary);
             for (int tile = 0; tile < target.TileCount; tile++)
             {
                 Span<double> entry = target.Entry(tile, row, column);
                 for (int lane = 0; lane < Tiling.Lanes; lane++)
                 {
                     int line = Math.Min(tile * Tiling.Lanes + lane, axis.Count - 1);
-                    Complex value = _factors[line] * (unit * map.At(line, values));
-                    if (!Complex.IsFinite(value))
+                    double x = _factors[line] * _mapped[2 * line];
+                    double y = _factors[line] * _mapped[2 * line + 1];
+                    if (!double.IsFinite(x + y))
                     {
                         return RefuseNumber(curve, line);
                     }
 
-                    entry[lane] = value.Real;
-                    entry[Tiling.Lanes + lane] = value.Imaginary;
+                    entry[lane] = re * x - im * y;
+                    entry[Tiling.Lanes + lane] = re * y + im * x;
                 }
             }
 

@@ -1,4 +1,5 @@
 using System.Numerics;
+using System.Runtime.InteropServices;
 using Boltup.Engine.Diagnostics;
 using Boltup.Files.Text;
 
@@ -120,11 +121,19 @@ internal sealed class UniversalFileReader : IDataReader
     private static void Compose(FunctionRecord record, ReadOnlySpan<double> numbers, Span<Complex> values)
     {
         DataLayout layout = record.Layout;
-        int at = layout.HasAbscissa ? 1 : 0;
-        for (int i = 0; i < values.Length; i++)
+        bool hasImaginary = layout.Parts == 2 && record.KeepsImaginary;
+        Span<double> parts = MemoryMarshal.Cast<Complex, double>(values);
+        if (hasImaginary && !layout.HasAbscissa && record.Factor == 1)
         {
-            double imaginary = layout.Parts == 2 && record.KeepsImaginary ? numbers[at + 1] : 0;
-            values[i] = record.Factor == 1 ? new Complex(numbers[at], imaginary) : new Complex(record.Factor * numbers[at], record.Factor * imaginary);
+            numbers.CopyTo(parts);
+            return;
+        }
+
+        int at = layout.HasAbscissa ? 1 : 0;
+        for (int i = 0; i < parts.Length; i += 2)
+        {
+            parts[i] = record.Factor * numbers[at];
+            parts[i + 1] = hasImaginary ? record.Factor * numbers[at + 1] : 0;
             at += layout.NumbersPerPoint;
         }
     }

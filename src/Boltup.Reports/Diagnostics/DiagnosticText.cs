@@ -5,10 +5,7 @@ namespace Boltup.Reports.Diagnostics;
 /// <summary>Renders diagnostics for people: message, place, the line itself with carets, notes and cures.</summary>
 public sealed class DiagnosticText(TextWriter output, Ink ink)
 {
-    private const int TabWidth = 4;
-    private const int WidestLine = 120;
-
-    private readonly Dictionary<string, string[]?> _files = [];
+    private readonly SourceLines _lines = new();
 
     /// <summary>Writes diagnostics in full, and a closing count when there are errors or warnings.</summary>
     public void WriteAll(IReadOnlyList<Diagnostic> diagnostics)
@@ -28,7 +25,7 @@ public sealed class DiagnosticText(TextWriter output, Ink ink)
     public void Write(Diagnostic diagnostic)
     {
         string head = $"{WordOf(diagnostic.Severity)}[{diagnostic.Code}]";
-        output.WriteLine($"{Coloured(diagnostic.Severity, head)}: {ink.Strong(diagnostic.Message)}");
+        output.WriteLine($"{Coloured(diagnostic.Severity, head)}: {ink.Strong(Harmless(diagnostic.Message))}");
         if (diagnostic.Span is { } span)
         {
             WritePlace(span, diagnostic.Severity);
@@ -36,12 +33,12 @@ public sealed class DiagnosticText(TextWriter output, Ink ink)
 
         foreach (string note in diagnostic.Notes)
         {
-            output.WriteLine($"{ink.Note("note")}: {note}");
+            output.WriteLine($"{ink.Note("note")}: {Harmless(note)}");
         }
 
         foreach (string help in diagnostic.Helps)
         {
-            output.WriteLine($"{ink.Help("help")}: {help}");
+            output.WriteLine($"{ink.Help("help")}: {Harmless(help)}");
         }
 
         output.WriteLine();
@@ -50,8 +47,8 @@ public sealed class DiagnosticText(TextWriter output, Ink ink)
     /// <summary><c>file:line:column: error[CODE]: message</c>, for editors and search.</summary>
     public static string OneLine(Diagnostic diagnostic)
     {
-        string place = diagnostic.Span is { } span ? $"{span}: " : "";
-        return $"{place}{WordOf(diagnostic.Severity)}[{diagnostic.Code}]: {diagnostic.Message}";
+        string place = diagnostic.Span is { } span ? $"{Harmless(span.ToString())}: " : "";
+        return $"{place}{WordOf(diagnostic.Severity)}[{diagnostic.Code}]: {Harmless(diagnostic.Message)}";
     }
 
     /// <summary>Such as <c>2 errors, 1 warning</c>; null when there are neither.</summary>
@@ -71,6 +68,10 @@ public sealed class DiagnosticText(TextWriter output, Ink ink)
         _ => "note",
     };
 
+    /// <summary>A file must not steer the terminal: control characters are shown as a replacement character.</summary>
+    internal static string Harmless(string text) =>
+        text.Any(char.IsControl) ? string.Concat(text.Select(c => char.IsControl(c) ? '\ufffd' : c)) : text;
+
     private string Coloured(Severity severity, string text) => severity switch
     {
         Severity.Error => ink.Error(text),
@@ -80,53 +81,24 @@ public sealed class DiagnosticText(TextWriter output, Ink ink)
 
     private void WritePlace(SourceSpan span, Severity severity)
     {
-        output.WriteLine($"  {ink.Frame("-->")} {span}");
-        if (span.Line > 0 && LinesOf(span.File) is { } lines && span.Line <= lines.Length)
+        output.WriteLine($"  {ink.Frame("-->")} {Harmless(span.ToString())}");
+        if (_lines.Find(span.File, span.Line) is { } line)
         {
-            WriteExcerpt(lines[span.Line - 1], span, severity);
+            WriteExcerpt(SourceExcerpt.Of(line, span.Column, span.Length), span, severity);
         }
     }
 
-    private void WriteExcerpt(string line, SourceSpan span, Severity severity)
+    private void WriteExcerpt(SourceExcerpt excerpt, SourceSpan span, Severity severity)
     {
         string number = FormattableString.Invariant($"{span.Line}");
         string gutter = new(' ', number.Length + 1);
         string bar = ink.Frame("|");
-        int column = Math.Clamp(span.Column, 1, line.Length + 1);
-        string before = Expand(line[..(column - 1)]);
-        string marked = Expand(line.Substring(column - 1, Math.Clamp(span.Length, 0, line.Length - column + 1)));
-        string shown = before + marked + Expand(line[Math.Min(line.Length, column - 1 + span.Length)..]);
-        int cut = Math.Max(0, before.Length + Math.Min(marked.Length, 20) - WidestLine);
-        shown = shown[cut..];
-        shown = shown.Length > WidestLine ? shown[..WidestLine] + " …" : shown;
         output.WriteLine($"{gutter}{bar}");
-        output.WriteLine($"{ink.Frame(number)} {bar} {(cut > 0 ? "… " : "")}{shown}");
+        output.WriteLine($"{ink.Frame(number)} {bar} {excerpt.Text}".TrimEnd());
         if (span.Column > 0)
         {
-            int width = Math.Clamp(marked.Length, 1, Math.Max(1, WidestLine - (before.Length - cut)));
-            output.WriteLine($"{gutter}{bar} {(cut > 0 ? "  " : "")}{new string(' ', before.Length - cut)}{Coloured(severity, new string('^', width))}");
+            string carets = Coloured(severity, new string('^', excerpt.MarkWidth));
+            output.WriteLine($"{gutter}{bar} {new string(' ', excerpt.MarkAt)}{carets}");
         }
-    }
-
-    private static string Expand(string text) => text.Replace("\t", new string(' ', TabWidth), StringComparison.Ordinal);
-
-    /// <summary>A file that cannot be read again, or is no text, has no excerpt.</summary>
-    private string[]? LinesOf(string file)
-    {
-        if (!_files.TryGetValue(file, out string[]? lines))
-        {
-            try
-            {
-                lines = File.ReadAllLines(file);
-            }
-            catch (Exception exception) when (exception is IOException or UnauthorizedAccessException)
-            {
-                lines = null;
-            }
-
-            _files.Add(file, lines);
-        }
-
-        return lines;
     }
 }

@@ -6,6 +6,4 @@ public sealed record Panel(
     string Title, PictureAxis X, PictureAxis Y, IReadOnlyList<Series> Series, (double Left, double Top, double Width, double Height) Place)
 {
     public Marker? Marker { get; init; }
-
-    public bool HasLegend { get; init; }
 }

@@ -7,19 +7,16 @@ namespace Boltup.Reports.Pictures;
 /// <summary>Turns pictures into PNG. Equal pictures give equal bytes; may be used by several threads at a time.</summary>
 public static class PictureDrawer
 {
-    private const float Edge = 28;
     private const float HeaderHeight = 78;
     private const float FooterHeight = 34;
-
-    private static readonly SKColor PaperColour = ToSkia(PictureStyle.Paper);
 
     public static byte[] DrawPng(Picture picture)
     {
         _ = PictureFonts.Regular;
         using var bitmap = new SKBitmap(picture.Width, picture.Height, SKColorType.Rgba8888, SKAlphaType.Opaque);
         using var canvas = new SKCanvas(bitmap);
-        canvas.Clear(PaperColour);
-        DrawWords(canvas, picture);
+        canvas.Clear(PictureWords.ToSkia(PictureStyle.Paper));
+        PictureWords.Draw(canvas, picture);
         foreach (Panel panel in picture.Panels)
         {
             DrawPanel(canvas, panel, AreaOf(panel, picture));
@@ -29,44 +26,11 @@ public static class PictureDrawer
         return png.ToArray();
     }
 
-    private static void DrawWords(SKCanvas canvas, Picture picture)
-    {
-        DrawText(canvas, picture.Title, Edge, 40, PictureFonts.Strong, PictureStyle.TitleSize, PictureStyle.Text, picture.Width - 2 * Edge);
-        DrawText(canvas, picture.Subtitle, Edge, 66, PictureFonts.Regular, PictureStyle.SubtitleSize, PictureStyle.Quiet, picture.Width - 2 * Edge);
-        DrawText(
-            canvas, picture.Caption, Edge, picture.Height - 13, PictureFonts.Regular, PictureStyle.CaptionSize, PictureStyle.Quiet, picture.Width - 2 * Edge);
-    }
-
-    private static void DrawText(
-        SKCanvas canvas, string text, float x, float y, SKTypeface typeface, float size, Rgb colour, float width)
-    {
-        using var font = new SKFont(typeface, size) { Subpixel = true, Edging = SKFontEdging.Antialias };
-        using var paint = new SKPaint { Color = ToSkia(colour), IsAntialias = true };
-        canvas.DrawText(Fit(text, font, width), x, y, font, paint);
-    }
-
-    /// <summary>Cuts a text that is too long, and shows that it was cut.</summary>
-    private static string Fit(string text, SKFont font, float width)
-    {
-        if (font.MeasureText(text) <= width)
-        {
-            return text;
-        }
-
-        int length = text.Length;
-        while (length > 1 && font.MeasureText(text[..length] + "…") > width)
-        {
-            length--;
-        }
-
-        return text[..length] + "…";
-    }
-
     private static PixelRect AreaOf(Panel panel, Picture picture)
     {
-        float width = picture.Width - Edge;
+        float width = picture.Width - PictureStyle.Edge;
         float height = picture.Height - HeaderHeight - FooterHeight;
-        float left = (float)(Edge / 2 + panel.Place.Left * width);
+        float left = (float)(PictureStyle.Edge / 2 + panel.Place.Left * width);
         float top = (float)(HeaderHeight + panel.Place.Top * height);
         return new PixelRect(left, left + (float)(panel.Place.Width * width), top + (float)(panel.Place.Height * height), top);
     }
@@ -88,8 +52,6 @@ public static class PictureDrawer
         {
             AddMarker(plot, marker, panel);
         }
-
-        AddLegend(plot, panel);
 
         // The library clears whatever canvas it is given, so each panel gets its own.
         using var own = new SKBitmap((int)area.Width, (int)area.Height, SKColorType.Rgba8888, SKAlphaType.Opaque);
@@ -143,7 +105,6 @@ public static class PictureDrawer
         double[] y = [.. shown.Select(i => series.Y[i])];
         ScottPlot.Plottables.Scatter line = plot.Add.ScatterLine(x, y, ToColour(series.Colour));
         line.LineWidth = series.Thin ? PictureStyle.ComparisonWeight : PictureStyle.PredictionWeight;
-        line.LegendText = series.Name;
     }
 
     private static void AddMarker(Plot plot, Marker marker, Panel panel)
@@ -162,26 +123,7 @@ public static class PictureDrawer
         text.LabelBackgroundColor = ToColour(PictureStyle.Paper).WithAlpha(0.85);
     }
 
-    private static void AddLegend(Plot plot, Panel panel)
-    {
-        if (!panel.HasLegend)
-        {
-            plot.Legend.IsVisible = false;
-            return;
-        }
-
-        plot.ShowLegend(Alignment.UpperRight, Orientation.Vertical);
-        plot.Legend.FontName = PictureFonts.Family;
-        plot.Legend.FontSize = PictureStyle.TickSize;
-        plot.Legend.FontColor = ToColour(PictureStyle.Text);
-        plot.Legend.OutlineWidth = 0;
-        plot.Legend.ShadowColor = Colors.Transparent;
-        plot.Legend.BackgroundColor = ToColour(PictureStyle.Paper).WithAlpha(0.9);
-    }
-
     private static double Along(PictureAxis axis, double value) => axis.IsLogarithmic ? Math.Log10(value) : value;
-
-    private static SKColor ToSkia(Rgb colour) => new(colour.Red, colour.Green, colour.Blue);
 
     private static Color ToColour(Rgb colour) => new(colour.Red, colour.Green, colour.Blue);
 }

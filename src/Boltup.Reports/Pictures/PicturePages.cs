@@ -28,7 +28,7 @@ public sealed class PicturePages(PredictionResult result, string provenance)
             }
         }
 
-        return pictures;
+        return PictureNames.MakeDistinct(pictures);
     }
 
     /// <summary>Level and phase of one response in one operation.</summary>
@@ -40,14 +40,10 @@ public sealed class PicturePages(PredictionResult result, string provenance)
         double[] hz = operation.Axis.Hz.ToArray();
         double[] level = Level(response.Values, operation.Amplitude, overall.Reference);
         double[] phase = Phase(response.Values);
-        string subtitle = string.Create(
-            CultureInfo.InvariantCulture, $"{operation.Name} · overall {overall.Decibels:F1} dB re {overall.Reference.Text} · {response.Dof}");
+        string subtitle = $"{operation.Name} · overall {overall.Text} re {overall.Reference.Text} · {response.Dof}";
         var levels = new Panel("", FrequencyAxisOf(operation.Axis, ""), LevelAxis([level], overall.Reference, 8), [new Series("", hz, level, colour)], (0, 0, 1, 0.7))
         {
-            Marker = new Marker(
-                overall.PeakHz,
-                overall.PeakDecibels,
-                string.Create(CultureInfo.InvariantCulture, $"{overall.PeakDecibels:F1} dB at {overall.PeakHz:G5} Hz")),
+            Marker = MarkerOf(overall),
         };
         var phases = new Panel("", FrequencyAxisOf(operation.Axis, "Frequency in Hz"), PhaseAxis, [new Series("", hz, phase, colour, Thin: true)], (0, 0.7, 1, 0.3));
         return Page($"{FileNames.FromName(operation.Name)}-{FileNames.FromName(response.Name)}", response.Name, subtitle, [levels, phases]);
@@ -61,9 +57,12 @@ public sealed class PicturePages(PredictionResult result, string provenance)
         int rows = (count + columns - 1) / columns;
         Panel[] panels = [.. Enumerable.Range(0, count).Select(i => OverviewPanel(
             i, ((double)(i % columns) / columns, (double)(i / columns) / rows, 1.0 / columns, 1.0 / rows)))];
-        string operations = string.Join(", ", result.Operations.Select(operation => operation.Name));
+        string operations = AreSeveral ? $"{result.Operations.Count} operations" : result.Operations[0].Name;
         return new Picture(
-            "overview", result.Title, $"Responses in {operations}", provenance, PictureStyle.SheetWidth, PictureStyle.SheetHeight, panels);
+            "overview", result.Title, $"Responses in {operations}", provenance, PictureStyle.SheetWidth, PictureStyle.SheetHeight, panels)
+        {
+            Legend = AreSeveral ? [.. result.Operations.Select((operation, i) => new LegendEntry(operation.Name, PictureStyle.LineAt(i)))] : [],
+        };
     }
 
     /// <summary>What each joint carries: the root of the summed powers of its forces.</summary>
@@ -75,17 +74,19 @@ public sealed class PicturePages(PredictionResult result, string provenance)
             .GroupBy(force => force.Joint)
             .Select((joint, i) => new Series(joint.Key, hz, JointLevel([.. joint], operation.Amplitude), PictureStyle.LineAt(i)))];
         var panel = new Panel(
-            "", FrequencyAxisOf(operation.Axis, "Frequency in Hz"), LevelAxis(series.Select(line => line.Y), LevelReference.Force, 8), series, (0, 0, 1, 1))
-        { HasLegend = true };
+            "", FrequencyAxisOf(operation.Axis, "Frequency in Hz"), LevelAxis(series.Select(line => line.Y), LevelReference.Force, 8), series, (0, 0, 1, 1));
         return Page(
             $"{FileNames.FromName(operation.Name)}-joint-forces",
             "Forces through the joints",
             $"{operation.Name} · root of the summed powers of the directions",
-            [panel]);
+            [panel]) with
+        { Legend = [.. series.Select(line => new LegendEntry(line.Name, line.Colour))] };
     }
 
     private static PictureAxis PhaseAxis => new(
         "Phase in °", -190, 190, false, [new(-180, "−180"), new(-90, ""), new(0, "0"), new(90, ""), new(180, "180")]);
+
+    private bool AreSeveral => result.Operations.Count > 1;
 
     private Picture Page(string name, string title, string subtitle, IReadOnlyList<Panel> panels) =>
         new(name, title, subtitle, $"{result.Title} · {provenance}", PictureStyle.PageWidth, PictureStyle.PageHeight, panels);
@@ -94,29 +95,36 @@ public sealed class PicturePages(PredictionResult result, string provenance)
     {
         ResponseSpectrum first = result.Operations[0].Responses[index];
         LevelReference reference = LevelReference.For(first.Quantity, first.Unit);
-        bool several = result.Operations.Count > 1;
         Series[] series = [.. result.Operations.Select((operation, i) => new Series(
             operation.Name,
             operation.Axis.Hz.ToArray(),
             Level(operation.Responses[index].Values, operation.Amplitude, reference),
-            PictureStyle.LineAt(several ? i : index)))];
+            PictureStyle.LineAt(AreSeveral ? i : index)))];
         string levels = string.Join(" / ", result.Operations.Select(operation => OverallLevel
-            .Of(operation.Responses[index], operation.Axis, operation.Amplitude).Decibels.ToString("F1", CultureInfo.InvariantCulture)));
+            .Of(operation.Responses[index], operation.Axis, operation.Amplitude).Text));
         return new Panel(
-            $"{first.Name} · {levels} dB",
+            $"{first.Name} · {levels}",
             FrequencyAxisOf(result.Axis, "Frequency in Hz"),
             LevelAxis(series.Select(line => line.Y), reference, 6),
             series,
-            place)
-        { HasLegend = several && index == 0 };
+            place);
     }
 
     private static PictureAxis FrequencyAxisOf(FrequencyAxis axis, string label)
     {
-        double from = axis.FirstHz > 0 ? axis.FirstHz : axis.Count > 1 ? axis[1] : 1;
-        double to = Math.Max(axis.LastHz, 2 * from);
+        // A single line stands in the middle of an octave.
+        double margin = axis.Hz[^1] > LowestHz(axis) ? 1 : Math.Sqrt(2);
+        double from = LowestHz(axis) / margin;
+        double to = Math.Max(axis.LastHz, LowestHz(axis)) * margin;
         return new PictureAxis(label, from, to, true, Ticks.OfFrequency(from, to));
     }
+
+    /// <summary>The lowest line that a logarithmic axis can show.</summary>
+    private static double LowestHz(FrequencyAxis axis) => axis.FirstHz > 0 ? axis.FirstHz : axis.Count > 1 ? axis[1] : 1;
+
+    private static Marker? MarkerOf(OverallLevel level) => double.IsFinite(level.PeakDecibels) && level.PeakHz > 0
+        ? new Marker(level.PeakHz, level.PeakDecibels, string.Create(CultureInfo.InvariantCulture, $"{level.PeakDecibels:F1} dB at {level.PeakHz:G5} Hz"))
+        : null;
 
     private static PictureAxis LevelAxis(IEnumerable<IReadOnlyList<double>> lines, LevelReference reference, int ticks)
     {
@@ -132,8 +140,8 @@ public sealed class PicturePages(PredictionResult result, string provenance)
 
     private static double[] Phase(IReadOnlyList<Complex> values)
     {
-        // A jump from −180° to 180° is no line: the gap hides it.
-        double[] phase = [.. values.Select(value => value.Phase * 180 / Math.PI)];
+        // A jump from −180° to 180° is no line: the gap hides it. Zero has no phase.
+        double[] phase = [.. values.Select(value => value == Complex.Zero ? double.NaN : value.Phase * 180 / Math.PI)];
         double[] shown = [.. phase];
         for (int i = 1; i < phase.Length; i++)
         {

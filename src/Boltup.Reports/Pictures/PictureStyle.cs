@@ -8,6 +8,12 @@ public static class PictureStyle
     public const int SheetWidth = 1600;
     public const int SheetHeight = 900;
 
+    /// <summary>From the rim of the page to its words.</summary>
+    public const float Edge = 28;
+
+    /// <summary>Share of the width that the legend may take from the subtitle.</summary>
+    public const float LegendShare = 0.65f;
+
     public const float TitleSize = 24;
     public const float SubtitleSize = 17;
     public const float LabelSize = 16;
@@ -24,19 +30,19 @@ public static class PictureStyle
     public static readonly Rgb FineGrid = new(0xF1, 0xF3, 0xF5);
 
     /// <summary>
-    /// Line colours in the order of use. Neighbours differ in hue and in lightness, so that they stay apart for colour-blind readers and in
-    /// grey print; each has a contrast of at least 3:1 with paper.
+    /// Line colours in the order of use. Any two are at least 20 CIE Lab units apart, for deutan and protan eyes as well; neighbours
+    /// differ in lightness, for grey print; each has a contrast of at least 3:1 with paper.
     /// </summary>
     public static IReadOnlyList<Rgb> Lines { get; } =
     [
-        new(0x12, 0x3F, 0x8C),
-        new(0xD9, 0x5F, 0x0E),
-        new(0x00, 0x6D, 0x55),
-        new(0xC2, 0x4C, 0x9B),
-        new(0x1E, 0x8F, 0xC4),
-        new(0x6E, 0x14, 0x23),
-        new(0x8C, 0x82, 0x00),
-        new(0x3A, 0x3A, 0x3A),
+        new(0x0F, 0x17, 0xA2),
+        new(0xCF, 0x7A, 0x06),
+        new(0x12, 0x73, 0x4D),
+        new(0xD0, 0x71, 0xAB),
+        new(0x2E, 0x6D, 0xDD),
+        new(0x56, 0x15, 0x06),
+        new(0x77, 0x58, 0x04),
+        new(0x31, 0x38, 0x3B),
     ];
 
     /// <summary>The colour of the series at a place; more series than colours begin again.</summary>

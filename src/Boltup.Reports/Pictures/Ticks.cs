@@ -5,8 +5,27 @@ namespace Boltup.Reports.Pictures;
 /// <summary>Ticks of axes.</summary>
 internal static class Ticks
 {
-    /// <summary>1-2-5 ticks with plain numbers (20, 500, 2k) and minor ticks at the other digits.</summary>
+    /// <summary>Fewer labels than this do not let a reader place a line.</summary>
+    private const int FewestLabels = 3;
+
+    /// <summary>
+    /// 1-2-5 ticks with plain numbers (20, 500, 2k) and minor ticks at the other digits. A band too narrow for them gets a label at
+    /// every digit, or even steps.
+    /// </summary>
     public static IReadOnlyList<AxisTick> OfFrequency(double fromHz, double toHz)
+    {
+        List<AxisTick> ticks = OfDigits(fromHz, toHz);
+        if (ticks.Count(tick => tick.IsMajor) >= FewestLabels)
+        {
+            return ticks;
+        }
+
+        return ticks.Count > FewestLabels
+            ? [.. ticks.Select(tick => new AxisTick(tick.At, Plain(tick.At)))]
+            : [.. Even(fromHz, toHz, 5).Select(tick => new AxisTick(tick.At, Plain(tick.At)))];
+    }
+
+    private static List<AxisTick> OfDigits(double fromHz, double toHz)
     {
         var ticks = new List<AxisTick>();
         for (double decade = Math.Pow(10, Math.Floor(Math.Log10(fromHz))); decade <= toHz; decade *= 10)
@@ -46,6 +65,6 @@ internal static class Ticks
     }
 
     private static string Plain(double hz) => hz >= 1000
-        ? (hz / 1000).ToString("G4", CultureInfo.InvariantCulture) + "k"
-        : hz.ToString("G4", CultureInfo.InvariantCulture);
+        ? (hz / 1000).ToString("G9", CultureInfo.InvariantCulture) + "k"
+        : hz.ToString("G9", CultureInfo.InvariantCulture);
 }

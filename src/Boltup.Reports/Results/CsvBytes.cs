@@ -42,6 +42,14 @@ internal sealed class CsvBytes(Stream output)
         return this;
     }
 
+    /// <summary>A number as text.</summary>
+    public static byte[] Format(double value)
+    {
+        Span<byte> text = stackalloc byte[LongestNumber];
+        Utf8Formatter.TryFormat(value, text, out int written);
+        return text[..written].ToArray();
+    }
+
     public CsvBytes Comma() => Text(","u8);
 
     public void EndRow()

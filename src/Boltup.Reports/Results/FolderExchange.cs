@@ -8,7 +8,8 @@ internal static partial class FolderExchange
     private const int CurrentDirectory = -100;
     private const uint Exchange = 2;
 
-    /// <returns>False where the system or the file system cannot, and nothing has happened.</returns>
+    /// <param name="first">The new folder; it takes over the permissions of the other.</param>
+    /// <returns>False where the system or the file system cannot, and both are where they were.</returns>
     public static bool TryExchange(string first, string second)
     {
         if (!OperatingSystem.IsLinux())
@@ -18,6 +19,7 @@ internal static partial class FolderExchange
 
         try
         {
+            File.SetUnixFileMode(first, File.GetUnixFileMode(second));
             return RenameAt2(CurrentDirectory, first, CurrentDirectory, second, Exchange) == 0;
         }
         catch (EntryPointNotFoundException)

@@ -3,35 +3,35 @@ using Boltup.Engine.Diagnostics;
 namespace Boltup.Reports.Results;
 
 /// <summary>
-/// Replaces the results in a folder as a whole: everything is written beside it first, then both folders change places. A run that fails
-/// or is killed leaves the earlier results as they were. Files that Boltup did not write are carried over.
+/// Replaces the results in a folder as a whole: everything is written elsewhere first. A folder that holds nothing but results changes places
+/// with the new one in one step, so that a run that fails or is killed leaves the earlier results as they were. Beside files that Boltup did
+/// not write, results are replaced file by file, and put back after a failure; those files are never moved or deleted.
 /// </summary>
 public sealed class OutputFolder : IDisposable
 {
     /// <summary>Lists, inside the folder, the files that are ours.</summary>
-    public const string Manifest = ".boltup-files";
+    public const string Manifest = FolderManifest.FileName;
 
     private readonly string _target;
-    private readonly string _staging;
-    private readonly List<string> _written = [];
-    private readonly Lock _lock = new();
+    private readonly StagingFolder _staging;
+    private Exception? _failure;
 
     private OutputFolder(string target)
     {
         _target = target;
-        _staging = $"{target}.boltup-{Environment.ProcessId}";
+        StagingFolder.SweepLeftovers(target);
+        _staging = StagingFolder.For(target);
     }
 
     /// <summary>Prepares to replace a folder.</summary>
     /// <returns>The folder, or null after an error in <paramref name="diagnostics"/>.</returns>
     public static OutputFolder? Prepare(string path, DiagnosticBag diagnostics)
     {
-        var folder = new OutputFolder(Path.GetFullPath(path).TrimEnd(Path.DirectorySeparatorChar));
         try
         {
-            folder.DeleteStaging();
-            Directory.CreateDirectory(folder._staging);
-            return folder;
+            var named = new DirectoryInfo(Path.TrimEndingDirectorySeparator(Path.GetFullPath(path)));
+            FileSystemInfo target = named.LinkTarget is null ? named : named.ResolveLinkTarget(returnFinalTarget: true)!;
+            return new OutputFolder(target.FullName);
         }
         catch (Exception exception) when (exception is IOException or UnauthorizedAccessException)
         {
@@ -40,17 +40,16 @@ public sealed class OutputFolder : IDisposable
         }
     }
 
-    /// <summary>Writes one file; may be called from several threads.</summary>
+    /// <summary>Writes one file; may be called from several threads. A failure shows at <see cref="Commit"/>.</summary>
     public void Write(string name, Action<Stream> write)
     {
-        using (FileStream stream = File.Create(Path.Combine(_staging, name)))
+        try
         {
-            write(stream);
+            _staging.Write(name, write);
         }
-
-        lock (_lock)
+        catch (Exception exception) when (exception is IOException or UnauthorizedAccessException)
         {
-            _written.Add(name);
+            Interlocked.CompareExchange(ref _failure, exception, null);
         }
     }
 
@@ -58,20 +57,25 @@ public sealed class OutputFolder : IDisposable
     /// <returns>Names of the files written, sorted; null after an error in <paramref name="diagnostics"/>.</returns>
     public IReadOnlyList<string>? Commit(DiagnosticBag diagnostics)
     {
-        _written.Sort(StringComparer.Ordinal);
+        if (_failure is { } failure)
+        {
+            SayCannotWrite(_target, failure, diagnostics);
+            return null;
+        }
+
         try
         {
-            string[] foreign = ForeignFiles();
-            string[] inTheWay = [.. foreign.Intersect(_written)];
+            string[] names = _staging.Seal();
+            string[] foreign = Directory.Exists(_target) ? FolderManifest.ForeignEntriesIn(_target) : [];
+            string[] inTheWay = [.. foreign.Intersect(names)];
             if (inTheWay.Length > 0)
             {
                 SayForeign(inTheWay, diagnostics);
                 return null;
             }
 
-            File.WriteAllLines(Path.Combine(_staging, Manifest), _written);
-            Swap(foreign);
-            return _written;
+            PutInPlace(names, foreign);
+            return names;
         }
         catch (Exception exception) when (exception is IOException or UnauthorizedAccessException)
         {
@@ -81,7 +85,7 @@ public sealed class OutputFolder : IDisposable
     }
 
     /// <summary>Removes what an unfinished run has written.</summary>
-    public void Dispose() => DeleteStaging();
+    public void Dispose() => _staging.Dispose();
 
     private static void SayCannotWrite(string path, Exception exception, DiagnosticBag diagnostics) => diagnostics.Error(
         ReportCodes.CannotWrite,
@@ -94,48 +98,31 @@ public sealed class OutputFolder : IDisposable
         $"`{_target}` holds {string.Join(", ", inTheWay.Select(name => $"`{name}`"))}, which Boltup did not write",
         help: "choose another folder with `-o`, or move the file away");
 
-    private void DeleteStaging()
-    {
-        if (Directory.Exists(_staging))
-        {
-            Directory.Delete(_staging, recursive: true);
-        }
-    }
-
-    /// <summary>Files and folders in the target that no earlier run wrote.</summary>
-    private string[] ForeignFiles()
+    private void PutInPlace(string[] names, string[] foreign)
     {
         if (!Directory.Exists(_target))
         {
-            return [];
+            _staging.Release();
+            Directory.Move(_staging.FullPath, _target);
+            File.Delete(Path.Combine(_target, FolderManifest.Journal));
         }
-
-        string manifest = Path.Combine(_target, Manifest);
-        HashSet<string> ours = [Manifest, .. File.Exists(manifest) ? File.ReadAllLines(manifest) : []];
-        return [.. Directory.EnumerateFileSystemEntries(_target).Select(entry => Path.GetFileName(entry)!).Where(name => !ours.Contains(name))];
+        else if (_staging.IsBeside && foreign.Length == 0 && FolderExchange.TryExchange(_staging.FullPath, _target))
+        {
+            File.Delete(Path.Combine(_target, FolderManifest.Journal));
+            GiveBackLateComers();
+        }
+        else
+        {
+            new FileReplacement(_staging, _target).Run(names);
+        }
     }
 
-    private void Swap(string[] foreign)
+    /// <summary>Files of others that came between the look into the folder and its exchange belong into the new one.</summary>
+    private void GiveBackLateComers()
     {
-        if (!Directory.Exists(_target))
+        foreach (string name in FolderManifest.ForeignEntriesIn(_staging.FullPath))
         {
-            Directory.Move(_staging, _target);
-            return;
+            Directory.Move(Path.Combine(_staging.FullPath, name), Path.Combine(_target, name));
         }
-
-        if (!FolderExchange.TryExchange(_staging, _target))
-        {
-            string old = $"{_staging}.old";
-            Directory.Move(_target, old);
-            Directory.Move(_staging, _target);
-            Directory.Move(old, _staging);
-        }
-
-        foreach (string name in foreign)
-        {
-            Directory.Move(Path.Combine(_staging, name), Path.Combine(_target, name));
-        }
-
-        DeleteStaging();
     }
 }

@@ -16,9 +16,10 @@ public static class ResultTables
         foreach (OperationResult operation in result.Operations)
         {
             byte[] name = CsvBytes.Field(operation.Name);
+            byte[][] hz = FrequenciesOf(operation.Axis);
             foreach (ResponseSpectrum response in operation.Responses)
             {
-                WriteSpectrum(csv, [.. name, (byte)',', .. CsvBytes.Field(response.Name)], operation.Axis, response.Values, response.Unit);
+                WriteSpectrum(csv, [.. name, (byte)',', .. CsvBytes.Field(response.Name)], hz, response.Values, response.Unit);
             }
         }
 
@@ -33,23 +34,36 @@ public static class ResultTables
         foreach (OperationResult operation in result.Operations)
         {
             byte[] name = CsvBytes.Field(operation.Name);
+            byte[][] hz = FrequenciesOf(operation.Axis);
             foreach (JointForceSpectrum force in operation.JointForces)
             {
                 byte[] key = [.. name, (byte)',', .. CsvBytes.Field(force.Joint), (byte)',', .. Encoding.UTF8.GetBytes(Dof.NameOf(force.Direction))];
-                WriteSpectrum(csv, key, operation.Axis, force.Values, force.Unit);
+                WriteSpectrum(csv, key, hz, force.Values, force.Unit);
             }
         }
 
         csv.Flush();
     }
 
-    private static void WriteSpectrum(CsvBytes csv, byte[] key, FrequencyAxis axis, IReadOnlyList<Complex> values, string unit)
+    /// <summary>Every spectrum of an operation has the same frequencies, so they are turned into text once.</summary>
+    private static byte[][] FrequenciesOf(FrequencyAxis axis)
+    {
+        var texts = new byte[axis.Count][];
+        for (int line = 0; line < texts.Length; line++)
+        {
+            texts[line] = CsvBytes.Format(axis[line]);
+        }
+
+        return texts;
+    }
+
+    private static void WriteSpectrum(CsvBytes csv, byte[] key, byte[][] hz, IReadOnlyList<Complex> values, string unit)
     {
         byte[] unitField = Encoding.UTF8.GetBytes(unit);
-        for (int line = 0; line < axis.Count; line++)
+        for (int line = 0; line < hz.Length; line++)
         {
             csv.Text(key).Comma()
-                .Number(axis[line]).Comma()
+                .Text(hz[line]).Comma()
                 .Number(values[line].Real).Comma()
                 .Number(values[line].Imaginary).Comma()
                 .Text(unitField)

@@ -46,7 +46,7 @@ public static class SummaryJson
         }
 
         double[] sorted = [.. perLine.Order()];
-        int worst = perLine.ToList().IndexOf(sorted[^1]);
+        int worst = perLine.Index().First(line => line.Item.Equals(sorted[^1])).Index;
         json.WriteStartObject("interface_condition");
         json.WriteFinite("largest", sorted[^1]);
         json.WriteNumber("largest_at_hz", result.Axis[worst]);
@@ -57,8 +57,10 @@ public static class SummaryJson
         json.WriteEndObject();
     }
 
-    /// <summary>Thousands of numbers in one line; three digits are plenty for a condition number.</summary>
-    private static string OneLine(IReadOnlyList<double> values) => $"[{string.Join(", ", values.Select(value => value.ToString("G3", CultureInfo.InvariantCulture)))}]";
+    /// <summary>Thousands of numbers in one line, null for a singular line; three digits are plenty for a condition number.</summary>
+    private static string OneLine(IReadOnlyList<double> values) => $"[{string.Join(", ", values.Select(Short))}]";
+
+    private static string Short(double value) => double.IsFinite(value) ? value.ToString("G3", CultureInfo.InvariantCulture) : "null";
 
     private static void WriteLevels(Utf8JsonWriter json, PredictionResult result)
     {
