@@ -27,7 +27,7 @@ internal sealed class CsvTable(CsvHeader header, string displayPath, DiagnosticB
     /// <summary>Takes a row; blank rows are passed over.</summary>
     public void Add(ReadOnlySpan<byte> row, int line)
     {
-        if (_errors > MaximumErrors || row.Trim((byte)' ').IsEmpty)
+        if (_errors > MaximumErrors || Blanks.Trim(row).IsEmpty)
         {
             return;
         }
@@ -158,7 +158,7 @@ internal sealed class CsvTable(CsvHeader header, string displayPath, DiagnosticB
     {
         ReadOnlySpan<byte> text = row[field];
         NumberForms forms = NumberForms.Plain;
-        if (NumberParser.TryParse(text.Trim((byte)' '), out value, ref forms) && (forms & ~NumberForms.NotFinite) == 0)
+        if (NumberParser.TryParse(Blanks.Trim(text), out value, ref forms) && (forms & ~NumberForms.NotFinite) == 0)
         {
             NoteNotFinite(forms, line, ColumnOf(row, field));
             return true;

@@ -1,17 +1,23 @@
 namespace Boltup.Files.Text;
 
 /// <summary>Reads lines of bytes forwards through one buffer; lines may end in LF, CR LF or CR.</summary>
-internal sealed class LineReader(ByteSource source)
+/// <param name="windowAfterMove">
+/// Bytes that are fetched first at another place; each further fetch doubles. Small for who jumps from header to header, so that the
+/// data between are not fetched.
+/// </param>
+internal sealed class LineReader(ByteSource source, int windowAfterMove = LineReader.LargestWindow)
 {
-    private const int InitialBuffer = 1 << 16;
+    private const int LargestWindow = 1 << 16;
 
     /// <summary>No line of any format is longer; what is longer is cut into pieces, so that binary bytes cannot fill the memory.</summary>
     private const int LongestLine = 1 << 16;
 
-    private readonly byte[] _buffer = new byte[Math.Min(InitialBuffer + LongestLine, source.Length + 1)];
+    private readonly byte[] _buffer = new byte[Math.Min(LargestWindow + LongestLine, source.Length + 1)];
     private long _bufferStart;
     private int _filled;
     private int _next;
+    private readonly int _windowAfterMove = windowAfterMove;
+    private int _window = windowAfterMove;
 
     /// <summary>Offset in the file of the line that is read next.</summary>
     public long Position => _bufferStart + _next;
@@ -41,7 +47,7 @@ internal sealed class LineReader(ByteSource source)
             return;
         }
 
-        (_bufferStart, _filled, _next) = (offset, 0, 0);
+        (_bufferStart, _filled, _next, _window) = (offset, 0, 0, _windowAfterMove);
     }
 
     /// <summary>Reads a line without its end; the span holds until the next call.</summary>
@@ -53,15 +59,19 @@ internal sealed class LineReader(ByteSource source)
             return false;
         }
 
-        int length = _buffer.AsSpan(_next, _filled - _next).IndexOfAny((byte)'\n', (byte)'\r');
-        if (length < 0 || _next + length + 1 >= _filled)
+        int length = FindEnd();
+        while ((length < 0 || _next + length + 1 >= _filled) && TryRefill())
         {
-            Refill();
-            length = _buffer.AsSpan(_next, _filled - _next).IndexOfAny((byte)'\n', (byte)'\r');
+            length = FindEnd();
         }
 
         LineStart = Position;
         int available = _filled - _next;
+        if (available == 0)
+        {
+            return false; // the file has become shorter
+        }
+
         length = Math.Min(length < 0 ? available : length, LongestLine);
         line = _buffer.AsSpan(_next, length);
         int endLength = PassEnd(_next + length);
@@ -83,12 +93,22 @@ internal sealed class LineReader(ByteSource source)
         return isPair ? 2 : 1;
     }
 
-    private void Refill()
+    private int FindEnd() => _buffer.AsSpan(_next, _filled - _next).IndexOfAny((byte)'\n', (byte)'\r');
+
+    private bool TryRefill()
     {
         int kept = _filled - _next;
+        if (kept > LongestLine)
+        {
+            return false;
+        }
+
         _buffer.AsSpan(_next, kept).CopyTo(_buffer);
         _bufferStart += _next;
         _next = 0;
-        _filled = kept + source.ReadAt(_bufferStart + kept, _buffer.AsSpan(kept));
+        int fetched = source.ReadAt(_bufferStart + kept, _buffer.AsSpan(kept, Math.Min(_window, _buffer.Length - kept)));
+        _filled = kept + fetched;
+        _window = Math.Min(2 * _window, LargestWindow);
+        return fetched > 0;
     }
 }

@@ -21,7 +21,7 @@ internal static class NumberParser
     public static bool TryParse(ReadOnlySpan<byte> text, out double value)
     {
         NumberForms forms = NumberForms.Plain;
-        return TryParse(text.Trim((byte)' '), out value, ref forms);
+        return TryParse(Blanks.Trim(text), out value, ref forms);
     }
 
     /// <summary>

@@ -42,7 +42,7 @@ internal static class AsciiData
 
     private static bool TryField(ReadOnlySpan<byte> field, out double value, bool hasNeighbour, ref NumberForms forms)
     {
-        bool fine = NumberParser.TryParse(field[^1] == ' ' ? field.TrimEnd((byte)' ') : field, out value, ref forms);
+        bool fine = NumberParser.TryParse(field[^1] == ' ' ? Blanks.TrimEnd(field) : field, out value, ref forms);
         forms |= hasNeighbour && field[0] != ' ' ? NumberForms.Touching : NumberForms.Plain;
         return fine;
     }
@@ -50,7 +50,7 @@ internal static class AsciiData
     /// <summary>Number of fields that a row really holds.</summary>
     public static int FieldsIn(ReadOnlySpan<byte> line, int[] widths)
     {
-        int length = line.TrimEnd((byte)' ').Length;
+        int length = Blanks.TrimEnd(line).Length;
         int fields = 0;
         for (int start = 0; fields < widths.Length && start < length; fields++)
         {

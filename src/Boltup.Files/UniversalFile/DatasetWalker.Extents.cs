@@ -1,4 +1,5 @@
 using Boltup.Engine.Diagnostics;
+using Boltup.Files.Text;
 
 namespace Boltup.Files.UniversalFile;
 
@@ -234,7 +235,7 @@ internal sealed partial class DatasetWalker
         bool ends = true;
         while (_lines.TryRead(out ReadOnlySpan<byte> line))
         {
-            if (!line.Trim((byte)' ').IsEmpty)
+            if (!Blanks.Trim(line).IsEmpty)
             {
                 ends = IsDelimiter(line);
                 break;

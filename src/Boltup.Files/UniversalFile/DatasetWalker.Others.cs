@@ -1,5 +1,6 @@
 using System.Text;
 using Boltup.Engine.Prediction;
+using Boltup.Files.Text;
 
 namespace Boltup.Files.UniversalFile;
 
@@ -12,7 +13,7 @@ internal sealed partial class DatasetWalker
         _liberties.Place = new(_displayPath, _lines.LineNumber);
         while (TryReadInside(out ReadOnlySpan<byte> line))
         {
-            if (line.Trim((byte)' ').IsEmpty)
+            if (Blanks.Trim(line).IsEmpty)
             {
                 continue;
             }

@@ -13,8 +13,8 @@ internal sealed partial class DatasetWalker
     /// <summary>Beyond this the file is not what it says, and more messages help nobody.</summary>
     private const int MaximumWarnings = 50;
 
-    /// <summary>Kinds of skipped dataset that are named one by one.</summary>
-    private const int MaximumKinds = 20;
+    /// <summary>Room for the header of a function.</summary>
+    private const int HeaderWindow = 2048;
 
     private readonly ByteSource _source;
     private readonly LineReader _lines;
@@ -22,7 +22,7 @@ internal sealed partial class DatasetWalker
     private readonly DiagnosticBag _diagnostics;
     private readonly Liberties _liberties;
     private readonly FunctionBuilder _builder;
-    private readonly SortedDictionary<int, int> _skipped = [];
+    private readonly SkippedDatasets _skipped = new();
     private readonly List<Curve> _curves = [];
     private readonly List<FunctionRecord> _records = [];
     private readonly List<MeasuredPoint> _points = [];
@@ -35,7 +35,7 @@ internal sealed partial class DatasetWalker
     public DatasetWalker(ByteSource source, string displayPath, DiagnosticBag diagnostics)
     {
         (_source, _displayPath, _diagnostics) = (source, displayPath, diagnostics);
-        _lines = new LineReader(source);
+        _lines = new LineReader(source, HeaderWindow);
         _liberties = new Liberties(displayPath);
         _builder = new FunctionBuilder(_liberties);
     }
@@ -49,7 +49,7 @@ internal sealed partial class DatasetWalker
 
     /// <summary>Whether a line opens or closes a dataset: −1 in the first six columns and nothing else.</summary>
     public static bool IsDelimiter(ReadOnlySpan<byte> line) =>
-        line.Length >= 2 && line.Length <= 80 && line.Trim((byte)' ').SequenceEqual("-1"u8) && line.IndexOf((byte)'-') <= 4;
+        line.Length >= 2 && line.Length <= 80 && line.IndexOf((byte)'-') <= 4 && Blanks.Trim(line).SequenceEqual("-1"u8);
 
     public void Walk()
     {
@@ -61,7 +61,7 @@ internal sealed partial class DatasetWalker
             }
         }
 
-        SaySkipped();
+        _skipped.SayAll(_displayPath, _diagnostics);
         if (_leftOut > MaximumWarnings)
         {
             _diagnostics.Warning(
@@ -75,31 +75,6 @@ internal sealed partial class DatasetWalker
         }
 
         _liberties.SayAll(_diagnostics);
-    }
-
-    private void SaySkipped()
-    {
-        int named = 0;
-        foreach ((int number, int count) in _skipped)
-        {
-            if (++named > MaximumKinds)
-            {
-                break;
-            }
-
-            _diagnostics.Note(
-                FileCodes.SkippedDataset,
-                $"{count} dataset{(count == 1 ? "" : "s")} {number} {(count == 1 ? "was" : "were")} skipped",
-                new SourceSpan(_displayPath));
-        }
-
-        if (_skipped.Count > MaximumKinds)
-        {
-            _diagnostics.Note(
-                FileCodes.SkippedDataset,
-                $"datasets of {_skipped.Count - MaximumKinds} more numbers were skipped",
-                new SourceSpan(_displayPath));
-        }
     }
 
     private void ReadDataset()
@@ -142,7 +117,7 @@ internal sealed partial class DatasetWalker
                 SkipDataset();
                 break;
             default:
-                _skipped[number] = _skipped.GetValueOrDefault(number) + 1;
+                _skipped.Add(number);
                 SkipDataset();
                 break;
         }

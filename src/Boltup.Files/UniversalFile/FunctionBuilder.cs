@@ -14,7 +14,9 @@ internal sealed class FunctionBuilder(Liberties liberties)
     private const double SmallestStep = 1e-10;
 
     private readonly AxisPool _axes = new();
-    private (double First, double Step, int Count) _lastEven;
+    private double _lastFirst;
+    private double _lastStep;
+    private int _lastCount;
     private FrequencyAxis? _lastEvenAxis;
 
     /// <summary>Whether a function that does not name its abscissa must be over frequency.</summary>
@@ -33,10 +35,11 @@ internal sealed class FunctionBuilder(Liberties liberties)
     /// <summary>Lines first + i·step, or null when they are no axis; equal axes are one instance.</summary>
     public FrequencyAxis? EvenAxis(double first, double step, int count)
     {
-        if (_lastEvenAxis is null || _lastEven != (first, step, count))
+        if (_lastEvenAxis is null || _lastFirst != first || _lastStep != step || _lastCount != count)
         {
             FrequencyAxis? axis = RebuildEven(first, step, count);
-            (_lastEven, _lastEvenAxis) = ((first, step, count), axis is null ? null : _axes.Share(axis.Hz));
+            _lastEvenAxis = axis is null ? null : _axes.Share(axis.Hz);
+            (_lastFirst, _lastStep, _lastCount) = (first, step, count);
         }
 
         return _lastEvenAxis;

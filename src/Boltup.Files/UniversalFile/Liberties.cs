@@ -6,7 +6,7 @@ namespace Boltup.Files.UniversalFile;
 /// <summary>Counts liberties, so that a file with a thousand records that break one rule draws one note.</summary>
 internal sealed class Liberties(string displayPath)
 {
-    private readonly Dictionary<(DiagnosticCode Code, string Text), (SourceSpan Span, int Count)> _taken = [];
+    private readonly Dictionary<string, TakenLiberty> _taken = new(StringComparer.Ordinal);
 
     private static readonly (NumberForms Form, Liberty Liberty)[] OfForms =
     [
@@ -23,8 +23,12 @@ internal sealed class Liberties(string displayPath)
 
     public void Note(DiagnosticCode code, string text)
     {
-        (SourceSpan span, int count) = _taken.GetValueOrDefault((code, text), (Place, 0));
-        _taken[(code, text)] = (span, count + 1);
+        if (!_taken.TryGetValue(text, out TakenLiberty? taken))
+        {
+            _taken.Add(text, taken = new TakenLiberty(code, text, Place));
+        }
+
+        taken.Count++;
     }
 
     /// <summary>Takes the liberties that reading numbers of these forms means.</summary>
@@ -42,9 +46,9 @@ internal sealed class Liberties(string displayPath)
     /// <summary>Says everything that was noted.</summary>
     public void SayAll(DiagnosticBag diagnostics)
     {
-        foreach (((DiagnosticCode code, string text), (SourceSpan span, int count)) in _taken)
+        foreach (TakenLiberty taken in _taken.Values)
         {
-            diagnostics.Note(code, text, span, notes: count > 1 ? [$"{count} times in this file"] : []);
+            diagnostics.Note(taken.Code, taken.Text, taken.Span, notes: taken.Count > 1 ? [$"{taken.Count} times in this file"] : []);
         }
 
         _taken.Clear();
