@@ -94,18 +94,31 @@ internal sealed unsafe partial class VectorLu<T>
     private static void SolveUpperBlock(
         double* a, long* rows, double* inverse, double* c, long* cRows, int row, int height, int width)
     {
+        int column = 0;
+        if (height == 4)
+        {
+            double** m = stackalloc double*[4];
+            double** target = stackalloc double*[4];
+            PointTo(a, rows, row, row, m);
+            for (; column + 2 <= width; column += 2)
+            {
+                PointTo(c, cRows, row, column, target);
+                TriangleKernel<T>.SolveUpper(m, target, inverse + (nint)row * Entry);
+            }
+        }
+
         for (int i = height - 1; i >= 0; i--)
         {
             double* beside = a + rows[row + i] + (nint)(row + i + 1) * Entry;
-            SubtractRows(beside, c, cRows + row + i + 1, height - 1 - i, c + cRows[row + i], 0, width);
-            ScaleRow(inverse + (nint)(row + i) * Entry, c + cRows[row + i], width);
+            SubtractRows(beside, c, cRows + row + i + 1, height - 1 - i, c + cRows[row + i], column, width);
+            ScaleRow(inverse + (nint)(row + i) * Entry, c + cRows[row + i], column, width);
         }
     }
 
-    private static void ScaleRow(double* factor, double* row, int width)
+    private static void ScaleRow(double* factor, double* row, int from, int to)
     {
         T fr = T.Load(factor), fi = T.Load(factor + Imaginary);
-        for (int column = 0; column < width; column++)
+        for (int column = from; column < to; column++)
         {
             double* entry = row + (nint)column * Entry;
             (T r, T i) = Times(T.Load(entry), T.Load(entry + Imaginary), fr, fi);
@@ -118,7 +131,7 @@ internal sealed unsafe partial class VectorLu<T>
     {
         for (int k = 0; k < _evenOrder; k++)
         {
-            ScaleRow(inverse + (nint)k * Entry, c + cRows[k], width);
+            ScaleRow(inverse + (nint)k * Entry, c + cRows[k], 0, width);
             for (int i = k + 1; i < _evenOrder; i++)
             {
                 SubtractRow(a + rows[k] + (nint)i * Entry, c + cRows[k], c + cRows[i], 0, width);

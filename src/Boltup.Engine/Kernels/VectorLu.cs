@@ -164,9 +164,30 @@ internal sealed unsafe partial class VectorLu<T> : LuKernel
     /// <summary>Solves with the unit lower triangle of a diagonal block.</summary>
     private static void SolveLowerBlock(double* a, long* rows, double* c, long* cRows, int row, int height, int from, int to)
     {
+        if (height == 4)
+        {
+            double** m = stackalloc double*[4];
+            double** target = stackalloc double*[4];
+            PointTo(a, rows, row, row, m);
+            for (; from + 2 <= to; from += 2)
+            {
+                PointTo(c, cRows, row, from, target);
+                TriangleKernel<T>.SolveLower(m, target);
+            }
+        }
+
         for (int i = 1; i < height; i++)
         {
             SubtractRows(a + rows[row + i] + (nint)row * Entry, c, cRows + row, i, c + cRows[row + i], from, to);
+        }
+    }
+
+    /// <summary>Points to a column in four rows from one on.</summary>
+    private static void PointTo(double* matrix, long* rows, int row, int column, double** pointers)
+    {
+        for (int i = 0; i < 4; i++)
+        {
+            pointers[i] = matrix + rows[row + i] + (nint)column * Entry;
         }
     }
 
