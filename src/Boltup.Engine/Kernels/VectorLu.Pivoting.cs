@@ -5,6 +5,9 @@ namespace Boltup.Engine.Kernels;
 /// <summary>Choice and exchange of pivot rows.</summary>
 internal sealed unsafe partial class VectorLu<T>
 {
+    /// <summary>Squares of pivots between this and its reciprocal are inverted without scaling.</summary>
+    private const double LargestSquare = 1e280;
+
     /// <summary>Finds and places the pivot of a column, and keeps its reciprocal.</summary>
     private void Pivot(int group, double* a, long* rows, int column, double* inverse)
     {
@@ -114,10 +117,25 @@ internal sealed unsafe partial class VectorLu<T>
         T.Store(T.Select(mask, x, y), second);
     }
 
-    /// <summary>1/(x + jy) with both parts scaled by the larger one (Smith, CACM 5 (1962) 435).</summary>
+    /// <summary>1/(x + jy): by x² + y² where that is far from overflow and underflow in every lane, otherwise scaled.</summary>
     private static void StoreReciprocal(double* pivot, double* target)
     {
         T x = T.Load(pivot), y = T.Load(pivot + Imaginary);
+        T square = T.MultiplyAdd(x, x, y * y);
+        T isSafe = T.GreaterThan(T.Broadcast(LargestSquare), square);
+        if ((T.Bits(T.GreaterThan(square, T.Broadcast(1 / LargestSquare))) & T.Bits(isSafe)) == AllLanes)
+        {
+            T inverse = T.Broadcast(1) / square;
+            BlockKernel<T>.Store(target, x * inverse, default(T) - y * inverse);
+            return;
+        }
+
+        StoreScaledReciprocal(x, y, target);
+    }
+
+    /// <summary>1/(x + jy) with both parts scaled by the larger one (Smith, CACM 5 (1962) 435).</summary>
+    private static void StoreScaledReciprocal(T x, T y, double* target)
+    {
         T absX = T.Abs(x), absY = T.Abs(y);
         T scale = T.Broadcast(1) / T.Select(T.GreaterThan(absX, absY), absX, absY);
         T p = x * scale, q = y * scale;
