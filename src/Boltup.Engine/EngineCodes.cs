@@ -147,4 +147,11 @@ public static class EngineCodes
         "A linear passive structure responds at i to a force at j as it does at j to a force at i (Maxwell–Betti, Rayleigh). Where the two FRFs differ, a sensor or hammer position, axis or calibration differs between the two measurements.",
         "m1.x / m2.z measured with the sensor turned over",
         "Check position, direction and calibration of sensor and hammer at the two dofs that are named. Nothing is repaired silently.");
+
+    public static readonly DiagnosticCode NothingAsked = new(
+        "ENG021",
+        "the assembly asks for nothing",
+        "Without an operation there are no forces, and without a response or a joint there is nothing to read. The result files hold their headers only.",
+        "an assembly that has parts and joints, but no `operations`",
+        "Add `operations` with forces, and `responses` with the dofs that matter.");
 }

@@ -12,6 +12,7 @@ public static class AssemblyRules
     public static bool Check(AssemblyModel assembly, CouplingLayout layout, DiagnosticBag diagnostics)
     {
         var found = new DiagnosticBag();
+        SayWhenNothingIsAsked(assembly, found);
         ConnectionRules.Check(assembly, found);
         SourceRules.Check(assembly, layout, found);
         AxisRules.Check(assembly, found);
@@ -22,5 +23,17 @@ public static class AssemblyRules
 
         diagnostics.AddRange(found.Items);
         return !found.HasErrors;
+    }
+
+    private static void SayWhenNothingIsAsked(AssemblyModel assembly, DiagnosticBag found)
+    {
+        bool hasForces = assembly.Operations.Count > 0;
+        if (!hasForces || assembly.Responses.Count + assembly.Joints.Count == 0)
+        {
+            found.Warning(
+                EngineCodes.NothingAsked,
+                $"`{assembly.Title}` has no {(hasForces ? "responses and no joints" : "operations")}: there is nothing to predict",
+                help: hasForces ? "add `responses`" : "add `operations` with forces");
+        }
     }
 }

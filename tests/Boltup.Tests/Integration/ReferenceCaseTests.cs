@@ -1,4 +1,5 @@
 using System.Numerics;
+using System.Text.RegularExpressions;
 using Boltup.Config;
 using Boltup.Config.Planning;
 using Boltup.Engine.Diagnostics;
@@ -56,11 +57,37 @@ public class ReferenceCaseTests
     public void ContactForcesOfOtherMounts_AreWrong() =>
         Assert.True(Near.RelativeError(Truth("contact-tabled"), JointForces(Constant.Value, "blocked")) > 0.1);
 
-    private static PredictionResult Predict(string name)
+    /// <summary>
+    /// The whole vehicle turned by a quarter about z and moved: a stiffness along x is then one along y, while a vertical acceleration and
+    /// the sound at the ears do not change. The response along x becomes one along y.
+    /// </summary>
+    [Fact]
+    public void BlockedForces_OnTheTurnedAssembly_GiveTheSameResponses()
+    {
+        string folder = Repository.Data("case1");
+        string placed = "turned: { about: z, by: 90 deg }, moved: [2 m, 1 m, 0.5 m] }";
+        string text = File.ReadAllText(Path.Combine(folder, "constant.assembly.yaml"))
+            .Replace("compressor: ../../../../configs/parts/compressor.part.yaml", $"compressor: {{ file: compressor.part.yaml, {placed}", StringComparison.Ordinal)
+            .Replace("body: ../../../../configs/parts/body.part.yaml", $"body: {{ file: body.part.yaml, {placed}", StringComparison.Ordinal)
+            .Replace("compressor.part.yaml", Repository.PathTo("configs", "parts", "compressor.part.yaml"), StringComparison.Ordinal)
+            .Replace("body.part.yaml", Repository.PathTo("configs", "parts", "body.part.yaml"), StringComparison.Ordinal)
+            .Replace("file: ../../../../", $"file: {Repository.Root}/", StringComparison.Ordinal)
+            .Replace("file: forces/", $"file: {folder}/forces/", StringComparison.Ordinal)
+            .Replace("steering_column.x", "steering_column.y", StringComparison.Ordinal);
+        text = Regex.Replace(text, @"\{ x: ([^,]+), y: ([^,]+),", "{ x: $2, y: $1,");
+        using var temporary = new TemporaryFolder();
+        PredictionResult turned = PredictFile(temporary.Write("turned.assembly.yaml", text));
+
+        // By the right-hand rule the part's x points along the assembly's y.
+        AssertResponses("response", turned, "blocked", Same);
+    }
+
+    private static PredictionResult Predict(string name) => PredictFile(Repository.Data("case1", $"{name}.assembly.yaml"));
+
+    private static PredictionResult PredictFile(string path)
     {
         var diagnostics = new DiagnosticBag();
-        using AssemblyPlan? plan = AssemblyPlanner.Plan(
-            Repository.Data("case1", $"{name}.assembly.yaml"), new LoadOptions(), diagnostics);
+        using AssemblyPlan? plan = AssemblyPlanner.Plan(path, new LoadOptions { AllowOutsidePaths = true }, diagnostics);
         PredictionResult? result = plan is null ? null : Predictor.Predict(plan.Assembly, diagnostics);
         Assert.True(result is not null, string.Join("\n", diagnostics.Items.Select(item => $"{item.Span}: {item.Message}")));
         return result;

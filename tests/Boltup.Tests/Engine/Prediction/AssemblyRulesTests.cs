@@ -100,6 +100,15 @@ public class AssemblyRulesTests
     }
 
     [Fact]
+    public void Predict_NoOperations_SaysThatNothingIsAsked()
+    {
+        var diagnostics = new DiagnosticBag();
+        var assembly = new AssemblyModel("empty", Axis, [Source, Receiver], [Mounted], [], [Chain.At(Seat)]);
+        Assert.NotNull(Predictor.Predict(assembly, diagnostics));
+        Assert.Equal("`empty` has no operations: there is nothing to predict", Assert.Single(diagnostics.Items).Message);
+    }
+
+    [Fact]
     public void Predict_JoinedPointsApart_IsAWarningWithTheDistance()
     {
         PlacedPart Placed(PlacedPart part, string point, double x) =>
