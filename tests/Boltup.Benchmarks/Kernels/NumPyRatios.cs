@@ -34,14 +34,16 @@ internal static class NumPyRatios
     {
         TiledMatrix a = FrfTiles.ModalSum(order, Lines);
         TiledMatrix b = FrfTiles.Random(order, columns, Lines);
+        Worker[] single = [new Worker(order, columns)];
+        Worker[] pair = [new Worker(order, columns), new Worker(order, columns)];
         double numPy = double.PositiveInfinity;
         double one = double.PositiveInfinity;
         double two = double.PositiveInfinity;
         for (int turn = 0; turn < Turns; turn++)
         {
             numPy = Math.Min(numPy, TimeNumPy(order, columns));
-            one = Math.Min(one, Shortest(() => SolveAll(a, b, threads: 1)));
-            two = Math.Min(two, Shortest(() => SolveAll(a, b, threads: 2)));
+            one = Math.Min(one, Shortest(() => SolveAll(a, b, single)));
+            two = Math.Min(two, Shortest(() => SolveAll(a, b, pair)));
         }
 
         double flops = 8.0 * Lines * order * order * (order / 3.0 + columns);
@@ -65,24 +67,14 @@ internal static class NumPyRatios
         return best;
     }
 
-    private static void SolveAll(TiledMatrix a, TiledMatrix b, int threads)
+    /// <summary>Solves all tiles on one or two threads, each with its own buffers, which are allocated once.</summary>
+    private static void SolveAll(TiledMatrix a, TiledMatrix b, Worker[] workers)
     {
+        int threads = workers.Length;
         Task[] others = [.. Enumerable.Range(1, threads - 1).Select(i => Task.Run(
-            () => SolveRange(a, b, a.TileCount * i / threads, a.TileCount * (i + 1) / threads)))];
-        SolveRange(a, b, 0, a.TileCount / threads);
+            () => workers[i].Solve(a, b, a.TileCount * i / threads, a.TileCount * (i + 1) / threads)))];
+        workers[0].Solve(a, b, 0, a.TileCount / threads);
         Task.WaitAll(others);
-    }
-
-    private static void SolveRange(TiledMatrix a, TiledMatrix b, int from, int to)
-    {
-        var lu = new BatchLu(a.Rows);
-        var work = new TiledMatrix(Tiling.Lanes, b.Rows, b.Columns);
-        for (int tile = from; tile < to; tile++)
-        {
-            b.Tile(tile).CopyTo(work.Tile(0));
-            lu.Factor(a.Tile(tile), a.Rows);
-            lu.Solve(work.Tile(0), b.Columns);
-        }
     }
 
     private static double TimeNumPy(int order, int columns)
@@ -96,4 +88,21 @@ internal static class NumPyRatios
     }
 
     private static string ScriptPath([CallerFilePath] string file = "") => Path.Combine(Path.GetDirectoryName(file)!, "numpy_solve.py");
+
+    /// <summary>The buffers of one thread.</summary>
+    private sealed class Worker(int order, int columns)
+    {
+        private readonly BatchLu _lu = new(order);
+        private readonly TiledMatrix _work = new(Tiling.Lanes, order, columns);
+
+        public void Solve(TiledMatrix a, TiledMatrix b, int from, int to)
+        {
+            for (int tile = from; tile < to; tile++)
+            {
+                b.Tile(tile).CopyTo(_work.Tile(0));
+                _lu.Factor(a.Tile(tile), a.Rows);
+                _lu.Solve(_work.Tile(0), b.Columns);
+            }
+        }
+    }
 }
