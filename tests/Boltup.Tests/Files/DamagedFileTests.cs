@@ -35,8 +35,23 @@ public class DamagedFileTests
         }
     }
 
+    /// <summary>Every file of the dialect corpus.</summary>
+    public static TheoryData<string> Corpus() =>
+        [.. Directory.EnumerateFiles(Repository.Data("files", "dialects"), "*.uff").Select(path => Path.GetFileNameWithoutExtension(path)).Order(StringComparer.Ordinal)];
+
     [Theory]
-    [MemberData(nameof(Samples))]
+    [MemberData(nameof(Corpus))]
+    public void Read_AnyDialectTruncatedAnywhere_NeverThrowsNorTakesMuchMemory(string name)
+    {
+        byte[] whole = Bytes(name);
+        for (int length = 0; length < whole.Length; length++)
+        {
+            ReadBounded(whole.AsSpan(0, length));
+        }
+    }
+
+    [Theory]
+    [MemberData(nameof(Corpus))]
     public void Read_FlippedBytes_NeverThrowsNorTakesMuchMemory(string name)
     {
         byte[] whole = Bytes(name);
