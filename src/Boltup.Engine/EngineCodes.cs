@@ -3,7 +3,7 @@ using Boltup.Engine.Diagnostics;
 namespace Boltup.Engine;
 
 /// <summary>Diagnostics of the engine: what the physics or the data of an assembly do not allow.</summary>
-public static class EngineCodes
+public static partial class EngineCodes
 {
     public static readonly DiagnosticCode SingularInterface = new(
         "ENG001",

@@ -1,4 +1,3 @@
-using Boltup.Engine.Kernels;
 using Boltup.Engine.Spectra;
 
 namespace Boltup.Engine.Coupling;
@@ -9,14 +8,10 @@ namespace Boltup.Engine.Coupling;
 /// </summary>
 internal sealed class InterfaceMatrix
 {
-    private const int LargestMount = 6;
-
     private readonly CouplingLayout _layout;
     private readonly FrequencyAxis _axis;
     private readonly IReadOnlyList<TiledMatrix?> _frfs;
-    private readonly TiledMatrix _stiffness = new(Tiling.Lanes, LargestMount, LargestMount);
-    private readonly TiledMatrix _compliance = new(Tiling.Lanes, LargestMount, LargestMount);
-    private readonly BatchLu _mountLu = new(LargestMount);
+    private readonly MountCompliance _compliance = new();
     private readonly int _order;
 
     /// <param name="frfs">FRFs of each part in the order of the layout, null for a part that is not used.</param>
@@ -67,21 +62,7 @@ internal sealed class InterfaceMatrix
     private void AddCompliance(Joint joint, int first, int tile, Span<double> target)
     {
         int size = joint.Directions.Count;
-        int length = size * size * Tiling.EntryLength;
-        Span<double> stiffness = _stiffness.Tile(0)[..length];
-        Span<double> compliance = _compliance.Tile(0)[..length];
-        joint.Mount!.FillStiffness(_axis, tile, stiffness);
-        TileEntry.FillIdentity(compliance, size);
-        if (joint.Mount.IsDiagonal)
-        {
-            TileEntry.InvertDiagonal(stiffness, compliance, size);
-        }
-        else
-        {
-            _mountLu.Factor(stiffness, size);
-            _mountLu.Solve(compliance, size);
-        }
-
+        ReadOnlySpan<double> compliance = _compliance.Of(joint.Mount!, _axis, tile);
         for (int i = 0; i < size * size; i++)
         {
             (int row, int column) = (first + i / size, first + i % size);

@@ -52,21 +52,10 @@ public sealed class LumpedPart : IPartModel
             lu.Factor(dynamicStiffness.Tile(0), order);
             lu.Solve(unitForces.Tile(0), columns.Count);
             CopyRows(rows, unitForces, frf.Values, tile);
-            CollectSingular(lu.SingularLanes, axis, tile, singularHz);
+            LaneLines.Collect(lu.SingularLanes, axis, tile, singularHz);
         }
 
         return singularHz.Count == 0 ? frf : RefuseSingular(singularHz, diagnostics);
-    }
-
-    private static void CollectSingular(byte lanes, FrequencyAxis axis, int tile, List<double> singularHz)
-    {
-        for (int lane = 0; lane < Tiling.Lanes && tile * Tiling.Lanes + lane < axis.Count; lane++)
-        {
-            if ((lanes >> lane & 1) != 0)
-            {
-                singularHz.Add(axis[tile * Tiling.Lanes + lane]);
-            }
-        }
     }
 
     private FrfMatrix? RefuseSingular(List<double> singularHz, DiagnosticBag diagnostics)
