@@ -9,6 +9,12 @@ if (args is ["ratios", .. string[] orders])
     return;
 }
 
+if (args is ["inverses"])
+{
+    InverseRatios.Run(Console.Out);
+    return;
+}
+
 if (args is ["files"])
 {
     FileRates.Run(Console.Out);

@@ -34,7 +34,7 @@ public sealed unsafe class BatchLu
     public void Factor(ReadOnlySpan<double> tile, int order)
     {
         ArgumentOutOfRangeException.ThrowIfGreaterThan(order, _maxOrder);
-        RequireLength(tile, order, order);
+        TileSize.Require(tile, order, order);
         _order = order;
         fixed (double* matrix = tile)
         {
@@ -46,7 +46,7 @@ public sealed unsafe class BatchLu
     /// <param name="tile">order × columns entries.</param>
     public void Solve(Span<double> tile, int columns)
     {
-        RequireLength(tile, _order, columns);
+        TileSize.Require(tile, _order, columns);
         fixed (double* rightHandSides = tile)
         {
             _kernel.Solve(rightHandSides, columns);
@@ -57,7 +57,7 @@ public sealed unsafe class BatchLu
     /// <param name="tile">order × columns entries.</param>
     public void SolveTransposed(Span<double> tile, int columns)
     {
-        RequireLength(tile, _order, columns);
+        TileSize.Require(tile, _order, columns);
         fixed (double* rightHandSides = tile)
         {
             _kernel.SolveTransposed(rightHandSides, columns);
@@ -72,7 +72,7 @@ public sealed unsafe class BatchLu
     /// <param name="lanes">Receives 8 condition numbers.</param>
     public void EstimateCondition(ReadOnlySpan<double> tile, Span<double> lanes)
     {
-        RequireLength(tile, _order, _order);
+        TileSize.Require(tile, _order, _order);
         var estimate = new InverseNormEstimate(this, _probe.Span[..(_order * Tiling.EntryLength)], _order);
         estimate.Run(lanes);
         Span<double> norm = stackalloc double[Tiling.Lanes];
@@ -81,14 +81,6 @@ public sealed unsafe class BatchLu
         {
             double condition = norm[lane] * lanes[lane];
             lanes[lane] = (SingularLanes >> lane & 1) != 0 || double.IsNaN(condition) ? double.PositiveInfinity : condition;
-        }
-    }
-
-    private static void RequireLength(ReadOnlySpan<double> tile, int rows, int columns)
-    {
-        if (tile.Length < rows * columns * Tiling.EntryLength)
-        {
-            throw new ArgumentException($"a tile of {rows} × {columns} entries needs {rows * columns * Tiling.EntryLength} numbers, not {tile.Length}");
         }
     }
 }

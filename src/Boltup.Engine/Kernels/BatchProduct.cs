@@ -17,9 +17,9 @@ public static unsafe class BatchProduct
     public static void Multiply(
         ReadOnlySpan<double> a, ReadOnlySpan<double> b, Span<double> result, int rows, int inner, int columns, KernelVariant? variant = null)
     {
-        Require(a, rows * inner);
-        Require(b, inner * columns);
-        Require(result, rows * columns);
+        TileSize.Require(a, rows, inner);
+        TileSize.Require(b, inner, columns);
+        TileSize.Require(result, rows, columns);
         Span<double> product = result[..(rows * columns * Tiling.EntryLength)];
         product.Clear();
         fixed (double* pa = a, pb = b, pc = product)
@@ -106,12 +106,4 @@ public static unsafe class BatchProduct
 
     private static Complex Read(double* tile, int entry, int lane) =>
         new(tile[entry * Tiling.EntryLength + lane], tile[entry * Tiling.EntryLength + Tiling.Lanes + lane]);
-
-    private static void Require(ReadOnlySpan<double> tile, int entries)
-    {
-        if (tile.Length < entries * Tiling.EntryLength)
-        {
-            throw new ArgumentException($"a tile of {entries} entries needs {entries * Tiling.EntryLength} numbers, not {tile.Length}");
-        }
-    }
 }

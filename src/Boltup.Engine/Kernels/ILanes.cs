@@ -34,6 +34,8 @@ internal unsafe interface ILanes<TSelf>
 
     static abstract TSelf Abs(TSelf a);
 
+    static abstract TSelf Sqrt(TSelf a);
+
     /// <summary>All bits of a lane set where a &gt; b; clear where either is NaN.</summary>
     static abstract TSelf GreaterThan(TSelf a, TSelf b);
 

@@ -43,6 +43,9 @@ internal readonly unsafe struct Lanes128(Vector128<double> value) : ILanes<Lanes
     public static Lanes128 Abs(Lanes128 a) => new(Vector128.Abs(a._value));
 
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static Lanes128 Sqrt(Lanes128 a) => new(Vector128.Sqrt(a._value));
+
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static Lanes128 GreaterThan(Lanes128 a, Lanes128 b) => new(Vector128.GreaterThan(a._value, b._value));
 
     [MethodImpl(MethodImplOptions.AggressiveInlining)]

@@ -44,6 +44,9 @@ internal readonly unsafe struct Lanes256(Vector256<double> value) : ILanes<Lanes
     public static Lanes256 Abs(Lanes256 a) => new(Vector256.Abs(a._value));
 
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static Lanes256 Sqrt(Lanes256 a) => new(Vector256.Sqrt(a._value));
+
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static Lanes256 GreaterThan(Lanes256 a, Lanes256 b) => new(Vector256.GreaterThan(a._value, b._value));
 
     [MethodImpl(MethodImplOptions.AggressiveInlining)]

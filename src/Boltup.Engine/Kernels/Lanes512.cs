@@ -44,6 +44,9 @@ internal readonly unsafe struct Lanes512(Vector512<double> value) : ILanes<Lanes
     public static Lanes512 Abs(Lanes512 a) => new(Vector512.Abs(a._value));
 
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static Lanes512 Sqrt(Lanes512 a) => new(Vector512.Sqrt(a._value));
+
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static Lanes512 GreaterThan(Lanes512 a, Lanes512 b) => new(Vector512.GreaterThan(a._value, b._value));
 
     [MethodImpl(MethodImplOptions.AggressiveInlining)]

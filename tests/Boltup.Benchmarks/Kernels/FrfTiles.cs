@@ -7,14 +7,17 @@ namespace Boltup.Benchmarks.Kernels;
 internal static class FrfTiles
 {
     /// <summary>A modal sum over 20 to 2000 Hz: the smooth FRFs that coupling sees.</summary>
-    public static TiledMatrix ModalSum(int order, int lines)
+    public static TiledMatrix ModalSum(int order, int lines) => ModalSum(order, order, lines);
+
+    /// <summary>The same with the first columns only: indicators from interface dofs.</summary>
+    public static TiledMatrix ModalSum(int order, int columns, int lines)
     {
         var random = new Random(order);
         int modes = order + 5;
         double[] shapes = [.. Enumerable.Range(0, modes * order).Select(_ => 2 * random.NextDouble() - 1)];
-        var matrix = new TiledMatrix(lines, order, order);
+        var matrix = new TiledMatrix(lines, order, columns);
         var spectrum = new Complex[lines];
-        for (int i = 0; i < order * order; i++)
+        for (int i = 0; i < order * columns; i++)
         {
             for (int line = 0; line < lines; line++)
             {
@@ -23,14 +26,14 @@ internal static class FrfTiles
                 for (int mode = 0; mode < modes; mode++)
                 {
                     double natural = 20 + 37.0 * mode;
-                    sum += shapes[mode * order + i / order] * shapes[mode * order + i % order]
+                    sum += shapes[mode * order + i / columns] * shapes[mode * order + i % columns]
                         / (natural * natural * new Complex(1, 0.02) - hz * hz);
                 }
 
                 spectrum[line] = sum;
             }
 
-            matrix.ScatterSpectrum(i / order, i % order, spectrum);
+            matrix.ScatterSpectrum(i / columns, i % columns, spectrum);
         }
 
         return matrix;

@@ -1,6 +1,4 @@
-using System.Diagnostics;
 using System.Globalization;
-using System.Runtime.CompilerServices;
 using Boltup.Engine.Kernels;
 using Boltup.Engine.Spectra;
 
@@ -41,30 +39,15 @@ internal static class NumPyRatios
         double two = double.PositiveInfinity;
         for (int turn = 0; turn < Turns; turn++)
         {
-            numPy = Math.Min(numPy, TimeNumPy(order, columns));
-            one = Math.Min(one, Shortest(() => SolveAll(a, b, single)));
-            two = Math.Min(two, Shortest(() => SolveAll(a, b, pair)));
+            numPy = Math.Min(numPy, NumPy.Time("numpy_solve.py", order, columns, Lines));
+            one = Math.Min(one, Shortest.Of(() => SolveAll(a, b, single)));
+            two = Math.Min(two, Shortest.Of(() => SolveAll(a, b, pair)));
         }
 
         double flops = 8.0 * Lines * order * order * (order / 3.0 + columns);
         output.WriteLine(string.Create(
             CultureInfo.InvariantCulture,
             $"| {order} | {columns} | {1e3 * numPy:F2} ms | {1e3 * one:F2} ms | {numPy / one:F1} | {one / two:F2} | {flops / one / 1e9:F0} |"));
-    }
-
-    private static double Shortest(Action action)
-    {
-        action();
-        double best = double.PositiveInfinity;
-        long end = Stopwatch.GetTimestamp() + Stopwatch.Frequency / 3;
-        while (Stopwatch.GetTimestamp() < end)
-        {
-            long start = Stopwatch.GetTimestamp();
-            action();
-            best = Math.Min(best, Stopwatch.GetElapsedTime(start).TotalSeconds);
-        }
-
-        return best;
     }
 
     /// <summary>Solves all tiles on one or two threads, each with its own buffers, which are allocated once.</summary>
@@ -76,18 +59,6 @@ internal static class NumPyRatios
         workers[0].Solve(a, b, 0, a.TileCount / threads);
         Task.WaitAll(others);
     }
-
-    private static double TimeNumPy(int order, int columns)
-    {
-        var start = new ProcessStartInfo(Environment.GetEnvironmentVariable("PYTHON") ?? "python3", [ScriptPath(), $"{order}", $"{columns}", $"{Lines}", "5"]) { RedirectStandardOutput = true };
-        start.Environment["OPENBLAS_NUM_THREADS"] = "1";
-        start.Environment.Remove("OPENBLAS_CORETYPE");
-        start.Environment.Remove("OPENBLAS_L2_SIZE");
-        using Process process = Process.Start(start)!;
-        return double.Parse(process.StandardOutput.ReadLine()!, CultureInfo.InvariantCulture);
-    }
-
-    private static string ScriptPath([CallerFilePath] string file = "") => Path.Combine(Path.GetDirectoryName(file)!, "numpy_solve.py");
 
     /// <summary>The buffers of one thread.</summary>
     private sealed class Worker(int order, int columns)

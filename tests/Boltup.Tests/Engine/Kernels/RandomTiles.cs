@@ -52,6 +52,16 @@ internal static class RandomTiles
         return copy;
     }
 
+    public static TiledMatrix Identity(int order) => Fill(order, order, new Random(0), (_, row, column, _) => row == column ? 1 : 0);
+
+    public static void Scale(TiledMatrix tile, double factor)
+    {
+        foreach (ref double value in tile.Tile(0))
+        {
+            value *= factor;
+        }
+    }
+
     private static TiledMatrix Fill(int rows, int columns, Random random, Func<Random, int, int, int, Complex> value)
     {
         var tile = new TiledMatrix(Tiling.Lanes, rows, columns);
