@@ -10,7 +10,8 @@ namespace Boltup.Engine.Kernels;
 /// <remarks>
 /// Layout: a column holds its n entries of Rᴴ and under them its n entries of J, so that one loop turns both. Lanes: each lane has its own
 /// angle; a lane whose pair is orthogonal turns by nothing; the sweeps end when no lane turned. Hazard: cosines below n·ε count as
-/// orthogonal; NaN compares as orthogonal, so it ends the sweeps and stays in its lane.
+/// orthogonal; rotations leave their cosine aside (fast rotations; Golub, Van Loan, section 5.1.13) and the columns take it up after each
+/// sweep, before it can shrink too far; NaN compares as orthogonal, so it ends the sweeps and stays in its lane.
 /// </remarks>
 [SkipLocalsInit]
 internal sealed unsafe class VectorSvd<T> : SvdKernel
@@ -22,6 +23,7 @@ internal sealed unsafe class VectorSvd<T> : SvdKernel
 
     private readonly VectorQr<T> _qr;
     private readonly TileBuffer _columns;
+    private readonly TileBuffer _squares;
     private readonly TileBuffer _inverseNorms;
     private readonly TileBuffer _chunk;
     private int _rows;
@@ -31,6 +33,7 @@ internal sealed unsafe class VectorSvd<T> : SvdKernel
     {
         _qr = new VectorQr<T>(maxRows, maxColumns);
         _columns = new TileBuffer(maxColumns * StrideOf(maxColumns));
+        _squares = new TileBuffer(maxColumns * Tiling.Lanes);
         _inverseNorms = new TileBuffer(maxColumns * Tiling.Lanes);
         _chunk = new TileBuffer(ChunkColumns * VectorQr<T>.StrideOf(maxRows));
     }
@@ -39,14 +42,15 @@ internal sealed unsafe class VectorSvd<T> : SvdKernel
     {
         (_rows, _order) = (rows, columns);
         _qr.Factor(tile, rows, columns);
-        fixed (double* c = _columns.Span)
+        _squares.Span.Fill(1);
+        fixed (double* c = _columns.Span, squares = _squares.Span)
         {
             _qr.CopyTriangle(c, StrideOf(_order));
             SetIdentity(c);
             for (int lane = 0; lane < Tiling.Lanes; lane += T.Count)
             {
                 int sweep = 0;
-                while (Sweep(c + lane) && ++sweep < MaxSweeps)
+                while (Sweep(c + lane, squares + lane) && ++sweep < MaxSweeps)
                 {
                 }
             }
@@ -116,24 +120,30 @@ internal sealed unsafe class VectorSvd<T> : SvdKernel
     }
 
     /// <returns>Whether any lane turned any pair.</returns>
-    private bool Sweep(double* c)
+    private bool Sweep(double* c, double* squares)
     {
         bool turned = false;
         for (int p = 0; p < _order - 1; p++)
         {
             for (int q = p + 1; q < _order; q++)
             {
-                turned |= Rotate(c + (nint)p * StrideOf(_order), c + (nint)q * StrideOf(_order));
+                turned |= Rotate(
+                    c + (nint)p * StrideOf(_order), c + (nint)q * StrideOf(_order), squares + (nint)p * Tiling.Lanes, squares + (nint)q * Tiling.Lanes);
             }
         }
 
+        ApplyScales(c, squares);
         return turned;
     }
 
-    private bool Rotate(double* p, double* q)
+    /// <summary>
+    /// Makes two columns orthogonal: with d = qᴴq − pᴴp, γ = pᴴq and h = √(d² + 4|γ|²) the smaller of the two possible angles has
+    /// c² = (h + |d|)/2h and tangent t = ±2γ/(h + |d|), the sign that of d; p, q ← c·(p − t̄·q), c·(q + t·p).
+    /// </summary>
+    /// <param name="pSquare">Square of the factor by which p is to be multiplied still.</param>
+    private bool Rotate(double* p, double* q, double* pSquare, double* qSquare)
     {
-        T pp = ColumnKernel<T>.SquaredNorm(p, _order), qq = ColumnKernel<T>.SquaredNorm(q, _order);
-        ColumnKernel<T>.Dot(p, q, _order, out T r, out T i);
+        ColumnKernel<T>.Gram(p, q, _order, out T pp, out T qq, out T r, out T i);
         T square = T.MultiplyAdd(i, i, r * r);
         T turns = T.GreaterThan(square, pp * qq * T.Broadcast(OrthogonalityLimit(_order)));
         if (T.Bits(turns) == 0)
@@ -141,32 +151,51 @@ internal sealed unsafe class VectorSvd<T> : SvdKernel
             return false;
         }
 
-        T zero = default, one = T.Broadcast(1), size = T.Sqrt(square);
-        T zeta = (qq - pp) / (size + size);
-        T steep = one / (T.Abs(zeta) + T.Sqrt(T.MultiplyAdd(zeta, zeta, one)));
-        T tangent = T.Select(T.GreaterThan(zero, zeta), zero - steep, steep);
-        T cosine = T.Select(turns, one / T.Sqrt(T.MultiplyAdd(tangent, tangent, one)), one);
-        T sine = T.Select(turns, cosine * tangent, zero);
-        T phaseR = T.Select(turns, r / size, one), phaseI = T.Select(turns, i / size, zero);
-        Turn(p, q, cosine, sine, phaseR, phaseI);
+        T zero = default, one = T.Broadcast(1), two = T.Broadcast(2), dp = T.Load(pSquare), dq = T.Load(qSquare);
+        T difference = dq * qq - dp * pp;
+        T root = T.Sqrt(T.MultiplyAdd(difference, difference, square * dp * dq * T.Broadcast(4)));
+        T sum = root + T.Abs(difference);
+        T steepness = T.Select(turns, two / sum, zero);
+        steepness = T.Select(T.GreaterThan(zero, difference), zero - steepness, steepness);
+        T shrink = T.Select(turns, sum / (root + root), one);
+        T.Store(dp * shrink, pSquare);
+        T.Store(dq * shrink, qSquare);
+        r = T.Select(turns, r, zero) * steepness;
+        i = T.Select(turns, i, zero) * steepness;
+        Turn(p, q, r * dq, i * dq, r * dp, i * dp);
         return true;
     }
 
-    /// <summary>p, q ← c·p − s·q̃, s·p + c·q̃ with q̃ = q·e^{−jφ}, where e^{jφ} is the phase of pᴴq.</summary>
-    private void Turn(double* p, double* q, T cosine, T sine, T phaseR, T phaseI)
+    /// <summary>p, q ← p − ā·q, q + b·p.</summary>
+    private void Turn(double* p, double* q, T ar, T ai, T br, T bi)
     {
-        T sr = sine * phaseR, si = sine * phaseI, cr = cosine * phaseR, ci = cosine * phaseI;
         for (nint at = 0; at < (nint)2 * _order * Entry; at += Entry)
         {
             T pr = T.Load(p + at), pi = T.Load(p + at + Imaginary), qr = T.Load(q + at), qi = T.Load(q + at + Imaginary);
             BlockKernel<T>.Store(
                 p + at,
-                T.MultiplySubtract(si, qi, T.MultiplySubtract(sr, qr, cosine * pr)),
-                T.MultiplyAdd(si, qr, T.MultiplySubtract(sr, qi, cosine * pi)));
+                T.MultiplySubtract(ai, qi, T.MultiplySubtract(ar, qr, pr)),
+                T.MultiplyAdd(ai, qr, T.MultiplySubtract(ar, qi, pi)));
             BlockKernel<T>.Store(
                 q + at,
-                T.MultiplyAdd(ci, qi, T.MultiplyAdd(cr, qr, sine * pr)),
-                T.MultiplySubtract(ci, qr, T.MultiplyAdd(cr, qi, sine * pi)));
+                T.MultiplySubtract(bi, pi, T.MultiplyAdd(br, pr, qr)),
+                T.MultiplyAdd(bi, pr, T.MultiplyAdd(br, pi, qi)));
+        }
+    }
+
+    /// <summary>Multiplies every column by its factor, which becomes one again.</summary>
+    private void ApplyScales(double* c, double* squares)
+    {
+        for (int column = 0; column < _order; column++)
+        {
+            double* square = squares + (nint)column * Tiling.Lanes;
+            T factor = T.Sqrt(T.Load(square));
+            T.Store(T.Broadcast(1), square);
+            double* end = c + (nint)column * StrideOf(_order) + (nint)2 * _order * Entry;
+            for (double* at = end - (nint)2 * _order * Entry; at < end; at += Entry)
+            {
+                BlockKernel<T>.Store(at, T.Load(at) * factor, T.Load(at + Imaginary) * factor);
+            }
         }
     }
 
