@@ -1,3 +1,4 @@
+using System.Globalization;
 using Boltup.Engine.Spectra;
 
 namespace Boltup.Engine.Evidence;
@@ -26,4 +27,8 @@ public sealed record LineBand(double FromHz, double ToHz, int Lines)
 
         return bands;
     }
+
+    public override string ToString() => Lines == 1
+        ? string.Create(CultureInfo.InvariantCulture, $"{FromHz:G6} Hz")
+        : string.Create(CultureInfo.InvariantCulture, $"{FromHz:G6} to {ToHz:G6} Hz");
 }

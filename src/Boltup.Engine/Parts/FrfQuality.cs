@@ -1,13 +1,12 @@
 using System.Globalization;
-using System.Numerics;
 using Boltup.Engine.Diagnostics;
 using Boltup.Engine.Spectra;
 
 namespace Boltup.Engine.Parts;
 
 /// <summary>
-/// Judges square FRFs of a passive part: driving points must not generate power (Im receptance ≤ 0 with e^{+jωt}, ISO 7626-1), and
-/// Y must be symmetric (reciprocity). Reports, never repairs.
+/// Judges FRFs of a passive structure between dofs that were measured both ways: driving points must not generate power (Im receptance ≤ 0
+/// with e^{+jωt}, ISO 7626-1), and Y must be symmetric (reciprocity). Reports, never repairs.
 /// </summary>
 public static class FrfQuality
 {
@@ -23,78 +22,87 @@ public static class FrfQuality
     public static void Check(
         string part, SourceSpan? origin, FrequencyAxis axis, IReadOnlyList<DofCombination> dofs, TiledMatrix frf, DiagnosticBag diagnostics)
     {
-        for (int i = 0; i < dofs.Count; i++)
-        {
-            CheckDrivingPoint(part, origin, axis, dofs[i], frf, i, diagnostics);
-        }
-
-        SayLeastReciprocal(part, origin, dofs, frf, diagnostics);
+        FrfPlace[] places = [.. dofs.Select((dof, i) => new FrfPlace(dof.ToString()!, i, i))];
+        Judge($"part `{part}`", origin, Measure(axis, places, frf), diagnostics);
     }
 
-    private static void CheckDrivingPoint(
-        string part, SourceSpan? origin, FrequencyAxis axis, DofCombination dof, TiledMatrix frf, int i, DiagnosticBag diagnostics)
+    /// <summary>Measures the dofs of motion that are both rows and columns.</summary>
+    /// <param name="frf">Receptances.</param>
+    public static FrfQualityReport Measure(FrfMatrix frf) => Measure(frf.Axis, FrfPlace.InBoth(frf.Rows, frf.Columns), frf.Values);
+
+    /// <summary>Says what is worth a warning.</summary>
+    /// <param name="owner">What the FRFs belong to, as messages begin.</param>
+    public static void Judge(string owner, SourceSpan? origin, FrfQualityReport report, DiagnosticBag diagnostics)
+    {
+        foreach (DrivingPointPower point in report.DrivingPoints.Where(point => point.GeneratedShare > TolerableShare))
+        {
+            diagnostics.Warning(
+                EngineCodes.PowerGenerated,
+                $"{owner}: the driving point `{point.Dof}` generates power at {point.GeneratingHz.Count} of {report.Lines} lines",
+                origin,
+                "check sign, axis and quantity of the FRF: a flipped sensor, conjugated FRFs, or accelerance taken for receptance look like this",
+                $"at {FrequencyList.Of(point.GeneratingHz)}");
+        }
+
+        SayLeastReciprocal(owner, origin, report.Pairs, diagnostics);
+    }
+
+    private static FrfQualityReport Measure(FrequencyAxis axis, FrfPlace[] places, TiledMatrix frf)
+    {
+        var pairs = new List<ReciprocityPair>();
+        for (int i = 0; i < places.Length; i++)
+        {
+            pairs.AddRange(places[..i].Select(other => new ReciprocityPair(places[i].Name, other.Name, Asymmetry(frf, places[i], other))));
+        }
+
+        return new FrfQualityReport(axis.Count, [.. places.Select(place => PowerAt(axis, place, frf))], pairs);
+    }
+
+    private static DrivingPointPower PowerAt(FrequencyAxis axis, FrfPlace place, TiledMatrix frf)
     {
         double generated = 0;
         double total = 0;
-        List<double> activeHz = [];
+        List<double> generatingHz = [];
         for (int line = 0; line < axis.Count; line++)
         {
-            double power = axis.Omega(line) * frf[line, i, i].Imaginary;
+            double power = axis.Omega(line) * frf[line, place.Row, place.Column].Imaginary;
             total += Math.Abs(power);
             if (power > 0)
             {
                 generated += power;
-                activeHz.Add(axis[line]);
+                generatingHz.Add(axis[line]);
             }
         }
 
-        if (generated > TolerableShare * total)
-        {
-            diagnostics.Warning(
-                EngineCodes.PowerGenerated,
-                $"part `{part}`: the driving point `{dof}` generates power at {activeHz.Count} of {axis.Count} lines",
-                origin,
-                "check sign, axis and quantity of the FRF: a flipped sensor, conjugated FRFs, or accelerance taken for receptance look like this",
-                $"at {FrequencyList.Of(activeHz)}");
-        }
+        return new DrivingPointPower(place.Name, total > 0 ? generated / total : 0, generatingHz);
     }
 
     private static void SayLeastReciprocal(
-        string part, SourceSpan? origin, IReadOnlyList<DofCombination> dofs, TiledMatrix frf, DiagnosticBag diagnostics)
+        string owner, SourceSpan? origin, IReadOnlyList<ReciprocityPair> pairs, DiagnosticBag diagnostics)
     {
-        var suspects = new List<(double Asymmetry, string Pair)>();
-        for (int i = 0; i < dofs.Count; i++)
-        {
-            for (int j = 0; j < i; j++)
-            {
-                double asymmetry = Asymmetry(frf, i, j);
-                if (asymmetry > TolerableAsymmetry)
-                {
-                    suspects.Add((asymmetry, string.Create(CultureInfo.InvariantCulture, $"`{dofs[i]}` and `{dofs[j]}` ({asymmetry:P0})")));
-                }
-            }
-        }
-
-        if (suspects.Count > 0)
+        ReciprocityPair[] suspects = [.. pairs.Where(pair => pair.Asymmetry > TolerableAsymmetry).OrderByDescending(pair => pair.Asymmetry)];
+        if (suspects.Length > 0)
         {
             diagnostics.Warning(
                 EngineCodes.NotReciprocal,
-                $"part `{part}`: {suspects.Count} pair{(suspects.Count == 1 ? "" : "s")} of interface FRFs {(suspects.Count == 1 ? "is" : "are")} not reciprocal",
+                $"{owner}: {suspects.Length} pair{(suspects.Length == 1 ? "" : "s")} of interface FRFs {(suspects.Length == 1 ? "is" : "are")} not reciprocal",
                 origin,
                 "check position, direction and calibration of sensor and hammer at these dofs",
-                $"largest asymmetry: {string.Join(", ", suspects.OrderByDescending(suspect => suspect.Asymmetry).Take(5).Select(suspect => suspect.Pair))}");
+                $"largest asymmetry: {string.Join(", ", suspects.Take(5).Select(Describe))}");
         }
     }
 
-    /// <summary>Σ|Yᵢⱼ − Yⱼᵢ| / Σ(|Yᵢⱼ| + |Yⱼᵢ|) over all lines.</summary>
-    private static double Asymmetry(TiledMatrix frf, int i, int j)
+    private static string Describe(ReciprocityPair pair) =>
+        string.Create(CultureInfo.InvariantCulture, $"`{pair.First}` and `{pair.Second}` ({pair.Asymmetry:P0})");
+
+    private static double Asymmetry(TiledMatrix frf, FrfPlace first, FrfPlace second)
     {
         double difference = 0;
         double sum = 0;
         for (int tile = 0; tile < frf.TileCount; tile++)
         {
-            ReadOnlySpan<double> a = frf.Entry(tile, i, j);
-            ReadOnlySpan<double> b = frf.Entry(tile, j, i);
+            ReadOnlySpan<double> a = frf.Entry(tile, first.Row, second.Column);
+            ReadOnlySpan<double> b = frf.Entry(tile, second.Row, first.Column);
             for (int lane = 0; lane < Tiling.Lanes; lane++)
             {
                 int imaginary = lane + Tiling.Lanes;

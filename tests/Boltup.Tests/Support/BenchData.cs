@@ -17,16 +17,12 @@ internal static class BenchData
     public static Dof[] Dofs(params string[] points) =>
         [.. points.SelectMany(point => new[] { Direction.X, Direction.Y, Direction.Z }.Select(direction => new Dof(point, direction)))];
 
-    /// <summary>FRFs of a file in Data/bench as receptances.</summary>
+    /// <summary>FRFs of a file in Data/bench as receptances; coherences as real parts.</summary>
     public static FrfMatrix Frf(string file, IReadOnlyList<Dof> rows, IReadOnlyList<Dof> columns) =>
         FrfAt(Repository.Data("bench", file), rows, columns);
 
     /// <summary>The free compressor of the demo, whose interface is 101–104.</summary>
     public static FrfMatrix FreeCompressor() => FrfAt(Repository.PathTo("examples", "minibus", "compressor.unv"), Interface, Interface);
-
-    /// <summary>Coherences of a file, as real parts.</summary>
-    public static FrfMatrix Coherence(string file, IReadOnlyList<Dof> rows, IReadOnlyList<Dof> columns) =>
-        FrfAt(Repository.Data("bench", file), rows, columns);
 
     /// <summary>Spectra of a file in Data/bench; motion becomes displacement.</summary>
     public static SpectrumSet Spectra(string file, IReadOnlyList<Dof> dofs)

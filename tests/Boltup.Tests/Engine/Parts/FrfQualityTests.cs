@@ -35,6 +35,21 @@ public class FrfQualityTests
     public void Check_AccelerancesTakenForReceptances_NamesDrivingPoints() =>
         Assert.All(Check((_, _, value) => -value), item => Assert.Equal(EngineCodes.PowerGenerated, item.Code));
 
+    /// <summary>Rows and columns of a bench need be neither the same dofs nor in one order.</summary>
+    [Fact]
+    public void Measure_RowsAndColumnsThatDiffer_ComparesTheDofsInBoth()
+    {
+        PlacedPart part = Chain.Part("p", [1, 2, 3], [1e5, 2e5], 0.1);
+        FrfMatrix frf = part.Model.Evaluate(
+            Axis, [Dof.Parse("3.x"), Dof.Parse("2.x"), Dof.Parse("1.x")], [Dof.Parse("1.x"), Dof.Parse("2.x")], new DiagnosticBag())!;
+        frf.Values.ScatterSpectrum(2, 1, [.. frf.Values.GatherSpectrum(2, 1).Select(value => 3 * value)]);
+        FrfQualityReport report = FrfQuality.Measure(frf);
+        Assert.Equal([("1.x", 0.0), ("2.x", 0.0)], report.DrivingPoints.Select(point => (point.Dof, point.GeneratedShare)));
+        ReciprocityPair pair = Assert.Single(report.Pairs);
+        Assert.Equal(("2.x", "1.x"), (pair.First, pair.Second));
+        Assert.Equal(0.5, pair.Asymmetry, 12);
+    }
+
     private static IReadOnlyList<Diagnostic> Check(Func<int, int, Complex, Complex> spoil)
     {
         TiledMatrix frf = Chain.Part("p", [1, 2], [1e5], 0.1).Model.Evaluate(Axis, Dofs, Dofs, new DiagnosticBag())!.Values;
