@@ -23,7 +23,7 @@ public static class ValidationComparison
             check,
             measured.Axis,
             [.. measured.Dofs.Select((dof, i) => Compare(dof, predicted.Values[i], measured.Values[i]))],
-            [.. lines.Select(line => line.Consistency)],
+            [.. lines.Select(line => measured.Dofs.Count > 1 ? line.Consistency : double.NaN)],
             [.. lines.Select(line => Decibel(line.Predicted, line.Measured))],
             Math.Sqrt(error / power),
             Decibel(lines.Sum(line => line.Predicted), power));

@@ -11,7 +11,7 @@ namespace Boltup.Engine.Evidence;
 /// <param name="Axis">The lines of every list.</param>
 /// <param name="Consistency">
 /// Per line |Σ p m*|²/(Σ|p|² Σ|m|²) over all dofs: 1 where both have the same pattern of magnitude and phase. Blind to a common factor,
-/// so it goes with <paramref name="LevelDifferenceDb"/>. NaN where all are zero.
+/// so it goes with <paramref name="LevelDifferenceDb"/>. NaN where all are zero, and for a single dof, which has no pattern.
 /// </param>
 /// <param name="LevelDifferenceDb">Per line 10 lg Σ|p|²/Σ|m|² over all dofs.</param>
 /// <param name="RelativeError">‖p − m‖₂/‖m‖₂ over all dofs and lines, phase included.</param>
