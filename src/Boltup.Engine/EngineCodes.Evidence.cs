@@ -40,4 +40,18 @@ public static partial class EngineCodes
         "Averaged over all FRFs, the excitation explains too little of the responses. The FRFs there are mostly noise, and what is identified from them is too.",
         "hammer hits that carry no energy above 1 kHz",
         "Use a harder tip, hit harder, average more, or end the band where the coherence ends.");
+
+    public static readonly DiagnosticCode NotPassive = new(
+        "ENG065",
+        "the interface FRFs are not passive",
+        "Whatever forces act at the interface, a structure without an own source only takes power from them: the Hermitian part of its mobility has no negative eigenvalue. Where it has, the FRFs contradict each other, even if every driving point looks right by itself.",
+        "one column measured with the hammer force scaled wrongly",
+        "Look for a column or row with a wrong sign, scale or axis, and for noise near antiresonances. Nothing is repaired silently.");
+
+    public static readonly DiagnosticCode RoundTripTooShort = new(
+        "ENG066",
+        "a round trip has too few dofs",
+        "The round-trip identity finds interface FRFs from paths between source and receiver. It needs at least as many dofs on the source and on the receiver as there are interface dofs.",
+        "twelve interface dofs, six accelerometers on the receiver",
+        "Measure at more dofs on the side that has too few, or estimate fewer interface dofs.");
 }

@@ -10,7 +10,7 @@ namespace Boltup.Engine.Coupling;
 internal sealed class ConditionCheck(CouplingLayout layout, FrequencyAxis axis, IReadOnlyList<TiledMatrix?> frfs)
 {
     /// <summary>Beyond this no digit of double precision is left: 1/(2·ε).</summary>
-    private const double Singular = 0.5 / 2.220446049250313e-16;
+    public const double Singular = 0.5 / 2.220446049250313e-16;
 
     /// <summary>
     /// Beyond this a result of computed FRFs keeps fewer than five digits, and a measured one is long noise.

@@ -1,3 +1,4 @@
+using Boltup.Engine.Coupling;
 using Boltup.Engine.Diagnostics;
 using Boltup.Engine.Kernels;
 using Boltup.Engine.Spectra;
@@ -38,18 +39,34 @@ internal static class SquareFrf
             lu.Factor(matrix.Tile(tile), matrix.Rows);
             rightSides.Tile(tile).CopyTo(solution.Tile(tile));
             lu.Solve(solution.Tile(tile), rightSides.Columns);
-            LaneLines.Collect(lu.SingularLanes, axis, tile, singularHz);
+            LaneLines.Collect(SingularLanes(lu, matrix.Tile(tile)), axis, tile, singularHz);
         }
 
-        return singularHz.Count == 0 ? solution : Refuse(what, singularHz, diagnostics);
-    }
+        if (singularHz.Count == 0)
+        {
+            return solution;
+        }
 
-    private static TiledMatrix? Refuse(string what, List<double> singularHz, DiagnosticBag diagnostics)
-    {
-        diagnostics.Error(
-            EngineCodes.SingularFrf,
-            $"the interface FRFs of {what} are singular at {FrequencyList.Of(singularHz)}",
-            help: "two dofs that move as one, or an FRF that is zero: leave a dof out, or repair the data");
+        Refuse(what, singularHz, diagnostics);
         return null;
     }
+
+    private static byte SingularLanes(BatchLu lu, ReadOnlySpan<double> matrix)
+    {
+        Span<double> condition = stackalloc double[Tiling.Lanes];
+        lu.EstimateCondition(matrix, condition);
+        byte singular = 0;
+        for (int lane = 0; lane < Tiling.Lanes; lane++)
+        {
+            singular |= (byte)(condition[lane] < ConditionCheck.Singular ? 0 : 1 << lane);
+        }
+
+        return singular;
+    }
+
+    /// <summary>Says at which lines FRFs are singular.</summary>
+    public static void Refuse(string what, List<double> singularHz, DiagnosticBag diagnostics) => diagnostics.Error(
+        EngineCodes.SingularFrf,
+        $"the interface FRFs of {what} are singular at {FrequencyList.Of(singularHz)}",
+        help: "two dofs that move as one, or an FRF that is zero: leave a dof out, or repair the data");
 }
