@@ -54,4 +54,11 @@ public static partial class EngineCodes
         "The round-trip identity finds interface FRFs from paths between source and receiver. It needs at least as many dofs on the source and on the receiver as there are interface dofs.",
         "twelve interface dofs, six accelerometers on the receiver",
         "Measure at more dofs on the side that has too few, or estimate fewer interface dofs.");
+
+    public static readonly DiagnosticCode ChannelSuspect = new(
+        "ENG067",
+        "a channel does not go with the others",
+        "The forces that all other channels identify predict this channel differently than it was measured: with the opposite sign, by a constant factor, in the place of another channel, or not at all. Something changed between the installed FRFs and the operation, and it spreads into every force.",
+        "an accelerometer turned over between hammer test and operation, or exported in g",
+        "Check mounting, cable, axis, sensitivity and unit of the channel in both measurements. Until it is clear, leave it out of the `indicators`. Nothing is corrected silently.");
 }
