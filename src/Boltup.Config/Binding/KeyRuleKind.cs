@@ -4,5 +4,6 @@ public enum KeyRuleKind
 {
     ExactlyOne,
     AtLeastOne,
+    AtMostOne,
     Needs,
 }

@@ -66,7 +66,7 @@ internal sealed partial class ShapeValidator
         YamlEntry[] present = [.. rule.Keys.Select(map.Find).OfType<YamlEntry>()];
         switch (rule.Kind)
         {
-            case KeyRuleKind.ExactlyOne when present.Length > 1:
+            case KeyRuleKind.ExactlyOne or KeyRuleKind.AtMostOne when present.Length > 1:
                 Contradiction(present);
                 break;
             case KeyRuleKind.ExactlyOne or KeyRuleKind.AtLeastOne when !rule.Keys.Any(meant.Contains):

@@ -1,6 +1,7 @@
 using Boltup.Config.Binding;
 using Boltup.Config.Units;
 using Boltup.Config.Yaml;
+using Boltup.Engine.Mounts;
 using Boltup.Engine.Spectra;
 
 namespace Boltup.Config.Documents;
@@ -23,12 +24,43 @@ internal sealed partial class AssemblyBinder
             return new TableLawDocument(table.File());
         }
 
+        if ((map["series"] ?? map["parallel"]) is YamlNode others)
+        {
+            return new ComposedLawDocument([.. others.Items().Select(item => item.MarkedText())], map["series"] is not null, others.Span);
+        }
+
+        return map["relaxation"] is YamlMap relaxation
+            ? new RelaxingLawDocument(BindStiffness(map), BindRelaxation(relaxation))
+            : BindStiffness(map);
+    }
+
+    private MountLawDocument BindStiffness(YamlMap map)
+    {
         double lossFactor = map["loss_factor"]?.Number() ?? 0;
         Dictionary<Direction, Marked<double>> damping = PerDirection(map["damping"], Dimension.Damping, Dimension.RotationalDamping);
         return map["stiffness_matrix"] is YamlList rows
             ? new MatrixLawDocument(BindMatrix(rows), lossFactor, damping)
             : new DirectionalLawDocument(
                 PerDirection(map["stiffness"], Dimension.Stiffness, Dimension.RotationalStiffness), lossFactor, damping);
+    }
+
+    private Relaxation BindRelaxation(YamlMap map)
+    {
+        double stiffening = map["stiffening"]!.Number();
+        double order = map["order"]?.Number() ?? 1;
+        if (stiffening < 1)
+        {
+            diagnostics.Error(ConfigCodes.BadRelaxation, $"`stiffening` is {map["stiffening"]!.Describe()}, expected at least 1", map["stiffening"]!.Span,
+                "give the stiffness at rest under `stiffness`, and the stiffness at high frequency as a multiple of it");
+        }
+
+        if (order > 1)
+        {
+            diagnostics.Error(ConfigCodes.BadRelaxation, $"`order` is {map["order"]!.Describe()}, expected at most 1", map["order"]!.Span,
+                "leave it out for the Zener law; rubber is often between 0.3 and 0.8");
+        }
+
+        return new Relaxation(stiffening, map["time"]!.Si(Dimension.Time), order);
     }
 
     private static Dictionary<Direction, Marked<double>> PerDirection(YamlNode? node, Dimension translation, Dimension rotation)

@@ -6,6 +6,8 @@ namespace Boltup.Config.Documents;
 /// <summary>Checks that every name in an assembly names something, as far as documents without data can tell.</summary>
 internal sealed class AssemblyReferences(AssemblyDocument assembly, DiagnosticBag diagnostics)
 {
+    private const int MaximumElements = 64;
+
     private readonly Dictionary<string, KnownNames?> _pointsByPart = assembly.Parts.ToDictionary(
         part => part.Name.Value, part => part.Document?.KnownPoints is { } points ? new KnownNames("point", points) : null);
 
@@ -29,19 +31,37 @@ internal sealed class AssemblyReferences(AssemblyDocument assembly, DiagnosticBa
 
     private void CheckMounts()
     {
-        var laws = new Dictionary<string, LikeLawDocument>(StringComparer.Ordinal);
+        var madeOf = new Dictionary<string, IReadOnlyList<string>>(StringComparer.Ordinal);
         foreach (MountDocument mount in assembly.Mounts)
         {
-            if (mount.Law is LikeLawDocument like && _mounts.Check(like.Mount.Value, like.Mount.Span, diagnostics))
-            {
-                laws.Add(mount.Name.Value, like);
-            }
+            Marked<string>[] known = [.. mount.Law.Others.Where(other => _mounts.Check(other.Value, other.Span, diagnostics))];
+            madeOf.Add(mount.Name.Value, [.. known.Select(other => other.Value)]);
         }
 
-        foreach (string name in LikeCircles.In(laws))
+        var graph = new MountGraph(madeOf);
+        foreach (string name in graph.Circular())
         {
-            diagnostics.Error(ConfigCodes.LikeItself, $"mount `{name}` is like itself", laws[name].Mount.Span,
+            SayIsCircular(name, assembly.FindMount(name)!.Law);
+        }
+
+        foreach ((string name, _) in graph.CountElements(MaximumElements + 1).Where(count => count.Value > MaximumElements))
+        {
+            diagnostics.Error(ConfigCodes.TooManyElements, $"mount `{name}` is made of more than {MaximumElements} elements",
+                assembly.FindMount(name)!.Name.Span, "for many equal mounts side by side use `like` with `scale`");
+        }
+    }
+
+    private void SayIsCircular(string name, MountLawDocument law)
+    {
+        if (law is LikeLawDocument like)
+        {
+            diagnostics.Error(ConfigCodes.LikeItself, $"mount `{name}` is like itself", like.Mount.Span,
                 "let one of the mounts in the circle have a stiffness of its own");
+        }
+        else if (law is ComposedLawDocument composed)
+        {
+            diagnostics.Error(ConfigCodes.MadeOfItself, $"mount `{name}` is made of itself", composed.Span,
+                "let one of the mounts in the circle have a law of its own");
         }
     }
 

@@ -29,6 +29,15 @@ public static class AssemblyShape
         new("moved", SharedKinds.Position, "where the part's origin goes"),
     ]);
 
+    private static readonly Shape Relaxation = new("a relaxation",
+    [
+        new("stiffening", new NumberKind("2.5", Sign.Positive), "stiffness at high over that at low frequency, at least 1", IsRequired: true),
+        new("time", new QuantityKind(Dimension.Time, "0.002", Sign.Positive), "relaxation time", IsRequired: true),
+        new("order", new NumberKind("0.6", Sign.Positive), "1 for the Zener law, which is the default; less for the fractional Zener law"),
+    ]);
+
+    private static readonly ListKind MountNames = new(new TextKind("the name of a mount"), Minimum: 2);
+
     private static readonly Shape Mount = new("a mount",
     [
         new("stiffness", SharedKinds.PerDirection("stiffness", "120", Dimension.Stiffness, Dimension.RotationalStiffness),
@@ -36,12 +45,18 @@ public static class AssemblyShape
         new("stiffness_matrix", new StiffnessMatrixKind(), "full symmetric stiffness matrix, rows of x, y, z or x, y, z, rx, ry, rz"),
         new("like", new TextKind("the name of a mount"), "another mount whose law this one has"),
         new("table", new PathKind("a table of dynamic stiffness"), "CSV of complex dynamic stiffness over frequency"),
+        new("series", MountNames, "mounts one behind the other, beginning at the first point of the joint"),
+        new("parallel", MountNames, "mounts side by side"),
+        new("relaxation", new ShapeKind(Relaxation), "how the stiffness rises with frequency from its static value"),
         new("loss_factor", new NumberKind("0.12", Sign.NotNegative), "loss factor of the stiffness"),
         new("damping", SharedKinds.PerDirection("damping", "12", Dimension.Damping, Dimension.RotationalDamping),
             "viscous damping per direction"),
         new("scale", new NumberKind("0.8", Sign.Positive), "factor on the law of the other mount"),
     ],
-    KeyRule.ExactlyOne("stiffness", "stiffness_matrix", "like", "table"),
+    KeyRule.ExactlyOne("stiffness", "stiffness_matrix", "like", "table", "series", "parallel"),
+    KeyRule.Needs("relaxation", "stiffness", "stiffness_matrix"),
+    KeyRule.AtMostOne("relaxation", "loss_factor"),
+    KeyRule.AtMostOne("relaxation", "damping"),
     KeyRule.Needs("loss_factor", "stiffness", "stiffness_matrix"),
     KeyRule.Needs("damping", "stiffness", "stiffness_matrix"),
     KeyRule.Needs("scale", "like"));

@@ -1,4 +1,6 @@
 using Boltup.Config.Binding;
+using Boltup.Engine.Diagnostics;
+using Boltup.Engine.Mounts;
 using Boltup.Engine.Spectra;
 
 namespace Boltup.Config.Documents;
@@ -7,7 +9,11 @@ namespace Boltup.Config.Documents;
 public sealed record MountDocument(Marked<string> Name, MountLawDocument Law);
 
 /// <summary>How a mount resists relative motion; in the axes of the assembly.</summary>
-public abstract record MountLawDocument;
+public abstract record MountLawDocument
+{
+    /// <summary>The mounts that the law names.</summary>
+    public virtual IReadOnlyList<Marked<string>> Others => [];
+}
 
 /// <summary>Stiffness and damping per direction: k(1 + jη) + jωc.</summary>
 /// <param name="Stiffness">N/m, or N·m/rad for rotations; a direction that is not listed is free.</param>
@@ -25,8 +31,20 @@ public sealed record MatrixLawDocument(
     double LossFactor,
     IReadOnlyDictionary<Direction, Marked<double>> Damping) : MountLawDocument;
 
+/// <summary>A static stiffness that rises with frequency as its material relaxes: Zener and fractional Zener laws.</summary>
+public sealed record RelaxingLawDocument(MountLawDocument AtRest, Relaxation Relaxation) : MountLawDocument;
+
+/// <summary>Other mounts together: side by side, or one behind the other in the order of a joint's points.</summary>
+public sealed record ComposedLawDocument(IReadOnlyList<Marked<string>> Mounts, bool IsSeries, SourceSpan Span) : MountLawDocument
+{
+    public override IReadOnlyList<Marked<string>> Others => Mounts;
+}
+
 /// <summary>The law of another mount, scaled.</summary>
-public sealed record LikeLawDocument(Marked<string> Mount, double Scale) : MountLawDocument;
+public sealed record LikeLawDocument(Marked<string> Mount, double Scale) : MountLawDocument
+{
+    public override IReadOnlyList<Marked<string>> Others => [Mount];
+}
 
 /// <summary>A complex dynamic stiffness over frequency from a file.</summary>
 public sealed record TableLawDocument(FileReference File) : MountLawDocument;

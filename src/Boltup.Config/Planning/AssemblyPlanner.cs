@@ -75,7 +75,7 @@ public sealed class AssemblyPlanner
         }
 
         return mounts.Plan(document.Mount.Value) is MountLaw law
-            ? Joint.Through(law, document.Name.Value, first, second) with { Origin = document.Name.Span }
+            ? Joint.Through(law, document.Name.Value, first, second) with { Origin = document.Name.Span, MountName = document.Mount.Value }
             : null;
     }
 

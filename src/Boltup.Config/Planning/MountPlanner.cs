@@ -38,6 +38,8 @@ internal sealed class MountPlanner(AssemblyDocument assembly, DataLibrary librar
             law.LossFactor,
             law.Damping.GetValueOrDefault(direction)?.Value ?? 0))),
         MatrixLawDocument law => PlanMatrix(law),
+        RelaxingLawDocument law => PlanLaw(law.AtRest) is { } atRest ? new RelaxingMount(atRest, law.Relaxation) : null,
+        ComposedLawDocument law => PlanComposed(law),
         TableLawDocument law => PlanTable(law),
         _ => throw new InvalidOperationException($"no planner for {document.GetType().Name}"),
     };
@@ -50,6 +52,34 @@ internal sealed class MountPlanner(AssemblyDocument assembly, DataLibrary librar
             law.Stiffness.Value,
             law.LossFactor,
             [.. directions.Select(direction => law.Damping.GetValueOrDefault(direction)?.Value ?? 0)]);
+    }
+
+    private MountLaw? PlanComposed(ComposedLawDocument law)
+    {
+        MountLaw?[] planned = [.. law.Mounts.Select(mount => Plan(mount.Value))];
+        if (Array.Exists(planned, mount => mount is null))
+        {
+            return null;
+        }
+
+        MountLaw[] mounts = [.. planned.OfType<MountLaw>()];
+        return law.IsSeries ? PlanSeries(law, mounts) : new ParallelMount(mounts);
+    }
+
+    private SeriesMount? PlanSeries(ComposedLawDocument law, MountLaw[] mounts)
+    {
+        if (SeriesMount.CanJoin(mounts) && new SeriesMount(mounts) is { Directions.Count: > 0 } series)
+        {
+            return series;
+        }
+
+        diagnostics.Error(
+            PlanCodes.SeriesDoesNotJoin,
+            SeriesMount.CanJoin(mounts) ? "the mounts in series share no direction" : "the mounts in series do not have the same directions",
+            law.Span,
+            "name mounts that connect the same directions",
+            [.. law.Mounts.Zip(mounts, (name, mount) => $"`{name.Value}` connects {string.Join(", ", mount.Directions.Select(Dof.NameOf))}")]);
+        return null;
     }
 
     private TabledMount? PlanTable(TableLawDocument law)

@@ -3,7 +3,7 @@ using Boltup.Engine.Diagnostics;
 namespace Boltup.Config.Planning;
 
 /// <summary>Diagnostics of planning: what a document and its data files do not agree on.</summary>
-public static class PlanCodes
+public static partial class PlanCodes
 {
     public static readonly DiagnosticCode NoCurves = new(
         "PLN001",

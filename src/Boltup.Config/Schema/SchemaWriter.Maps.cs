@@ -93,6 +93,9 @@ internal sealed partial class SchemaWriter
             case KeyRuleKind.AtLeastOne:
                 WriteRequiredAlternatives("anyOf", rule.Keys.Where(known.Contains));
                 break;
+            case KeyRuleKind.AtMostOne:
+                WriteObject("not", () => WriteStrings("required", rule.Keys));
+                break;
             default:
                 WriteObject("dependentSchemas", () =>
                     WriteObject(rule.Keys[0], () => WriteRequiredAlternatives("anyOf", rule.Keys.Skip(1))));

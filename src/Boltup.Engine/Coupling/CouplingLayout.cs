@@ -13,11 +13,10 @@ public sealed class CouplingLayout
         Joints = joints;
         Parts = [.. parts.Select(part => new PartLayout(part))];
         _byName = Parts.ToDictionary(layout => layout.Part.Name);
-        Constraints = [.. joints.SelectMany(joint => joint.Directions.Select(direction => new Constraint(joint, direction)))];
+        Constraints = [.. joints.SelectMany(joint => joint.Constraints)];
         for (int row = 0; row < Constraints.Count; row++)
         {
-            AddEnd(row, 1, Constraints[row].Joint.First);
-            AddEnd(row, -1, Constraints[row].Joint.Second);
+            AddEnds(row);
         }
 
         RotationLength = LengthScale.Of(parts, joints);
@@ -37,6 +36,20 @@ public sealed class CouplingLayout
     public double ScaleOf(int constraint) => Constraints[constraint].Direction >= Direction.RX ? RotationLength : 1;
 
     public PartLayout this[string part] => _byName[part];
+
+    private void AddEnds(int row)
+    {
+        Constraint constraint = Constraints[row];
+        if (constraint.Side != JointSide.Second)
+        {
+            AddEnd(row, 1, constraint.Joint.First);
+        }
+
+        if (constraint.Side != JointSide.First)
+        {
+            AddEnd(row, -1, constraint.Joint.Second);
+        }
+    }
 
     private void AddEnd(int row, double sign, JointEnd end)
     {

@@ -42,7 +42,7 @@ internal sealed class InterfaceMatrix
                 AddCompliance(joint, first, tile, target);
             }
 
-            first += joint.Directions.Count;
+            first += joint.Order;
         }
     }
 
@@ -61,7 +61,7 @@ internal sealed class InterfaceMatrix
 
     private void AddCompliance(Joint joint, int first, int tile, Span<double> target)
     {
-        int size = joint.Directions.Count;
+        int size = joint.Order;
         ReadOnlySpan<double> compliance = _compliance.Of(joint.Mount!, _axis, tile);
         for (int i = 0; i < size * size; i++)
         {

@@ -4,19 +4,19 @@ using Boltup.Engine.Spectra;
 
 namespace Boltup.Engine.Coupling;
 
-/// <summary>Z⁻¹ of mounts, relative displacement per force, at the lines of a tile. Holds its own workspace: one per thread.</summary>
+/// <summary>Z⁻¹ of mounts, displacement per force, at the lines of a tile. Holds its own workspace: one per thread.</summary>
 internal sealed class MountCompliance
 {
-    private const int LargestMount = 6;
+    private const int LargestMount = BothEnds.LargestOrder;
 
     private readonly TiledMatrix _stiffness = new(Tiling.Lanes, LargestMount, LargestMount);
     private readonly TiledMatrix _compliance = new(Tiling.Lanes, LargestMount, LargestMount);
     private readonly BatchLu _lu = new(LargestMount);
 
-    /// <summary>n×n entries, n the number of directions of the mount; valid until the next call.</summary>
+    /// <summary>n×n entries, n the order of the mount; valid until the next call.</summary>
     public ReadOnlySpan<double> Of(MountLaw mount, FrequencyAxis axis, int tile)
     {
-        int size = mount.Directions.Count;
+        int size = mount.Order;
         int length = size * size * Tiling.EntryLength;
         Span<double> stiffness = _stiffness.Tile(0)[..length];
         Span<double> compliance = _compliance.Tile(0)[..length];

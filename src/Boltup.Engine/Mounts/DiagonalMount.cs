@@ -19,6 +19,8 @@ public sealed class DiagonalMount : MountLaw
 
     public override bool IsDiagonal => true;
 
+    public override double ConstantLossFactor => _springs.Length == 0 ? 0 : _springs.Max(spring => spring.LossFactor);
+
     public override void FillStiffness(FrequencyAxis axis, int tile, Span<double> stiffness)
     {
         stiffness.Clear();

@@ -24,6 +24,8 @@ public sealed class MatrixMount : MountLaw
 
     public override bool IsDiagonal => false;
 
+    public override double ConstantLossFactor => _lossFactor;
+
     public override void FillStiffness(FrequencyAxis axis, int tile, Span<double> stiffness)
     {
         int order = Directions.Count;

@@ -9,7 +9,11 @@ public sealed class ScaledMount(MountLaw like, double scale) : MountLaw
 
     public override bool IsDiagonal => like.IsDiagonal;
 
+    public override bool IsTwoPort => like.IsTwoPort;
+
     public override (double FromHz, double ToHz)? Band => like.Band;
+
+    public override double ConstantLossFactor => like.ConstantLossFactor;
 
     public override void FillStiffness(FrequencyAxis axis, int tile, Span<double> stiffness)
     {

@@ -33,28 +33,10 @@ public sealed class TabledMount : MountLaw
             Span<double> entry = stiffness.Slice(i * (_tables.Length + 1) * Tiling.EntryLength, Tiling.EntryLength);
             for (int lane = 0; lane < Tiling.Lanes; lane++)
             {
-                Complex k = Interpolate(_tables[i], HertzOf(axis, tile, lane));
+                Complex k = _tables[i].At(HertzOf(axis, tile, lane));
                 entry[lane] = k.Real;
                 entry[Tiling.Lanes + lane] = k.Imaginary;
             }
         }
-    }
-
-    private static Complex Interpolate(StiffnessTable table, double hz)
-    {
-        int same = table.Axis.IndexOf(hz);
-        if (same >= 0)
-        {
-            return table.Stiffness[same];
-        }
-
-        int above = ~table.Axis.Hz.BinarySearch(hz);
-        if (above <= 0 || above >= table.Axis.Count)
-        {
-            throw new ArgumentOutOfRangeException(nameof(hz), hz, "outside the band of the stiffness table");
-        }
-
-        double share = (hz - table.Axis[above - 1]) / (table.Axis[above] - table.Axis[above - 1]);
-        return (1 - share) * table.Stiffness[above - 1] + share * table.Stiffness[above];
     }
 }

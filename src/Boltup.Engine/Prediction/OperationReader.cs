@@ -34,7 +34,7 @@ internal sealed class OperationReader(AssemblyModel assembly, CouplingLayout lay
     }
 
     private JointForceSpectrum ReadJointForce(Constraint constraint, int row, Range cases, int[] lines) => new(
-        constraint.Joint.Name,
+        constraint.JointName,
         constraint.Direction,
         constraint.Direction >= Direction.RX ? "N·m" : "N",
         Spectrum(solution.JointForces, row, cases, lines));

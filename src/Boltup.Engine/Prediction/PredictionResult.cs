@@ -37,6 +37,10 @@ public sealed record OperationResult(
 public sealed record ResponseSpectrum(string Name, string Dof, Quantity Quantity, string Unit, IReadOnlyList<Complex> Values);
 
 /// <summary>The force a joint carries from the first to the second point of its <c>between</c>, in the axes of the assembly.</summary>
+/// <param name="Joint">
+/// Name of the joint. A mount with mass effect has two forces in a direction: the one under the joint's own name is that on the second
+/// point, and the one that it takes up from the first has <c>, first end</c> behind the name.
+/// </param>
 /// <param name="Unit"><c>N</c>, or <c>N·m</c> for a rotation.</param>
 public sealed record JointForceSpectrum(string Joint, Direction Direction, string Unit, IReadOnlyList<Complex> Values);
 
