@@ -27,6 +27,12 @@ public sealed record Curve
     /// <summary>Whether magnitudes are rms or peak, where the file says so.</summary>
     public Amplitude? Amplitude { get; init; }
 
+    /// <summary>What a mount's stiffness was measured at, where a file holds several, as written there.</summary>
+    public string? At { get; init; }
+
+    /// <summary>k11, k12, k21 or k22 of a mount with mass effect; null for the one stiffness of a mount without.</summary>
+    public string? Term { get; init; }
+
     public bool IsComplex { get; init; } = true;
 
     /// <summary>Whether values have the precision of double; otherwise of single.</summary>

@@ -21,7 +21,8 @@ internal sealed partial class AssemblyBinder
 
         if (map["table"] is YamlNode table)
         {
-            return new TableLawDocument(table.File());
+            var chosen = table as YamlMap;
+            return new TableLawDocument((chosen?["file"] ?? table).File(), chosen?["at"]?.MarkedText());
         }
 
         if ((map["series"] ?? map["parallel"]) is YamlNode others)

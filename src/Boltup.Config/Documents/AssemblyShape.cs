@@ -36,6 +36,15 @@ public static class AssemblyShape
         new("order", new NumberKind("0.6", Sign.Positive), "1 for the Zener law, which is the default; less for the fractional Zener law"),
     ]);
 
+    private static readonly PathKind TableFile = new("a table of dynamic stiffness");
+
+    private static readonly Shape ChosenTable = new("a table of dynamic stiffness",
+    [
+        new("file", TableFile, "CSV of complex dynamic stiffness over frequency", IsRequired: true),
+        new("at", new TextKind("a condition that the table lists, such as `40 degC`"),
+            "which table of a file with the column `at`, such as a temperature or preload", IsRequired: true),
+    ]);
+
     private static readonly ListKind MountNames = new(new TextKind("the name of a mount"), Minimum: 2);
 
     private static readonly Shape Mount = new("a mount",
@@ -44,7 +53,7 @@ public static class AssemblyShape
             "stiffness per direction; a direction left out is free"),
         new("stiffness_matrix", new StiffnessMatrixKind(), "full symmetric stiffness matrix, rows of x, y, z or x, y, z, rx, ry, rz"),
         new("like", new TextKind("the name of a mount"), "another mount whose law this one has"),
-        new("table", new PathKind("a table of dynamic stiffness"), "CSV of complex dynamic stiffness over frequency"),
+        new("table", new EitherKind(TableFile, new ShapeKind(ChosenTable)), "CSV of complex dynamic stiffness over frequency"),
         new("series", MountNames, "mounts one behind the other, beginning at the first point of the joint"),
         new("parallel", MountNames, "mounts side by side"),
         new("relaxation", new ShapeKind(Relaxation), "how the stiffness rises with frequency from its static value"),

@@ -47,4 +47,5 @@ public sealed record LikeLawDocument(Marked<string> Mount, double Scale) : Mount
 }
 
 /// <summary>A complex dynamic stiffness over frequency from a file.</summary>
-public sealed record TableLawDocument(FileReference File) : MountLawDocument;
+/// <param name="At">Which of the tables of the file, where it holds several; null where it holds one.</param>
+public sealed record TableLawDocument(FileReference File, Marked<string>? At) : MountLawDocument;

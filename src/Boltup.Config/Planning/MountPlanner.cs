@@ -1,10 +1,7 @@
-using System.Numerics;
-using Boltup.Config.Binding;
 using Boltup.Config.Documents;
 using Boltup.Engine.Diagnostics;
 using Boltup.Engine.Mounts;
 using Boltup.Engine.Spectra;
-using Boltup.Files;
 
 namespace Boltup.Config.Planning;
 
@@ -40,7 +37,7 @@ internal sealed class MountPlanner(AssemblyDocument assembly, DataLibrary librar
         MatrixLawDocument law => PlanMatrix(law),
         RelaxingLawDocument law => PlanLaw(law.AtRest) is { } atRest ? new RelaxingMount(atRest, law.Relaxation) : null,
         ComposedLawDocument law => PlanComposed(law),
-        TableLawDocument law => PlanTable(law),
+        TableLawDocument law => new TablePlanner(library, diagnostics).Plan(law),
         _ => throw new InvalidOperationException($"no planner for {document.GetType().Name}"),
     };
 
@@ -80,38 +77,5 @@ internal sealed class MountPlanner(AssemblyDocument assembly, DataLibrary librar
             "name mounts that connect the same directions",
             [.. law.Mounts.Zip(mounts, (name, mount) => $"`{name.Value}` connects {string.Join(", ", mount.Directions.Select(Dof.NameOf))}")]);
         return null;
-    }
-
-    private TabledMount? PlanTable(TableLawDocument law)
-    {
-        if (library.Open(law.File) is not { } file)
-        {
-            return null;
-        }
-
-        Curve[] curves = [.. file.Curves.Where(curve => curve.Kind == FunctionKind.MountStiffness)];
-        if (curves.Length == 0)
-        {
-            diagnostics.Error(
-                PlanCodes.NoCurves,
-                $"`{law.File.Written}` is no table of dynamic stiffness",
-                law.File.Span,
-                "a table is a CSV with the header `direction,frequency_hz,real,imag`");
-            return null;
-        }
-
-        var tables = new List<StiffnessTable>();
-        foreach (Curve curve in curves)
-        {
-            var values = new Complex[curve.Axis.Count];
-            if (!file.ReadSpectrum(curve, values, diagnostics))
-            {
-                return null;
-            }
-
-            tables.Add(new StiffnessTable(curve.Response!.Direction, curve.Axis, values));
-        }
-
-        return new TabledMount(tables);
     }
 }

@@ -16,6 +16,7 @@ public static class AssemblyRules
         ConnectionRules.Check(assembly, found);
         SourceRules.Check(assembly, layout, found);
         AxisRules.Check(assembly, found);
+        MountRules.Check(assembly, found);
         foreach (PartLayout part in layout.Parts.Where(part => part.IsUsed))
         {
             FrfRules.Check(part, found);

@@ -1,6 +1,7 @@
 using System.Globalization;
 using Boltup.Engine.Coupling;
 using Boltup.Engine.Diagnostics;
+using Boltup.Engine.Mounts;
 using Boltup.Engine.Spectra;
 
 namespace Boltup.Engine.Prediction;
@@ -23,9 +24,7 @@ internal static class AxisRules
 
     private static void CheckBand(Joint joint, FrequencyAxis axis, DiagnosticBag found)
     {
-        if (joint.Mount?.Band is { } band
-            && (axis.FirstHz < band.FromHz * (1 - FrequencyAxis.RelativeTolerance)
-                || axis.LastHz > band.ToHz * (1 + FrequencyAxis.RelativeTolerance)))
+        if (joint.Mount?.Band is { } band && !IsWithinBand(joint.Mount, axis))
         {
             found.Error(
                 EngineCodes.OutsideBand,
@@ -37,6 +36,11 @@ internal static class AxisRules
                 $"lines of the assembly: {axis}");
         }
     }
+
+    /// <summary>Whether a mount is known at every line.</summary>
+    internal static bool IsWithinBand(MountLaw mount, FrequencyAxis axis) => mount.Band is not { } band
+        || (axis.FirstHz >= band.FromHz * (1 - FrequencyAxis.RelativeTolerance)
+            && axis.LastHz <= band.ToHz * (1 + FrequencyAxis.RelativeTolerance));
 
     private static void CheckOperation(Operation operation, FrequencyAxis axis, DiagnosticBag found)
     {

@@ -32,7 +32,11 @@ public sealed class Predictor
     }
 
     /// <summary>Judges an assembly and the FRFs that it needs without coupling them.</summary>
-    public static void Check(AssemblyModel assembly, DiagnosticBag diagnostics) => new Predictor(assembly).ReadParts(diagnostics);
+    public static void Check(AssemblyModel assembly, DiagnosticBag diagnostics)
+    {
+        new Predictor(assembly).ReadParts(diagnostics);
+        MountRules.HintAtCausality(assembly, diagnostics);
+    }
 
     private TiledMatrix?[]? ReadParts(DiagnosticBag diagnostics)
     {

@@ -10,7 +10,21 @@ internal sealed record CsvHeader(string Text, string Format, FunctionKind Kind, 
     public static readonly CsvHeader Stiffness = new(
         "direction,frequency_hz,real,imag", "CSV of dynamic stiffness", FunctionKind.MountStiffness, 1);
 
-    public static IReadOnlyList<CsvHeader> All { get; } = [Frf, Spectrum, Stiffness];
+    /// <summary>Several tables of one mount, told apart by what they were measured at, such as a temperature or preload.</summary>
+    public static readonly CsvHeader StiffnessFamily = new(
+        "at,direction,frequency_hz,real,imag", "CSV of dynamic stiffness", FunctionKind.MountStiffness, 2);
+
+    /// <summary>Driving-point and transfer stiffness of a mount with mass effect.</summary>
+    public static readonly CsvHeader TwoPort = new(
+        "term,direction,frequency_hz,real,imag", "CSV of dynamic stiffness", FunctionKind.MountStiffness, 2);
+
+    public static readonly CsvHeader TwoPortFamily = new(
+        "at,term,direction,frequency_hz,real,imag", "CSV of dynamic stiffness", FunctionKind.MountStiffness, 3);
+
+    public static IReadOnlyList<CsvHeader> All { get; } = [Frf, Spectrum, Stiffness, StiffnessFamily, TwoPort, TwoPortFamily];
+
+    /// <summary>What each name column holds.</summary>
+    public IReadOnlyList<CsvName> Names { get; } = [.. Text.Split(',').Take(NameColumns).Select(CsvName.Of)];
 
     /// <summary>All headers, for messages.</summary>
     public static string KnownText => string.Join("; ", All.Select(header => $"`{header.Text}`"));

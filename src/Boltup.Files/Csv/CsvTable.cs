@@ -32,7 +32,7 @@ internal sealed class CsvTable(CsvHeader header, string displayPath, DiagnosticB
             return;
         }
 
-        Span<Range> fields = stackalloc Range[5];
+        Span<Range> fields = stackalloc Range[6];
         int found = CsvRow.Split(row, fields);
         if (found != header.Columns)
         {
@@ -64,8 +64,9 @@ internal sealed class CsvTable(CsvHeader header, string displayPath, DiagnosticB
     private Curve Finish(CsvCurve curve, int index)
     {
         Values.Add([.. curve.Values]);
-        Dof first = DofOf(curve.Names[0]);
-        Dof? second = header.NameColumns > 1 ? DofOf(curve.Names[1]) : null;
+        bool isStiffness = header.Kind == FunctionKind.MountStiffness;
+        Dof first = DofOf(curve.Names[isStiffness ? ^1 : 0]);
+        Dof? second = header.Kind == FunctionKind.Frf ? DofOf(curve.Names[1]) : null;
         return new Curve
         {
             Index = index,
@@ -75,10 +76,15 @@ internal sealed class CsvTable(CsvHeader header, string displayPath, DiagnosticB
             ResponseQuantity = first.Direction == Direction.P ? Quantity.Pressure : Quantity.Unknown,
             ExcitationQuantity = second is null ? Quantity.Unknown : second.Direction == Direction.Q ? Quantity.VolumeVelocity : Quantity.Force,
             Axis = _axes.Share(CollectionsMarshal.AsSpan(curve.Hz))!, // rows were checked to increase
+            At = Named(curve, CsvName.At),
+            Term = Named(curve, CsvName.Term),
             Title = string.Join(" / ", curve.Names),
             Span = curve.Span,
         };
     }
+
+    private string? Named(CsvCurve curve, string column) =>
+        curve.Names.Where((_, i) => header.Names[i].Column == column).FirstOrDefault();
 
     private Dof DofOf(string name)
     {
@@ -98,16 +104,15 @@ internal sealed class CsvTable(CsvHeader header, string displayPath, DiagnosticB
         for (int i = 0; i < names.Length; i++)
         {
             names[i] = Encoding.UTF8.GetString(row[fields[i]]).Replace("\"\"", "\"", StringComparison.Ordinal).Trim();
-            if (!IsName(names[i]))
+            if (!header.Names[i].Takes(names[i]))
             {
-                string expected = header.Kind == FunctionKind.MountStiffness ? "a direction" : "a dof of the form point.direction";
                 Error(
                     FileCodes.BadCsvRow,
-                    $"`{names[i]}` is not {expected}",
+                    $"`{names[i]}` is not {header.Names[i].Expected}",
                     line,
                     ColumnOf(row, fields[i]),
                     names[i].Length,
-                    "directions are x, y, z, rx, ry, rz, p and q");
+                    header.Names[i].Choices);
                 return null;
             }
         }
@@ -116,10 +121,6 @@ internal sealed class CsvTable(CsvHeader header, string displayPath, DiagnosticB
         _lastName = name.ToArray();
         return _last;
     }
-
-    private bool IsName(string text) => header.Kind == FunctionKind.MountStiffness
-        ? Dof.TryParseDirection(text, out Direction direction) && direction <= Direction.RZ
-        : Dof.TryParse(text, out _);
 
     private CsvCurve FindOrAdd(string[] names, int line)
     {

@@ -1,5 +1,6 @@
 using System.Numerics;
 using Boltup.Config.Planning;
+using Boltup.Engine.Diagnostics;
 using Boltup.Engine.Mounts;
 using Boltup.Tests.Support;
 
@@ -48,16 +49,54 @@ public class MountPlanningTests
         Assert.Equal(5, folder.Diagnostics.Items[0].Span!.Line);
     }
 
-    private static MountLaw? Plan(string law, string others = "")
+    [Theory]
+    [InlineData("40 degC", 2e5)]
+    [InlineData("40 °C", 2e5)]
+    [InlineData("20 degC", 1e5)]
+    public void Plan_TableOfAFamily_IsTheOneThatIsListed(string at, double expected) => Near.Equal(
+        new Complex(expected, 1e3), MountAt.Entry(Plan($"{{ table: {{ file: table.csv, at: {at} }} }}", table: Family)!, 80), 1e-15);
+
+    [Theory]
+    [InlineData("{ table: { file: table.csv, at: 30 degC } }", Family, "PLN082", "`20 degC`, `40 degC`")]
+    [InlineData("{ table: table.csv }", Family, "PLN081", "at: 20 degC")]
+    [InlineData("{ table: { file: table.csv, at: 30 degC } }", "direction,frequency_hz,real,imag\nx,20,1,0\nx,200,1,0\n", "PLN082", "remove `at`")]
+    [InlineData("{ table: table.csv }", "term,direction,frequency_hz,real,imag\nk11,x,20,1,0\nk21,x,20,1,0\n", "PLN083", "`k11`, `k21`")]
+    public void Plan_TableThatDoesNotFit_IsRefused(string law, string table, string code, string words)
     {
-        using ConfigFolder folder = Folder(law, others);
+        using ConfigFolder folder = Folder(law, "", table);
+        Assert.Null(AssemblyPlanner.Plan("a.assembly.yaml", folder.Options with { WorkingDirectory = folder.Root }, folder.Diagnostics));
+        Diagnostic error = Assert.Single(folder.Diagnostics.Items);
+        Assert.Equal((code, "a.assembly.yaml", 5), (error.Code.Code, error.Span!.File, error.Span.Line));
+        Assert.Contains(words, string.Join("\n", [error.Message, .. error.Helps, .. error.Notes]), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Plan_TableOfATwoPort_HasTheForceOfEachEnd()
+    {
+        MountLaw law = Plan("{ table: { file: table.csv, at: 1200 N } }", table: TwoPort)!;
+        Assert.True(law.IsTwoPort);
+        Complex[,] k = MountAt.Matrix(law, 200);
+        Assert.Equal([new(9, 1), new(7, 2), new(7, 2), new(8, 3)], k.Cast<Complex>());
+    }
+
+    private const string Family =
+        "at,direction,frequency_hz,real,imag\n20 degC,x,20,1e5,1e3\n20 degC,x,200,1e5,1e3\n40 degC,x,20,2e5,1e3\n40 degC,x,200,2e5,1e3\n";
+
+    private const string TwoPort =
+        "at,term,direction,frequency_hz,real,imag\n1.2 kN,k11,x,20,10,1\n1.2 kN,k11,x,200,9,1\n1.2 kN,k21,x,20,-7,-2\n1.2 kN,k21,x,200,-7,-2\n"
+        + "1.2 kN,k22,x,20,9,3\n1.2 kN,k22,x,200,8,3\n";
+
+    private static MountLaw? Plan(string law, string others = "", string table = "")
+    {
+        using ConfigFolder folder = Folder(law, others, table);
         using AssemblyPlan? plan = AssemblyPlanner.Plan("a.assembly.yaml", folder.Options with { WorkingDirectory = folder.Root }, folder.Diagnostics);
         Assert.True(plan is not null, string.Join("\n", folder.Diagnostics.Items.Select(item => item.Message)));
         Assert.Equal("law", plan.Assembly.Joints[0].MountName);
         return plan.Assembly.Joints[0].Mount;
     }
 
-    private static ConfigFolder Folder(string law, string others) => new ConfigFolder()
+    private static ConfigFolder Folder(string law, string others, string table = "") => new ConfigFolder()
+        .With("table.csv", table)
         .With("mass.part.yaml", "boltup: part/1\nlumped: { direction: x, masses: { m: 1 kg } }\n")
         .With("a.assembly.yaml",
             "boltup: assembly/1\nfrequencies: { from: 20 Hz, to: 200 Hz, step: 20 Hz }\nparts: { mass: mass.part.yaml }\n"

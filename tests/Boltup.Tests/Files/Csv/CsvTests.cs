@@ -90,6 +90,26 @@ public class CsvTests
         Assert.Equal(new Complex(2e5, 3e4), read[0][0]);
     }
 
+    [Fact]
+    public void Read_FamilyOfTwoPorts_HasConditionAndTerm()
+    {
+        ReadFile read = ReadFile.Of("at,term,direction,frequency_hz,real,imag\n40 degC,k21,z,10,-2e5,-3e4\n40 degC,k11,z,10,2e5,3e4\n"u8);
+        Assert.Equal([("40 degC", "k21"), ("40 degC", "k11")], read.Curves.Select(curve => (curve.At, curve.Term)));
+        Assert.All(read.Curves, curve => Assert.Equal(new Dof("", Direction.Z), curve.Response));
+        Assert.All(read.Curves, curve => Assert.Null(curve.Excitation));
+    }
+
+    [Theory]
+    [InlineData("term,direction,frequency_hz,real,imag\nk13,z,10,1,2\n", "data:2:1", "k11, k12, k21 and k22")]
+    [InlineData("at,direction,frequency_hz,real,imag\n20 degC,p,10,1,2\n", "data:2:9", "directions are x")]
+    [InlineData("at,direction,frequency_hz,real,imag\n,x,10,1,2\n", "data:2:1", "40 degC")]
+    public void Read_StiffnessWithAWrongName_SaysWhatTheColumnTakes(string text, string place, string words)
+    {
+        Diagnostic error = Assert.Single(ReadFile.Of(text).Diagnostics);
+        Assert.Equal(("DAT009", place), (error.Code.Code, error.Span!.ToString()));
+        Assert.Contains(words, error.Helps[0], StringComparison.Ordinal);
+    }
+
     [Theory]
     [InlineData("a.x,b.y,20,1\n", "DAT009", "data:2:1")]
     [InlineData("a.x,b.y,20,1,2,3\n", "DAT009", "data:2:1")]
