@@ -1,3 +1,4 @@
+using System.Globalization;
 using Boltup.Engine.Spectra;
 
 namespace Boltup.Engine.Evidence;
@@ -17,4 +18,8 @@ public sealed record AgreementLimit(double LimitDb, double? UpToHz)
 
         return new AgreementLimit(limitDb, agreed == 0 ? null : axis[agreed - 1]);
     }
+
+    public override string ToString() => UpToHz is { } end
+        ? string.Create(CultureInfo.InvariantCulture, $"within {LimitDb:G3} dB up to {end:G6} Hz")
+        : string.Create(CultureInfo.InvariantCulture, $"within {LimitDb:G3} dB nowhere from the lowest line on");
 }

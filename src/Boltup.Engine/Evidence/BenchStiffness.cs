@@ -1,3 +1,4 @@
+using System.Globalization;
 using Boltup.Engine.Spectra;
 
 namespace Boltup.Engine.Evidence;
@@ -22,6 +23,11 @@ public sealed record BenchStiffness(
 {
     /// <summary>The limits in dB within which agreement is looked for.</summary>
     public static IReadOnlyList<double> LimitsDb { get; } = [1, 3, 10];
+
+    /// <summary>How far off the contact forces are, and up to where they would pass for blocked forces.</summary>
+    public string Statement => string.Create(
+        CultureInfo.InvariantCulture,
+        $"contact forces on the bench differ from the blocked forces by {100 * TotalDifference:F1} % (2-norm over all lines, phase included); their levels agree {string.Join(", ", Agreement)}");
 
     /// <summary>The widest agreement that every dof shares for a limit of <see cref="LimitsDb"/>, null when one fails at the first line.</summary>
     public double? AllDofsAgreeUpToHz(double limitDb)
