@@ -13,7 +13,7 @@ public static class ContactForceRoutes
 
     /// <summary>
     /// Mount-stiffness method of transfer path analysis (common practice; the stiffness as in ISO 10846): f = Z (u_source − u_receiver), the
-    /// force that each massless mount exerts on the receiver.
+    /// force that each mount exerts on the receiver; of a mount with mass effect that is not what the source exerts on the mount.
     /// </summary>
     /// <param name="mounts">The mounts and the points that they join.</param>
     /// <param name="sourceSide">Displacements that hold every direction of the mounts at their source points, in the axes of the mounts.</param>
@@ -36,11 +36,11 @@ public static class ContactForceRoutes
     private static Complex[][] Carried(MountPath path, SpectrumSet sourceSide, SpectrumSet receiverSide)
     {
         FrequencyAxis axis = sourceSide.Axis;
-        int size = path.Mount.Directions.Count;
-        Complex[][] stretch = [.. path.Mount.Directions.Select(direction => Difference(
-            Spectrum(sourceSide, new Dof(path.SourcePoint, direction)), Spectrum(receiverSide, new Dof(path.ReceiverPoint, direction))))];
-        Complex[][] forces = [.. stretch.Select(_ => new Complex[axis.Count])];
-        var stiffness = new TiledMatrix(Tiling.Lanes, size, size);
+        int order = path.Mount.Order;
+        int forceCount = path.Mount.Directions.Count;
+        Complex[][] motion = Motion(path, sourceSide, receiverSide);
+        Complex[][] forces = [.. path.Mount.Directions.Select(_ => new Complex[axis.Count])];
+        var stiffness = new TiledMatrix(Tiling.Lanes, order, order);
         for (int line = 0; line < axis.Count; line++)
         {
             if (line % Tiling.Lanes == 0)
@@ -48,16 +48,25 @@ public static class ContactForceRoutes
                 path.Mount.FillStiffness(axis, line / Tiling.Lanes, stiffness.Tile(0));
             }
 
-            for (int i = 0; i < size * size; i++)
+            for (int i = 0; i < forceCount * order; i++)
             {
-                forces[i / size][line] += stiffness[line % Tiling.Lanes, i / size, i % size] * stretch[i % size][line];
+                (int row, int column) = (i / order, i % order);
+                forces[row][line] += stiffness[line % Tiling.Lanes, order - forceCount + row, column] * motion[column][line];
             }
         }
 
         return forces;
     }
 
-    private static Complex[] Difference(Complex[] first, Complex[] second) => [.. first.Zip(second, (a, b) => a - b)];
+    /// <summary>The displacements that the stiffness of a mount takes: relative ones, or those of its two ends.</summary>
+    private static Complex[][] Motion(MountPath path, SpectrumSet sourceSide, SpectrumSet receiverSide)
+    {
+        IEnumerable<Complex[]> source = path.Mount.Directions.Select(direction => Spectrum(sourceSide, new Dof(path.SourcePoint, direction)));
+        IEnumerable<Complex[]> receiver = path.Mount.Directions.Select(direction => Spectrum(receiverSide, new Dof(path.ReceiverPoint, direction)));
+        return path.Mount.IsTwoPort
+            ? [.. source, .. receiver.Select(values => values.Select(value => -value).ToArray())]
+            : [.. source.Zip(receiver, (first, second) => first.Zip(second, (a, b) => a - b).ToArray())];
+    }
 
     private static Complex[] Spectrum(SpectrumSet set, Dof dof)
     {

@@ -17,7 +17,7 @@ namespace Boltup.Engine.Evidence;
 public static class ContactTransfer
 {
     /// <summary>From source and bench, each hung or standing for itself.</summary>
-    /// <param name="mounts">Mounts between them; a dof that is in none is joined rigidly. A direction that its mount does not carry must not be among the dofs.</param>
+    /// <param name="mounts">Mounts between them; a dof that is in none is joined rigidly. A direction that its mount does not carry must not be among the dofs, and no mount may be a two-port.</param>
     public static TiledMatrix? FromFreeParts(
         FrfMatrix source, FrfMatrix bench, IReadOnlyList<MountPath> mounts, DiagnosticBag diagnostics)
     {
@@ -127,6 +127,11 @@ public static class ContactTransfer
     /// <summary>For each direction of the mount its place among the dofs, or −1 where it is not among them.</summary>
     private static int[] PlacesOf(MountPath path, IReadOnlyList<Dof> source, IReadOnlyList<Dof> bench)
     {
+        if (path.Mount.IsTwoPort)
+        {
+            throw new ArgumentException($"the mount at {path.SourcePoint} has mass effect: its two ends carry different forces");
+        }
+
         foreach (Dof dof in source.Where(dof => dof.Point == path.SourcePoint && !path.Mount.Directions.Contains(dof.Direction)))
         {
             throw new ArgumentException($"the mount at {path.SourcePoint} carries no force along {dof}");

@@ -36,6 +36,18 @@ public class ContactForceRoutesTests
         Assert.All(route.Forces.Values[1], value => Near.Equal(new Complex(8, 4), value, 1e-14));
     }
 
+    /// <summary>F₂ = −(k₂₁u₁ + k₂₂u₂), forces of ISO 10846 pointing into the mount at both ends.</summary>
+    [Fact]
+    public void ThroughMounts_MountWithMassEffect_GivesTheForceOnTheReceiver()
+    {
+        FrequencyAxis axis = FrequencyAxis.Even(1, 1, 9);
+        StiffnessTable Table(Complex k) => new(Direction.X, axis, Enumerable.Repeat(k, 9).ToArray());
+        var mount = new TwoPortMount([new TwoPortTable(Table(7), Table(new Complex(-5, -1)), Table(new Complex(-5, -1)), Table(6))]);
+        SpectrumSet Motion(string dof, Complex value) => new(axis, [Dof.Parse(dof)], [Enumerable.Repeat(value, 9).ToArray()]);
+        RouteForces route = ContactForceRoutes.ThroughMounts([new MountPath(mount, "s", "r")], Motion("s.x", 2), Motion("r.x", 1));
+        Assert.All(route.Forces.Values[0], value => Near.Equal(new Complex(4, 2), value, 1e-14));
+    }
+
     [Fact]
     public void ThroughMounts_MotionOfAPointMissing_NamesIt()
     {
