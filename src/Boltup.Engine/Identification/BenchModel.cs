@@ -1,0 +1,30 @@
+using Boltup.Engine.Parts;
+using Boltup.Engine.Spectra;
+
+namespace Boltup.Engine.Identification;
+
+/// <summary>A bench ready to be computed: names resolved, axes agreed, operational spectra read.</summary>
+/// <param name="Axis">Lines that the FRFs and all operations share.</param>
+/// <param name="Installed">FRFs of the installed source at rest, from interface dofs to all sensors.</param>
+/// <param name="Interface">Where the blocked forces act.</param>
+/// <param name="Indicators">Sensor dofs of the identification; at least as many as interface dofs.</param>
+/// <param name="Validation">Sensor dofs that take no part in it.</param>
+public sealed record BenchModel(
+    string Title,
+    FrequencyAxis Axis,
+    IPartModel Installed,
+    IReadOnlyList<Dof> Interface,
+    IReadOnlyList<Dof> Indicators,
+    IReadOnlyList<Dof> Validation,
+    IReadOnlyList<BenchOperation> Operations,
+    SolveChoice Solve)
+{
+    /// <summary>
+    /// Standard deviation of real and imaginary part of every installed FRF as receptance, sensors × interface dofs, in the real parts of
+    /// the tiles; null when the bench gives no coherence.
+    /// </summary>
+    public TiledMatrix? Noise { get; init; }
+
+    /// <summary>All sensors, indicators first.</summary>
+    public IReadOnlyList<Dof> Sensors { get; } = [.. Indicators, .. Validation];
+}
