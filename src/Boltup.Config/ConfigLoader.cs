@@ -23,6 +23,14 @@ public static class ConfigLoader
         return new LoadResult<AssemblyDocument>(assembly, load.FilesRead);
     }
 
+    /// <summary>Loads a bench file.</summary>
+    public static LoadResult<BenchDocument> LoadBench(string path, LoadOptions options, DiagnosticBag diagnostics)
+    {
+        var load = new DocumentLoad(path, options);
+        BenchDocument? bench = load.Bench(diagnostics);
+        return new LoadResult<BenchDocument>(bench, load.FilesRead);
+    }
+
     /// <summary>The kind of a document by its first key, or null with a diagnostic when it has none that this version reads.</summary>
     public static DocumentKind? KindOf(string path, LoadOptions options, DiagnosticBag diagnostics) =>
         new DocumentLoad(path, options).Kind(diagnostics);

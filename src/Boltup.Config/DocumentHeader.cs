@@ -10,8 +10,9 @@ internal static class DocumentHeader
     private const string Key = "boltup";
     private const string Version = "1";
 
-    private static readonly string[] Supported = ["part", "assembly"];
-    private static readonly string[] Announced = ["bench", "study"];
+    /// <summary>Names in the order of <see cref="DocumentKind"/>.</summary>
+    internal static readonly string[] Supported = ["part", "assembly", "bench", "forces"];
+    private static readonly string[] Announced = ["study"];
 
     /// <summary>Whether the document is of the expected kind.</summary>
     public static bool Is(YamlMap root, DocumentKind expected, DiagnosticBag diagnostics)
@@ -37,7 +38,7 @@ internal static class DocumentHeader
         if (entry is null || entry != root.Entries[0])
         {
             string help = entry is null
-                ? "begin with `boltup: part/1` or `boltup: assembly/1`"
+                ? $"begin with a kind and a version, such as `boltup: {Supported[0]}/{Version}`; kinds: {Words.List(Supported)}"
                 : $"move `{Key}` from line {entry.KeySpan.Line} to the top";
             diagnostics.Error(ConfigCodes.WrongHeader,
                 "the first key is not `boltup`", root.Entries.Count > 0 ? root.Entries[0].KeySpan : root.Span, help);

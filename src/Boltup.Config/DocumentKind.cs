@@ -5,4 +5,6 @@ public enum DocumentKind
 {
     Part,
     Assembly,
+    Bench,
+    Forces,
 }

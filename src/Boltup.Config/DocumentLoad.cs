@@ -48,7 +48,7 @@ internal sealed class DocumentLoad
         if (assembly is not null)
         {
             var inParts = new DiagnosticBag();
-            assembly = WithParts(assembly, inParts);
+            assembly = WithForces(WithParts(assembly, inParts), inParts);
             new AssemblyReferences(assembly, found).Check();
             found.AddRange(inParts.Items);
         }
@@ -60,6 +60,36 @@ internal sealed class DocumentLoad
 
         diagnostics.AddRange(PlaceOrder.Of(found.Items));
         return found.HasErrors ? null : assembly;
+    }
+
+    public BenchDocument? Bench(DiagnosticBag diagnostics)
+    {
+        var found = new DiagnosticBag();
+        BenchDocument? bench = BindBench(found);
+        if (bench is not null)
+        {
+            new BenchReferences(bench, found).Check();
+        }
+
+        if (bench is not null && !found.HasErrors)
+        {
+            CheckFiles(BenchFiles(bench), found);
+        }
+
+        diagnostics.AddRange(PlaceOrder.Of(found.Items));
+        return found.HasErrors ? null : bench;
+    }
+
+    private BenchDocument? BindBench(DiagnosticBag found)
+    {
+        if (_reader.Read(_topPath, named: null, found) is not YamlMap root || !DocumentHeader.Is(root, DocumentKind.Bench, found))
+        {
+            return null;
+        }
+
+        new ShapeValidator(found).Validate(root, BenchShape.Root);
+        BenchDocument? bench = found.HasErrors ? null : new BenchBinder(found).Bind(root);
+        return found.HasErrors ? null : bench;
     }
 
     private PartDocument? PartAt(string path, FileReference? named, DiagnosticBag found)
@@ -105,6 +135,31 @@ internal sealed class DocumentLoad
         return assembly with { Parts = [.. assembly.Parts.Select(placed => placed with { Document = loaded[placed.File.FullPath] })] };
     }
 
+    /// <summary>Loads the handovers that operations name instead of force files.</summary>
+    private AssemblyDocument WithForces(AssemblyDocument assembly, DiagnosticBag inForces) => assembly with
+    {
+        Operations = [.. assembly.Operations.Select(operation => operation with
+        {
+            Forces = [.. operation.Forces.Select(force => IsHandover(force) ? force with { Handover = ForcesAt(force.File, inForces) } : force)],
+        })],
+    };
+
+    private static bool IsHandover(ForceDocument force) => Path.GetExtension(force.File.FullPath) is ".yaml" or ".yml";
+
+    private ForcesDocument? ForcesAt(FileReference named, DiagnosticBag diagnostics)
+    {
+        var found = new DiagnosticBag();
+        ForcesDocument? forces = null;
+        if (_reader.Read(named.FullPath, named, found) is YamlMap root && DocumentHeader.Is(root, DocumentKind.Forces, found))
+        {
+            new ShapeValidator(found).Validate(root, ForcesShape.Root);
+            forces = found.HasErrors ? null : new ForcesBinder(found).Bind(root);
+        }
+
+        diagnostics.AddRange(found.Items);
+        return forces;
+    }
+
     private void CheckFiles(IEnumerable<FileReference> files, DiagnosticBag found)
     {
         foreach (FileReference file in files)
@@ -119,5 +174,15 @@ internal sealed class DocumentLoad
     private static IEnumerable<FileReference> AssemblyFiles(AssemblyDocument assembly) =>
         assembly.Parts.DistinctBy(placed => placed.File.FullPath).SelectMany(placed => PartFiles(placed.Document!))
             .Concat(assembly.Mounts.Select(mount => mount.Law).OfType<TableLawDocument>().Select(law => law.File))
-            .Concat(assembly.Operations.SelectMany(operation => operation.Forces).Select(force => force.File));
+            .Concat(assembly.Operations.SelectMany(operation => operation.Forces).Select(force => force.DataFile));
+
+    private static IEnumerable<FileReference> BenchFiles(BenchDocument bench) =>
+        bench.InstalledFrfs.Select(file => file.Frf.File)
+            .Concat(bench.InstalledFrfs.Select(file => file.Coherence).OfType<FileReference>())
+            .Concat(bench.Operations.SelectMany(operation => operation.Files))
+            .Concat(bench.Second?.InstalledFrfs.Select(file => file.File) ?? [])
+            .Concat(bench.Second?.Operations.SelectMany(operation => operation.Files) ?? [])
+            .Concat(bench.Model is null ? [] : [bench.Model.Assembly])
+            .Concat(bench.Routes.Select(route => route.SourcePart).OfType<FileReference>())
+            .Concat(bench.Routes.SelectMany(route => route.Operations).SelectMany(operation => operation.Files));
 }

@@ -13,42 +13,17 @@ internal sealed partial class AssemblyBinder(DiagnosticBag diagnostics)
 {
     private const double DefaultJointGapM = 0.005;
 
-    /// <summary>Share of a step by which rounding may miss the last line; 1e7 steps are off by less than 1e-8.</summary>
-    private const double StepTolerance = 1e-6;
-
     public AssemblyDocument Bind(YamlMap root, IReadOnlyList<SourceFile> bases) => new(
         root.Source,
         bases,
         root["title"]?.MarkedText(),
-        root["frequencies"] is YamlMap frequencies ? BindFrequencies(frequencies) : null,
+        root["frequencies"] is YamlMap frequencies ? FrequencyBinder.Bind(frequencies, diagnostics) : null,
         [.. root["parts"].Entries().Select(BindPart)],
         [.. root["mounts"].Entries().Select(mount => new MountDocument(mount.MarkedKey(), BindLaw((YamlMap)mount.Value)))],
         [.. root["joints"].Entries().Select(BindJoint).OfType<JointDocument>()],
         [.. root["operations"].Entries().Select(BindOperation)],
         [.. root["responses"].Entries().Select(BindResponse).OfType<ResponseDocument>()],
         root["joint_gap"]?.Si(Dimension.Length) ?? DefaultJointGapM);
-
-    private FrequencyDocument? BindFrequencies(YamlMap map)
-    {
-        Marked<double> from = map["from"]!.MarkedSi(Dimension.Frequency);
-        Marked<double> to = map["to"]!.MarkedSi(Dimension.Frequency);
-        Marked<double> step = map["step"]!.MarkedSi(Dimension.Frequency);
-        if (to.Value < from.Value)
-        {
-            diagnostics.Error(ConfigCodes.BadFrequencies, "`to` is below `from`", to.Span, notes: $"`from` is at {from.Span}");
-            return null;
-        }
-
-        double steps = Math.Floor((to.Value - from.Value) / step.Value + StepTolerance);
-        if (!(steps < FrequencyLimits.MaximumLines))
-        {
-            diagnostics.Error(ConfigCodes.BadFrequencies,
-                FormattableString.Invariant($"more than {FrequencyLimits.MaximumLines} frequency lines"), step.Span, "take a larger step");
-            return null;
-        }
-
-        return new FrequencyDocument(from, to, step, (int)steps + 1);
-    }
 
     private PlacedPartDocument BindPart(YamlEntry entry)
     {
@@ -99,6 +74,7 @@ internal sealed partial class AssemblyBinder(DiagnosticBag diagnostics)
     private static IEnumerable<ForceDocument> BindForces(YamlNode? node, ForceKind kind)
     {
         IEnumerable<YamlNode> files = node is YamlMap single ? [single] : node.Items();
-        return files.Cast<YamlMap>().Select(file => new ForceDocument(kind, file["file"]!.File(), file["part"]!.MarkedText()));
+        return files.Cast<YamlMap>().Select(file => new ForceDocument(
+            kind, file["file"]!.File(), file["part"]!.MarkedText(), file["operation"]?.MarkedText()));
     }
 }

@@ -21,11 +21,31 @@ internal sealed class AssemblyReferences(AssemblyDocument assembly, DiagnosticBa
         foreach (ForceDocument force in assembly.Operations.SelectMany(operation => operation.Forces))
         {
             _parts.Check(force.Part.Value, force.Part.Span, diagnostics);
+            CheckHandover(force);
         }
 
         foreach (ResponseDocument response in assembly.Responses)
         {
             CheckPoint(response.At.Value.Part, response.At.Value.Dof.Point, response.At.Span);
+        }
+    }
+
+    private void CheckHandover(ForceDocument force)
+    {
+        if (force.Handover is null && force.Operation is { } stray)
+        {
+            diagnostics.Error(ConfigCodes.NeedsOtherKey, "`operation` goes with a handover of blocked forces", stray.Span,
+                "name a `*.forces.yaml` with `file`, or remove `operation`");
+        }
+        else if (force.Handover is { } handover && force.HandoverOperation is null)
+        {
+            string[] names = [.. handover.Operations.Select(operation => operation.Name.Value)];
+            diagnostics.Error(
+                ConfigCodes.NoSuchOperation,
+                force.Operation is { } asked ? $"`{force.File.Written}` holds no operation `{asked}`" : $"which operation of `{force.File.Written}`?",
+                force.Operation?.Span ?? force.File.Span,
+                force.Operation is { } wrong ? NearestName.Suggest(wrong.Value, names) : $"add `operation: {names[0]}`",
+                Words.Known("operations", names));
         }
     }
 

@@ -8,13 +8,6 @@ public static class AssemblyShape
 {
     private static readonly PathKind PartFile = new("a part file");
 
-    private static readonly Shape Frequencies = new("a frequency range",
-    [
-        new("from", new QuantityKind(Dimension.Frequency, "20", Sign.NotNegative), "first line", IsRequired: true),
-        new("to", new QuantityKind(Dimension.Frequency, "2000", Sign.Positive), "last line", IsRequired: true),
-        new("step", new QuantityKind(Dimension.Frequency, "1", Sign.Positive), "distance of the lines", IsRequired: true),
-    ]);
-
     private static readonly Shape Turned = new("a rotation",
     [
         new("about", new EitherKind(new ChoiceKind("x", "y", "z"), new ListKind(new NumberKind("1"), 3, 3)),
@@ -80,7 +73,8 @@ public static class AssemblyShape
 
     private static readonly Shape Forces = new("a force file",
     [
-        new("file", new PathKind("a force file"), "CSV or Universal File of forces", IsRequired: true),
+        new("file", new PathKind("a force file"), "CSV or Universal File of forces, or a handover `*.forces.yaml`", IsRequired: true),
+        new("operation", new TextKind("the name of an operation"), "which operation of a handover"),
         new("part", new TextKind("the name of a part"), "the part whose dofs the file names", IsRequired: true),
     ]);
 
@@ -107,7 +101,7 @@ public static class AssemblyShape
         new("boltup", new ChoiceKind("assembly/1"), "kind and version of the document", IsRequired: true),
         new("based_on", new PathKind("an assembly file"), "assembly whose keys this one takes over and changes"),
         new("title", new TextKind("a title"), "what the assembly is"),
-        new("frequencies", new ShapeKind(Frequencies), "lines to compute; by default those that the parts share"),
+        new("frequencies", new ShapeKind(SharedKinds.Frequencies), "lines to compute; by default those that the parts share"),
         new("parts", new NamedKind("part", new EitherKind(PartFile, new ShapeKind(PlacedPart)), IsDotted: true, Minimum: 1),
             "the parts and where they are", IsRequired: true),
         new("mounts", new NamedKind("mount", new ShapeKind(Mount)), "resilient elements"),

@@ -2,7 +2,6 @@ using Boltup.Config.Binding;
 using Boltup.Config.Units;
 using Boltup.Config.Yaml;
 using Boltup.Engine.Diagnostics;
-using Boltup.Engine.Spectra;
 
 namespace Boltup.Config.Documents;
 
@@ -12,31 +11,11 @@ internal sealed class PartBinder(DiagnosticBag diagnostics)
     public PartDocument Bind(YamlMap root) => new(
         root.Source,
         root["title"]?.MarkedText(),
-        [.. root["points"].Entries().Select(BindPoint)],
+        [.. root["points"].Entries().Select(point => PointBinder.Bind(point, diagnostics))],
         root["lumped"] is YamlMap lumped ? BindLumped(lumped) : BindFrf(root["frf"]!),
         root["reciprocity"] is YamlNode fill ? new(true, fill.Span) : null);
 
-    private PointDocument BindPoint(YamlEntry entry)
-    {
-        var map = (YamlMap)entry.Value;
-        return new PointDocument(
-            entry.MarkedKey(),
-            map["node"] is YamlNode node ? new(node.Integer(), node.Span) : null,
-            map["at"]?.Position(),
-            map["axes"] is YamlMap axes ? AxesBinder.Bind(axes, diagnostics) : null);
-    }
-
-    private static FrfModelDocument BindFrf(YamlNode files) => new(
-        [.. files.Items().Cast<YamlMap>().Select(file => new FrfFileDocument(
-            file["file"]!.File(),
-            file["quantity"] is YamlNode quantity ? new(QuantityOf(quantity.Text()), quantity.Span) : null))]);
-
-    private static FrfQuantity QuantityOf(string name) => name switch
-    {
-        "receptance" => FrfQuantity.Receptance,
-        "mobility" => FrfQuantity.Mobility,
-        _ => FrfQuantity.Accelerance,
-    };
+    private static FrfModelDocument BindFrf(YamlNode files) => new([.. files.Items().Cast<YamlMap>().Select(FrfFileBinder.Bind)]);
 
     private static LumpedModelDocument BindLumped(YamlMap map) => new(
         map["direction"]!.Direction(),

@@ -8,24 +8,10 @@ internal static class PartReferences
 {
     public static void Check(PartDocument part, DiagnosticBag diagnostics)
     {
-        CheckNodes(part, diagnostics);
+        PointNodes.Check(part.Points, diagnostics);
         if (part.Model is LumpedModelDocument lumped)
         {
             CheckLumped(part, lumped, diagnostics);
-        }
-    }
-
-    private static void CheckNodes(PartDocument part, DiagnosticBag diagnostics)
-    {
-        var taken = new Dictionary<int, PointDocument>();
-        foreach (PointDocument point in part.Points)
-        {
-            if (point.Node is { } node && !taken.TryAdd(node.Value, point))
-            {
-                diagnostics.Error(ConfigCodes.SameNode,
-                    $"points `{taken[node.Value].Name}` and `{point.Name}` have the same node {node.Value}",
-                    node.Span, notes: $"the other is at {taken[node.Value].Node!.Span}");
-            }
         }
     }
 

@@ -15,7 +15,7 @@ public static class PartShape
         new("z", Components, "direction of the point's z axis in the axes of the part"),
     ]);
 
-    private static readonly Shape Point = new("a point",
+    internal static readonly Shape Point = new("a point",
     [
         new("node", new NumberKind("101", IsInteger: true), "number of the point in a Universal File"),
         new("at", SharedKinds.Position, "position in the axes of the part"),

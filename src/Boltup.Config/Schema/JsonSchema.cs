@@ -15,7 +15,13 @@ public static class JsonSchema
     /// <summary>The schema as indented text, the same bytes every time.</summary>
     public static string Of(DocumentKind kind)
     {
-        Shape shape = kind == DocumentKind.Part ? PartShape.Root : AssemblyShape.Root;
+        Shape shape = kind switch
+        {
+            DocumentKind.Part => PartShape.Root,
+            DocumentKind.Bench => BenchShape.Root,
+            DocumentKind.Forces => ForcesShape.Root,
+            _ => AssemblyShape.Root,
+        };
         using var stream = new MemoryStream();
         var options = new JsonWriterOptions { Indented = true, NewLine = "\n", Encoder = JavaScriptEncoder.UnsafeRelaxedJsonEscaping };
         using (var json = new Utf8JsonWriter(stream, options))
@@ -30,7 +36,7 @@ public static class JsonSchema
     {
         json.WriteStartObject();
         json.WriteString("$schema", Dialect);
-        json.WriteString("title", $"boltup {(kind == DocumentKind.Part ? "part" : "assembly")} document, version 1");
+        json.WriteString("title", $"boltup {DocumentHeader.Supported[(int)kind]} document, version 1");
         if (shape.Find(BasedOn) is null)
         {
             new SchemaWriter(json, isOverlay: false).WriteShape(shape);
