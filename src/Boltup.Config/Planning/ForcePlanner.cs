@@ -41,18 +41,20 @@ internal sealed class ForcePlanner(AssemblyDocument assembly, DataLibrary librar
 
     private ForceSet? ReadSet(ForceDocument document, ref Amplitude? stated)
     {
-        if (library.Open(document.File) is not { } file)
+        if (library.Open(document.DataFile) is not { } file)
         {
             return null;
         }
+
+        stated ??= document.HandoverOperation?.Amplitude;
 
         Curve[] curves = [.. file.Curves.Where(curve => curve is { Kind: FunctionKind.Spectrum, Response: not null })];
         if (curves.Length == 0)
         {
             diagnostics.Error(
                 PlanCodes.NoCurves,
-                $"`{document.File.Written}` holds no force spectra",
-                document.File.Span,
+                $"`{document.DataFile.Written}` holds no force spectra",
+                document.DataFile.Span,
                 $"`boltup inspect {file.DisplayPath}` shows what it holds; a force CSV has the header `dof,frequency_hz,real,imag`");
             return null;
         }
@@ -107,6 +109,11 @@ internal sealed class ForcePlanner(AssemblyDocument assembly, DataLibrary librar
             }
 
             spectra.Add(values);
+        }
+
+        if (document.Handover is { } handover)
+        {
+            new HandoverCheck(assembly, document, handover, diagnostics).Run(curves[0].Axis);
         }
 
         // A file names dofs by node or by the part's own point names.

@@ -13,17 +13,21 @@ internal sealed class FrfPlanner(DataLibrary library, DiagnosticBag diagnostics)
     private readonly Dictionary<DofPair, DataCurve> _curves = [];
 
     /// <summary>The part, or null after an error.</summary>
-    public MeasuredPart? Plan(string name, PartDocument document, FrfModelDocument model)
+    public MeasuredPart? Plan(string name, PartDocument document, FrfModelDocument model) =>
+        Plan(name, document.Points, model.Files, document.FillsReciprocity?.Value ?? false);
+
+    /// <summary>The FRFs of some files between some points, or null after an error.</summary>
+    public MeasuredPart? Plan(string name, IReadOnlyList<PointDocument> points, IReadOnlyList<FrfFileDocument> files, bool fillByReciprocity)
     {
-        var names = new PointNames(document.Points, diagnostics);
+        var names = new PointNames(points, diagnostics);
         bool complete = true;
-        foreach (FrfFileDocument file in model.Files)
+        foreach (FrfFileDocument file in files)
         {
             complete &= AddFile(file, names);
         }
 
-        return complete && SharedAxis(name, model) is { } axis
-            ? new MeasuredPart(name, [.. _curves.Values], document.FillsReciprocity?.Value ?? false, axis)
+        return complete && SharedAxis(name, files) is { } axis
+            ? new MeasuredPart(name, [.. _curves.Values], fillByReciprocity, axis)
             : null;
     }
 
@@ -158,7 +162,7 @@ internal sealed class FrfPlanner(DataLibrary library, DiagnosticBag diagnostics)
         _ => quantity.ToString().ToLowerInvariant(),
     };
 
-    private FrequencyAxis? SharedAxis(string name, FrfModelDocument model)
+    private FrequencyAxis? SharedAxis(string name, IReadOnlyList<FrfFileDocument> files)
     {
         FrequencyAxis? shared = null;
         foreach (FrequencyAxis axis in _curves.Values.Select(curve => curve.Axis).Distinct())
@@ -169,7 +173,7 @@ internal sealed class FrfPlanner(DataLibrary library, DiagnosticBag diagnostics)
                 diagnostics.Error(
                     PlanCodes.NoSharedLines,
                     $"the FRFs of part `{name}` have no common frequency line",
-                    model.Files[0].File.Span,
+                    files[0].File.Span,
                     "bring the files to one grid",
                     $"found: {shared}",
                     $"and: {axis}");

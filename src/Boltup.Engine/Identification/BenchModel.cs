@@ -19,11 +19,8 @@ public sealed record BenchModel(
     IReadOnlyList<BenchOperation> Operations,
     SolveChoice Solve)
 {
-    /// <summary>
-    /// Standard deviation of real and imaginary part of every installed FRF as receptance, sensors × interface dofs, in the real parts of
-    /// the tiles; null when the bench gives no coherence.
-    /// </summary>
-    public TiledMatrix? Noise { get; init; }
+    /// <summary>Coherence of the installed FRFs; null when the bench gives none.</summary>
+    public BenchCoherence? Coherence { get; init; }
 
     /// <summary>All sensors, indicators first.</summary>
     public IReadOnlyList<Dof> Sensors { get; } = [.. Indicators, .. Validation];

@@ -1,4 +1,5 @@
 using Boltup.Engine.Diagnostics;
+using Boltup.Engine.Evidence;
 using Boltup.Engine.Kernels;
 using Boltup.Engine.Parts;
 using Boltup.Engine.Spectra;
@@ -22,8 +23,10 @@ public static class Identifier
         TiledMatrix indicators = TileRows.Take(frf.Values, 0, bench.Indicators.Count);
         TiledMatrix validation = TileRows.Take(frf.Values, bench.Indicators.Count, bench.Validation.Count);
         TiledMatrix[] columns = [.. bench.Operations.Select(operation => MeasuredColumns(bench, operation))];
-        var solver = new ForceSolver(
-            indicators, columns, bench.Solve, bench.Noise is { } noise ? TileRows.Take(noise, 0, bench.Indicators.Count) : null);
+        TiledMatrix? noise = bench.Coherence is { } coherence && bench.Solve.UsesNoise
+            ? TileRows.Take(FrfRandomError.StandardDeviation(frf.Values, coherence.Values, coherence.Averages), 0, bench.Indicators.Count)
+            : null;
+        var solver = new ForceSolver(indicators, columns, bench.Solve, noise);
         solver.Run();
         var singularValues = new SingularSpectrum(bench.Axis, solver.SingularValues);
         RankCheck.Run(bench, singularValues, diagnostics);

@@ -1,0 +1,57 @@
+using Boltup.Engine.Diagnostics;
+
+namespace Boltup.Config.Planning;
+
+public static partial class PlanCodes
+{
+    public static readonly DiagnosticCode FewIndicators = new(
+        "PLN020",
+        "fewer indicators than forces",
+        "Each indicator dof gives one equation at a line, and each interface dof is one unknown.",
+        "four triaxial sensors are 12 dofs, and four points in six directions are 24 forces",
+        "Add sensors until there are more indicator dofs than forces, better twice as many.");
+
+    public static readonly DiagnosticCode NotOverDetermined = new(
+        "PLN021",
+        "as many indicators as forces",
+        "The forces then fit the measurement exactly, whatever its errors. ISO 20270 asks for more indicators than forces.",
+        "12 indicator dofs and 12 forces",
+        "Add sensors, better twice as many dofs as forces.");
+
+    public static readonly DiagnosticCode ForceWithoutFrf = new(
+        "PLN022",
+        "an interface dof without FRFs",
+        "A blocked force is found from the FRFs between its dof and the sensors. A dof that was not excited cannot be left out: its force "
+            + "is there when the source runs, and the other forces would take it over.",
+        "interface: { points: [m1], directions: [x, y, z] }  # and FRFs from m1.x and m1.z only",
+        "Measure the missing FRFs, use a virtual point, or describe an interface that really has fewer directions.",
+        ErrorKind.UnsupportedByData);
+
+    public static readonly DiagnosticCode SensorWithoutFrf = new(
+        "PLN023",
+        "a sensor without FRFs",
+        "No function in the files of `installed_frf` has a response at this point.",
+        "indicators: [s9]  # a sensor of another set-up",
+        "Correct the node of the point, add the file, or remove the sensor from the list.");
+
+    public static readonly DiagnosticCode OtherSensors = new(
+        "PLN024",
+        "operational data from other sensors",
+        "FRFs and operational spectra must come from the same sensors: the identification compares them line by line.",
+        "FRFs at nodes 311 to 318, operation at nodes 411 to 418",
+        "Name the file of this bench, or correct the node numbers of the points.");
+
+    public static readonly DiagnosticCode InterfaceNotInAssembly = new(
+        "PLN025",
+        "the bench as an assembly does not have the interface",
+        "Contact forces are those of joints at the interface points of the source. A point without a joint, or a direction that its joint does not carry, has no contact force.",
+        "model: { assembly: bench.assembly.yaml, source: compressor }  # whose points are f1…f4, and the interface names m1…m4",
+        "Name points and directions in the assembly as on the bench.");
+
+    public static readonly DiagnosticCode CoherenceMissing = new(
+        "PLN026",
+        "an FRF without coherence",
+        "Coherence is given for some of the installed FRFs only, so that their noise is not known as a whole.",
+        "installed_frf: [{ file: bench.unv, coherence: bench_coherence.unv, averages: 10 }]  # and a pair is missing in the second file",
+        "Give the coherence of every FRF, or of none.");
+}
