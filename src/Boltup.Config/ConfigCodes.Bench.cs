@@ -18,23 +18,9 @@ public static partial class ConfigCodes
         "solve: { method: truncated }  # and installed_frf without coherence",
         "Give `coherence` and `averages` with every file, or a threshold such as `below: 0.01`.");
 
-    public static readonly DiagnosticCode ForcesElsewhere = new(
-        "CFG082", "blocked forces identified at other places",
-        "Blocked forces belong to the points, axes and side of the mounts where they were identified. Applied anywhere "
-            + "else they are forces of another source.",
-        "identified at [92 mm, 61 mm, 0 mm], and the part's m1 is at [92 mm, 61 mm, -40 mm], below the mount",
-        "Apply them to the part whose points are those of the bench; correct positions or axes of the part, or identify again.");
-
     public static readonly DiagnosticCode NoSuchOperation = new(
-        "CFG083", "an operation that the forces do not hold",
+        "CFG082", "an operation that the forces do not hold",
         "The handover file of blocked forces holds other operations than the one that is named.",
         "{ file: source.forces.yaml, operation: 2500 rpm, part: compressor }",
         "Name one of the operations of the file.");
-
-    public static readonly DiagnosticCode OutsideForceBand = new(
-        "CFG084", "blocked forces used outside the band in which they hold",
-        "The supplier says up to where the bench tells the forces, and why the band ends there. Outside of it they are "
-            + "noise with the look of a spectrum.",
-        "holds: { from: 50 Hz, to: 800 Hz }, and the assembly is computed up to 2000 Hz",
-        "Restrict `frequencies` to the band, or ask the supplier for forces over a wider one.");
 }

@@ -31,6 +31,14 @@ public static class ConfigLoader
         return new LoadResult<BenchDocument>(bench, load.FilesRead);
     }
 
+    /// <summary>Loads a handover of blocked forces.</summary>
+    public static LoadResult<ForcesDocument> LoadForces(string path, LoadOptions options, DiagnosticBag diagnostics)
+    {
+        var load = new DocumentLoad(path, options);
+        ForcesDocument? forces = load.Forces(diagnostics);
+        return new LoadResult<ForcesDocument>(forces, load.FilesRead);
+    }
+
     /// <summary>The kind of a document by its first key, or null with a diagnostic when it has none that this version reads.</summary>
     public static DocumentKind? KindOf(string path, LoadOptions options, DiagnosticBag diagnostics) =>
         new DocumentLoad(path, options).Kind(diagnostics);

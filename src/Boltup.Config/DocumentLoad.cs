@@ -80,6 +80,19 @@ internal sealed class DocumentLoad
         return found.HasErrors ? null : bench;
     }
 
+    public ForcesDocument? Forces(DiagnosticBag diagnostics)
+    {
+        var found = new DiagnosticBag();
+        ForcesDocument? forces = BindForces(_topPath, named: null, found);
+        if (forces is not null)
+        {
+            CheckFiles(forces.Operations.Select(operation => operation.File), found);
+        }
+
+        diagnostics.AddRange(PlaceOrder.Of(found.Items));
+        return found.HasErrors ? null : forces;
+    }
+
     private BenchDocument? BindBench(DiagnosticBag found)
     {
         if (_reader.Read(_topPath, named: null, found) is not YamlMap root || !DocumentHeader.Is(root, DocumentKind.Bench, found))
@@ -149,15 +162,21 @@ internal sealed class DocumentLoad
     private ForcesDocument? ForcesAt(FileReference named, DiagnosticBag diagnostics)
     {
         var found = new DiagnosticBag();
-        ForcesDocument? forces = null;
-        if (_reader.Read(named.FullPath, named, found) is YamlMap root && DocumentHeader.Is(root, DocumentKind.Forces, found))
-        {
-            new ShapeValidator(found).Validate(root, ForcesShape.Root);
-            forces = found.HasErrors ? null : new ForcesBinder(found).Bind(root);
-        }
-
+        ForcesDocument? forces = BindForces(named.FullPath, named, found);
         diagnostics.AddRange(found.Items);
         return forces;
+    }
+
+    private ForcesDocument? BindForces(string path, FileReference? named, DiagnosticBag found)
+    {
+        if (_reader.Read(path, named, found) is not YamlMap root || !DocumentHeader.Is(root, DocumentKind.Forces, found))
+        {
+            return null;
+        }
+
+        new ShapeValidator(found).Validate(root, ForcesShape.Root);
+        ForcesDocument? forces = found.HasErrors ? null : new ForcesBinder(found).Bind(root);
+        return found.HasErrors ? null : forces;
     }
 
     private void CheckFiles(IEnumerable<FileReference> files, DiagnosticBag found)

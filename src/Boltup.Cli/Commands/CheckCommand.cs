@@ -13,7 +13,7 @@ internal sealed class CheckCommand(Screen screen)
 {
     private readonly Argument<string[]> _files = new("FILE")
     {
-        Description = "Part and assembly files",
+        Description = "Part, assembly, bench and forces files",
         Arity = ArgumentArity.OneOrMore,
     };
 
@@ -55,6 +55,12 @@ internal sealed class CheckCommand(Screen screen)
         {
             case DocumentKind.Part:
                 PartCheck.Run(file, options, diagnostics);
+                break;
+            case DocumentKind.Bench:
+                BenchPlanner.Plan(file, options, diagnostics)?.Dispose();
+                break;
+            case DocumentKind.Forces:
+                ConfigLoader.LoadForces(file, options, diagnostics);
                 break;
             case DocumentKind.Assembly:
                 using (AssemblyPlan? plan = AssemblyPlanner.Plan(file, options, diagnostics))

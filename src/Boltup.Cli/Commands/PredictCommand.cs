@@ -12,15 +12,9 @@ namespace Boltup.Cli.Commands;
 internal sealed class PredictCommand(Screen screen, CancellationToken cancellation)
 {
     private readonly Argument<string> _assembly = new("ASSEMBLY") { Description = "An assembly file (*.assembly.yaml)" };
-    private readonly Option<string> _output = new("--output", "-o")
-    {
-        Description = "Folder for the results; earlier results in it are replaced as a whole",
-        DefaultValueFactory = _ => "out",
-        HelpName = "DIR",
-    };
-
-    private readonly Option<bool> _noPictures = new("--no-pictures") { Description = "Write data files only" };
-    private readonly Option<bool> _timing = new("--timing") { Description = "Say how long each step took" };
+    private readonly Option<string> _output = SharedOptions.Output();
+    private readonly Option<bool> _noPictures = SharedOptions.NoPictures();
+    private readonly Option<bool> _timing = SharedOptions.Timing();
     private readonly Option<bool> _allowOutside = SharedOptions.AllowOutside();
     private readonly Option<MessageForm> _messages = SharedOptions.Messages();
 

@@ -94,9 +94,9 @@ internal sealed class BenchBinder(DiagnosticBag diagnostics)
 
     private void RefuseKeyOf(YamlMap map, string key, string method, string chosen)
     {
-        if (map[key] is YamlNode node && chosen != method)
+        if (map.Find(key) is { } entry && chosen != method)
         {
-            diagnostics.Error(ConfigCodes.NeedsOtherKey, $"`{key}` belongs to the method `{method}`, and the method is `{chosen}`", node.Span,
+            diagnostics.Error(ConfigCodes.NeedsOtherKey, $"`{key}` belongs to the method `{method}`, and the method is `{chosen}`", entry.KeySpan,
                 $"remove `{key}`, or write `method: {method}`");
         }
     }

@@ -103,16 +103,25 @@ internal sealed class BenchExtrasPlanner(
 
     private RouteMeasurement? PlanRoute(RouteDocument route, BenchModel bench, AssemblyPlan? assembly)
     {
-        MountPath[] mounts = route.Method.Value == ForceRoute.MountStiffness ? [.. MountsOf(assembly!)] : [];
-        IReadOnlyList<Dof> dofs = mounts.Length > 0
-            ? [.. mounts.SelectMany(mount => mount.Mount.Directions.SelectMany(direction =>
-                new[] { new Dof(mount.SourcePoint, direction), new Dof(mount.ReceiverPoint, direction) }))]
-            : bench.Interface;
+        MountPath[] mounts = route.Method.Value == ForceRoute.FreeVelocity || assembly is null ? [] : [.. MountsOf(assembly)];
+        Dof[] dofs = [.. DofsOf(route.Method.Value, bench, mounts)];
         IPartModel? free = route.SourcePart is { } file ? PlanFreeSource(file, bench) : null;
-        return Read(route.Operations, dofs, bench.Axis) is { } measured && (free is null) == (route.SourcePart is null)
+        IEnumerable<BenchSpectraDocument> operations = route.Operations.Select(operation => route.Method.Value == ForceRoute.Direct
+            ? operation with { Motion = new(Quantity.Force, operation.Name.Span) }
+            : operation);
+        return Read([.. operations], dofs, bench.Axis) is { } measured && (free is null) == (route.SourcePart is null)
             ? new RouteMeasurement(route.Name.Value, route.Method.Value, measured, free, mounts)
             : null;
     }
+
+    /// <summary>What a route measures: both ends of the mounts; forces under the mounts where these are known; the interface itself.</summary>
+    private static IEnumerable<Dof> DofsOf(ForceRoute route, BenchModel bench, MountPath[] mounts) => route switch
+    {
+        ForceRoute.MountStiffness => mounts.SelectMany(mount => mount.Mount.Directions.SelectMany(direction =>
+            new[] { new Dof(mount.SourcePoint, direction), new Dof(mount.ReceiverPoint, direction) })),
+        ForceRoute.Direct when mounts.Length > 0 => mounts.SelectMany(mount => mount.Mount.Directions.Select(direction => new Dof(mount.ReceiverPoint, direction))),
+        _ => bench.Interface,
+    };
 
     private IEnumerable<MountPath> MountsOf(AssemblyPlan assembly)
     {

@@ -53,7 +53,7 @@ internal sealed class HandoverCheck(AssemblyDocument assembly, ForceDocument for
         if (_part.KnownPoints is { } known && !known.Contains(given.Name.Value))
         {
             diagnostics.Error(
-                ConfigCodes.ForcesElsewhere,
+                PlanCodes.ForcesElsewhere,
                 $"the blocked forces act at `{given.Name}`, and part `{force.Part}` has no such point",
                 force.File.Span,
                 "name the points of the part as on the bench, or apply the forces to the part that they were identified on",
@@ -69,7 +69,7 @@ internal sealed class HandoverCheck(AssemblyDocument assembly, ForceDocument for
         if (differ)
         {
             diagnostics.Error(
-                ConfigCodes.ForcesElsewhere,
+                PlanCodes.ForcesElsewhere,
                 $"the axes of `{given.Name}` on the bench are not those of part `{force.Part}`: forces along x would act along another direction",
                 force.File.Span,
                 "give the point of the part the axes of the bench, or identify in the axes of the part",
@@ -85,7 +85,7 @@ internal sealed class HandoverCheck(AssemblyDocument assembly, ForceDocument for
         if (isMoved)
         {
             diagnostics.Warning(
-                ConfigCodes.ForcesElsewhere,
+                PlanCodes.ForcesElsewhere,
                 $"all points of the bench lie {Millimetres(common)} from those of part `{force.Part}`",
                 force.File.Span,
                 "harmless if only the origins differ; if the forces were identified below the mounts and are applied above them, they are forces of another source");
@@ -93,7 +93,7 @@ internal sealed class HandoverCheck(AssemblyDocument assembly, ForceDocument for
         else
         {
             diagnostics.Error(
-                ConfigCodes.ForcesElsewhere,
+                PlanCodes.ForcesElsewhere,
                 $"the blocked forces were identified at other places than the points of part `{force.Part}`",
                 force.File.Span,
                 "correct the positions of the part or of the bench: a force at another lever arm is another moment",
@@ -117,7 +117,7 @@ internal sealed class HandoverCheck(AssemblyDocument assembly, ForceDocument for
             if (goesThroughMount && inSource)
             {
                 diagnostics.Warning(
-                    ConfigCodes.ForcesElsewhere,
+                    PlanCodes.ForcesElsewhere,
                     $"the blocked forces were identified below the mounts, and joint `{joint.Name}` goes through a mount: it would be there twice",
                     joint.Mount!.Span,
                     "join rigidly below the mounts of the source, or identify above them");
@@ -125,7 +125,7 @@ internal sealed class HandoverCheck(AssemblyDocument assembly, ForceDocument for
             else if (!goesThroughMount && !inSource)
             {
                 diagnostics.Warning(
-                    ConfigCodes.ForcesElsewhere,
+                    PlanCodes.ForcesElsewhere,
                     $"the blocked forces were identified above the mounts, and joint `{joint.Name}` is rigid: the mounts are missing",
                     joint.Name.Span,
                     "join through the mounts, unless the source is really bolted down");
@@ -142,7 +142,7 @@ internal sealed class HandoverCheck(AssemblyDocument assembly, ForceDocument for
         if (outside.Length > 0)
         {
             diagnostics.Warning(
-                ConfigCodes.OutsideForceBand,
+                PlanCodes.OutsideForceBand,
                 string.Create(CultureInfo.InvariantCulture, $"the blocked forces hold from {handover.FromHz} to {handover.ToHz} Hz only; {outside.Length} of {axis.Count} lines are outside"),
                 force.Operation?.Span ?? force.File.Span,
                 "restrict `frequencies` of the assembly to the band",

@@ -54,4 +54,18 @@ public static partial class PlanCodes
         "Coherence is given for some of the installed FRFs only, so that their noise is not known as a whole.",
         "installed_frf: [{ file: bench.unv, coherence: bench_coherence.unv, averages: 10 }]  # and a pair is missing in the second file",
         "Give the coherence of every FRF, or of none.");
+
+    public static readonly DiagnosticCode ForcesElsewhere = new(
+        "PLN027", "blocked forces identified at other places",
+        "Blocked forces belong to the points, axes and side of the mounts where they were identified. Applied anywhere "
+            + "else they are forces of another source.",
+        "identified at [92 mm, 61 mm, 0 mm], and the part's m1 is at [92 mm, 61 mm, -40 mm], below the mount",
+        "Apply them to the part whose points are those of the bench; correct positions or axes of the part, or identify again.");
+
+    public static readonly DiagnosticCode OutsideForceBand = new(
+        "PLN028", "blocked forces used outside the band in which they hold",
+        "The supplier says up to where the bench tells the forces, and why the band ends there. Outside of it they are "
+            + "noise with the look of a spectrum.",
+        "holds: { from: 50 Hz, to: 800 Hz }, and the assembly is computed up to 2000 Hz",
+        "Restrict `frequencies` to the band, or ask the supplier for forces over a wider one.");
 }

@@ -16,7 +16,7 @@ internal sealed class SpectraPlanner(DataLibrary library, PointNames names, Diag
 
     /// <summary>The spectra of some dofs over the lines of the file, or null after an error.</summary>
     /// <param name="wanted">Dofs in the order of the result.</param>
-    /// <param name="motion">What motion spectra are, when the document says so.</param>
+    /// <param name="motion">What spectra along directions of motion are, when the document says so: a motion, or forces.</param>
     public SpectrumSet? Read(FileReference reference, IReadOnlyList<Dof> wanted, Quantity? motion)
     {
         if (library.Open(reference) is not { } file)
@@ -121,7 +121,7 @@ internal sealed class SpectraPlanner(DataLibrary library, PointNames names, Diag
     /// <summary>Order of the time derivative of displacement that a spectrum is: 0 for pressure and force; null after an error.</summary>
     private int? OrderOf(Curve curve, Dof dof, Quantity? motion)
     {
-        if (!dof.IsMotion || curve.ResponseQuantity == Quantity.Force)
+        if (!dof.IsMotion || curve.ResponseQuantity == Quantity.Force || motion == Quantity.Force)
         {
             return 0;
         }

@@ -29,7 +29,7 @@ public sealed class EvidenceCollector(IdentificationResult result, DiagnosticBag
             {
                 diagnostics.Warning(
                     EngineCodes.ValidationPoor,
-                    FormattableString.Invariant($"operation `{operation.Name}`: the validation sensors are off by {report.OverallLevelDifferenceDb:+0.0;-0.0} dB, {report.RelativeError:P0} with phase"),
+                    FormattableString.Invariant($"operation `{operation.Name}`: the validation sensors are off by {report.OverallLevelDifferenceDb:F1} dB, {report.RelativeError:P0} with phase"),
                     help: "look at validation.csv and at the data quality before these forces are handed over");
             }
 
@@ -87,7 +87,7 @@ public sealed class EvidenceCollector(IdentificationResult result, DiagnosticBag
         ForceRoute.FreeVelocity => route.FreeSource!.Evaluate(measured.Axis, measured.Dofs, measured.Dofs, diagnostics) is { } source
             ? FreeVelocityRoute.BlockedForces(source, measured, diagnostics)
             : null,
-        _ => ContactForceRoutes.Direct(measured),
+        _ => AtTheSource(route, ContactForceRoutes.Direct(measured)),
     };
 
     /// <summary>The force that a mount exerts on the receiver, under the name of the interface dof where it comes from.</summary>
@@ -95,7 +95,7 @@ public sealed class EvidenceCollector(IdentificationResult result, DiagnosticBag
     {
         Forces = forces.Forces with
         {
-            Dofs = [.. forces.Forces.Dofs.Select(dof => dof with { Point = route.Mounts.First(mount => mount.ReceiverPoint == dof.Point).SourcePoint })],
+            Dofs = [.. forces.Forces.Dofs.Select(dof => dof with { Point = route.Mounts.FirstOrDefault(mount => mount.ReceiverPoint == dof.Point)?.SourcePoint ?? dof.Point })],
         },
     };
 

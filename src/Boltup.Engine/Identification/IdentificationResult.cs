@@ -1,4 +1,5 @@
 using Boltup.Engine.Diagnostics;
+using Boltup.Engine.Evidence;
 using Boltup.Engine.Spectra;
 
 namespace Boltup.Engine.Identification;
@@ -9,6 +10,7 @@ namespace Boltup.Engine.Identification;
 /// <param name="Interface">Where the blocked forces act.</param>
 /// <param name="Operations">One entry per operation, in the order of the bench file.</param>
 /// <param name="SingularValues">Of the indicator FRFs.</param>
+/// <param name="Coherence">Coherence of the installed FRFs; null when the bench gives none.</param>
 /// <param name="Kernels">Name of the batch kernels that ran.</param>
 /// <param name="Diagnostics">Notes and warnings of the run.</param>
 public sealed record IdentificationResult(
@@ -20,5 +22,6 @@ public sealed record IdentificationResult(
     SolveChoice Solve,
     IReadOnlyList<IdentifiedOperation> Operations,
     SingularSpectrum SingularValues,
+    CoherenceReport? Coherence,
     string Kernels,
     IReadOnlyList<Diagnostic> Diagnostics);

@@ -46,6 +46,7 @@ public static class Identifier
             bench.Solve,
             operations,
             singularValues,
+            bench.Coherence?.Report,
             KernelChoice.Name,
             [.. diagnostics.Items]);
     }

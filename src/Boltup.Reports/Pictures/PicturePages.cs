@@ -41,11 +41,11 @@ public sealed class PicturePages(PredictionResult result, string provenance)
         double[] level = Level(response.Values, operation.Amplitude, overall.Reference);
         double[] phase = Phase(response.Values);
         string subtitle = $"{operation.Name} · overall {overall.Text} re {overall.Reference.Text} · {response.Dof}";
-        var levels = new Panel("", FrequencyAxisOf(operation.Axis, ""), LevelAxis([level], overall.Reference, 8), [new Series("", hz, level, colour)], (0, 0, 1, 0.7))
+        var levels = new Panel("", PictureAxes.Frequency(operation.Axis, ""), PictureAxes.Level([level], overall.Reference, 8), [new Series("", hz, level, colour)], (0, 0, 1, 0.7))
         {
             Marker = MarkerOf(overall),
         };
-        var phases = new Panel("", FrequencyAxisOf(operation.Axis, "Frequency in Hz"), PhaseAxis, [new Series("", hz, phase, colour, Thin: true)], (0, 0.7, 1, 0.3));
+        var phases = new Panel("", PictureAxes.Frequency(operation.Axis, "Frequency in Hz"), PhaseAxis, [new Series("", hz, phase, colour, Thin: true)], (0, 0.7, 1, 0.3));
         return Page($"{FileNames.FromName(operation.Name)}-{FileNames.FromName(response.Name)}", response.Name, subtitle, [levels, phases]);
     }
 
@@ -53,10 +53,7 @@ public sealed class PicturePages(PredictionResult result, string provenance)
     public Picture Overview()
     {
         int count = result.Operations.Max(operation => operation.Responses.Count);
-        int columns = count <= 1 ? 1 : count <= 4 ? 2 : count <= 9 ? 3 : 4;
-        int rows = (count + columns - 1) / columns;
-        Panel[] panels = [.. Enumerable.Range(0, count).Select(i => OverviewPanel(
-            i, ((double)(i % columns) / columns, (double)(i / columns) / rows, 1.0 / columns, 1.0 / rows)))];
+        Panel[] panels = [.. Enumerable.Range(0, count).Select(i => OverviewPanel(i, PanelGrid.PlaceOf(i, count)))];
         string operations = AreSeveral ? $"{result.Operations.Count} operations" : result.Operations[0].Name;
         return new Picture(
             "overview", result.Title, $"Responses in {operations}", provenance, PictureStyle.SheetWidth, PictureStyle.SheetHeight, panels)
@@ -74,7 +71,7 @@ public sealed class PicturePages(PredictionResult result, string provenance)
             .GroupBy(force => force.Joint)
             .Select((joint, i) => new Series(joint.Key, hz, JointLevel([.. joint], operation.Amplitude), PictureStyle.LineAt(i)))];
         var panel = new Panel(
-            "", FrequencyAxisOf(operation.Axis, "Frequency in Hz"), LevelAxis(series.Select(line => line.Y), LevelReference.Force, 8), series, (0, 0, 1, 1));
+            "", PictureAxes.Frequency(operation.Axis, "Frequency in Hz"), PictureAxes.Level(series.Select(line => line.Y), LevelReference.Force, 8), series, (0, 0, 1, 1));
         return Page(
             $"{FileNames.FromName(operation.Name)}-joint-forces",
             "Forces through the joints",
@@ -104,33 +101,15 @@ public sealed class PicturePages(PredictionResult result, string provenance)
             .Of(operation.Responses[index], operation.Axis, operation.Amplitude).Text));
         return new Panel(
             $"{first.Name} · {levels}",
-            FrequencyAxisOf(result.Axis, "Frequency in Hz"),
-            LevelAxis(series.Select(line => line.Y), reference, 6),
+            PictureAxes.Frequency(result.Axis, "Frequency in Hz"),
+            PictureAxes.Level(series.Select(line => line.Y), reference, 6),
             series,
             place);
     }
 
-    private static PictureAxis FrequencyAxisOf(FrequencyAxis axis, string label)
-    {
-        // A single line stands in the middle of an octave.
-        double margin = axis.Hz[^1] > LowestHz(axis) ? 1 : Math.Sqrt(2);
-        double from = LowestHz(axis) / margin;
-        double to = Math.Max(axis.LastHz, LowestHz(axis)) * margin;
-        return new PictureAxis(label, from, to, true, Ticks.OfFrequency(from, to));
-    }
-
-    /// <summary>The lowest line that a logarithmic axis can show.</summary>
-    private static double LowestHz(FrequencyAxis axis) => axis.FirstHz > 0 ? axis.FirstHz : axis.Count > 1 ? axis[1] : 1;
-
     private static Marker? MarkerOf(OverallLevel level) => double.IsFinite(level.PeakDecibels) && level.PeakHz > 0
         ? new Marker(level.PeakHz, level.PeakDecibels, string.Create(CultureInfo.InvariantCulture, $"{level.PeakDecibels:F1} dB at {level.PeakHz:G5} Hz"))
         : null;
-
-    private static PictureAxis LevelAxis(IEnumerable<IReadOnlyList<double>> lines, LevelReference reference, int ticks)
-    {
-        (double from, double to) = LevelLimits.Of(lines.SelectMany(line => line));
-        return new PictureAxis($"Level in dB re {reference.Text}", from, to, false, Ticks.Even(from, to, ticks));
-    }
 
     private static double[] Level(IReadOnlyList<Complex> values, Amplitude amplitude, LevelReference reference)
     {

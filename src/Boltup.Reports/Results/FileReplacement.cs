@@ -36,6 +36,7 @@ internal sealed class FileReplacement(StagingFolder staging, string target)
 
     private void Move(string from, string to)
     {
+        Directory.CreateDirectory(Path.GetDirectoryName(to)!);
         File.Move(from, to);
         _moves.Push((from, to));
     }

@@ -40,7 +40,10 @@ public sealed class OutputFolder : IDisposable
         }
     }
 
-    /// <summary>Writes one file; may be called from several threads. A failure shows at <see cref="Commit"/>.</summary>
+    /// <summary>
+    /// Writes one file, whose name may have one subfolder before a slash; may be called from several threads. A failure shows at
+    /// <see cref="Commit"/>.
+    /// </summary>
     public void Write(string name, Action<Stream> write)
     {
         try
@@ -122,7 +125,9 @@ public sealed class OutputFolder : IDisposable
     {
         foreach (string name in FolderManifest.ForeignEntriesIn(_staging.FullPath))
         {
-            Directory.Move(Path.Combine(_staging.FullPath, name), Path.Combine(_target, name));
+            string home = Path.Combine(_target, name);
+            Directory.CreateDirectory(Path.GetDirectoryName(home)!);
+            Directory.Move(Path.Combine(_staging.FullPath, name), home);
         }
     }
 }

@@ -64,7 +64,9 @@ internal sealed class StagingFolder : IDisposable
     public void Write(string name, Action<Stream> write)
     {
         Claim(name);
-        using var stream = new FileStream(Path.Combine(FullPath, name), FileMode.CreateNew, FileAccess.Write);
+        string path = Path.Combine(FullPath, name);
+        Directory.CreateDirectory(Path.GetDirectoryName(path)!);
+        using var stream = new FileStream(path, FileMode.CreateNew, FileAccess.Write);
         write(stream);
     }
 

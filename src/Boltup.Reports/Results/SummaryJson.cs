@@ -19,21 +19,12 @@ public static class SummaryJson
         json.WriteString("title", result.Title);
         json.WriteString("program_version", programVersion);
         json.WriteString("kernels", result.Kernels);
-        WriteAxis(json, result);
+        SharedJson.WriteAxis(json, result.Axis);
         WriteConditioning(json, result);
         WriteLevels(json, result);
         DiagnosticJson.WriteList(json, result.Diagnostics);
-        WriteInputs(json, inputs);
+        SharedJson.WriteInputs(json, inputs);
         json.WriteString("cautions", Cautions.Text);
-        json.WriteEndObject();
-    }
-
-    private static void WriteAxis(Utf8JsonWriter json, PredictionResult result)
-    {
-        json.WriteStartObject("frequencies");
-        json.WriteNumber("first_hz", result.Axis.FirstHz);
-        json.WriteNumber("last_hz", result.Axis.LastHz);
-        json.WriteNumber("lines", result.Axis.Count);
         json.WriteEndObject();
     }
 
@@ -93,19 +84,5 @@ public static class SummaryJson
         json.WriteNumber("strongest_line_hz", level.PeakHz);
         json.WriteFinite("strongest_line_db", level.PeakDecibels);
         json.WriteEndObject();
-    }
-
-    private static void WriteInputs(Utf8JsonWriter json, IReadOnlyList<InputFingerprint> inputs)
-    {
-        json.WriteStartArray("inputs");
-        foreach (InputFingerprint input in inputs)
-        {
-            json.WriteStartObject();
-            json.WriteString("file", input.File);
-            json.WriteString("sha256", input.Sha256);
-            json.WriteEndObject();
-        }
-
-        json.WriteEndArray();
     }
 }

@@ -34,7 +34,13 @@ internal sealed class ConfigFolder : IDisposable
         ConfigLoader.LoadAssembly(name, Options with { WorkingDirectory = Root }, Diagnostics);
 
     /// <summary>Loads a document by the kind that its file name says.</summary>
-    public object? Load(string name) => name.Contains("part", StringComparison.Ordinal) ? LoadPart(name).Document : LoadAssembly(name).Document;
+    public object? Load(string name) => name.Split('.')[^2] switch
+    {
+        "part" => LoadPart(name).Document,
+        "bench" => ConfigLoader.LoadBench(name, Options with { WorkingDirectory = Root }, Diagnostics).Document,
+        "forces" => ConfigLoader.LoadForces(name, Options with { WorkingDirectory = Root }, Diagnostics).Document,
+        _ => LoadAssembly(name).Document,
+    };
 
     public void Dispose() => Directory.Delete(Root, recursive: true);
 }

@@ -22,10 +22,22 @@ public class DiagnosticPlaceTests
     [MemberData(nameof(AssemblyIndexes))]
     public void LoadAssembly_WrongDocument_SaysWhatAndWhere(int index) => Check(AssemblyCases.All[index], "a.assembly.yaml");
 
+    public static TheoryData<int> BenchIndexes => [.. Enumerable.Range(0, BenchCases.All.Length)];
+
+    [Theory]
+    [MemberData(nameof(BenchIndexes))]
+    public void LoadBench_WrongDocument_SaysWhatAndWhere(int index) => Check(BenchCases.All[index], "a.bench.yaml");
+
+    public static TheoryData<int> HandoverIndexes => [.. Enumerable.Range(0, BenchCases.Handovers.Length)];
+
+    [Theory]
+    [MemberData(nameof(HandoverIndexes))]
+    public void LoadAssembly_WrongHandover_SaysWhatAndWhere(int index) => Check(BenchCases.Handovers[index], "a.assembly.yaml");
+
     [Fact]
     public void Cases_EveryCode_IsDrawn()
     {
-        IEnumerable<string> drawn = PartCases.All.Concat(AssemblyCases.All).Select(item => item.Code);
+        IEnumerable<string> drawn = PartCases.All.Concat(AssemblyCases.All).Concat(BenchCases.All).Concat(BenchCases.Handovers).Select(item => item.Code);
         Assert.Empty(ConfigCodes.All.Select(code => code.Code).Except(drawn));
     }
 
@@ -48,7 +60,7 @@ public class DiagnosticPlaceTests
         MarkedText marked = hasPlace ? MarkedText.Parse(expected.Marked) : new MarkedText(expected.Marked, 0, 0, 1);
         using ConfigFolder folder = new ConfigFolder { Options = new LoadOptions { MaximumDataBytes = 1000 } }
             .With("source.part.yaml", SourcePart).With("body.part.yaml", BodyPart).With("base.assembly.yaml", Base)
-            .With("compressor.uff", "").With("large.csv", new string('0', 1001)).With("folder/inner.csv", "").With(name, marked.Text);
+            .With("compressor.uff", "").With("large.csv", new string('0', 1001)).With("folder/inner.csv", "").With("source.forces.yaml", BenchCases.Handover).With(name, marked.Text);
 
         object? document = folder.Load(name);
 

@@ -52,7 +52,7 @@ internal static class PartCases
         new("CFG018", Head + "lumped: { direction: x, masses: «{}» }"),
         new("CFG019", Head + "«modal»: { file: a.unv }\n", "not supported yet"),
         new("CFG019", Head + "«rigid_body»:\n  mass: 4 kg\n"),
-        new("CFG019", "boltup: «bench/1»\n"),
+        new("CFG019", "boltup: «study/1»\n"),
         new("CFG020", "boltup: «assembly/1»\nparts: {}\n", "expected `part`"),
         new("CFG020", "boltup: «part/2»\n", "version `2`"),
         new("CFG020", "boltup: «parts/1»\n", "did you mean `part`?"),

@@ -1,0 +1,153 @@
+using System.Globalization;
+using System.Numerics;
+using System.Text.Json;
+using Boltup.Engine.Acoustics;
+using Boltup.Engine.Spectra;
+using Boltup.Tests.Support;
+
+namespace Boltup.Tests.Cli;
+
+/// <summary>
+/// From the bench of the reference case to the vehicle of the reference case, through every file: the truth comes from an independent
+/// finite element program (see Data/bench/README.md and Data/case1/README.md).
+/// </summary>
+public sealed class IdentifyCommandTests : IDisposable
+{
+    private static readonly string Truth = Repository.Data("case1", "truth", "response.csv");
+
+    private readonly TemporaryFolder _folder = new();
+
+    public void Dispose() => _folder.Dispose();
+
+    /// <summary>The data are stored in single precision.</summary>
+    [Fact]
+    public void Identify_CleanBench_TransfersToTheVehicle()
+    {
+        CommandRun run = Identify("clean.bench.yaml");
+        Assert.Equal(0, run.ExitCode);
+        Dictionary<string, Complex[]> predicted = PredictVehicle();
+        foreach ((string dof, Complex[] truth) in CsvSpectra.Read(Truth, "dof"))
+        {
+            Near.Equal(truth, predicted[dof], 1e-5);
+        }
+    }
+
+    /// <summary>Noisy data: about one percent in the responses and 0.1 dB in the bands, although single forces are far off.</summary>
+    [Fact]
+    public void Identify_NoisyBench_TransfersWithinOnePercentAndATenthOfADecibel()
+    {
+        Assert.Equal(0, Identify("noisy.bench.yaml").ExitCode);
+        Dictionary<string, Complex[]> predicted = PredictVehicle();
+        foreach ((string dof, Complex[] truth) in CsvSpectra.Read(Truth, "dof"))
+        {
+            Assert.InRange(Near.RelativeError(truth, predicted[dof]), 1e-4, 0.03);
+            Assert.All(BandDifferences(truth, predicted[dof]), difference => Assert.InRange(Math.Abs(difference), 0, 1));
+        }
+    }
+
+    [Fact]
+    public void Identify_CleanBench_SaysWhichCheckWasMade()
+    {
+        CommandRun run = Identify("clean.bench.yaml");
+        Assert.Contains("on-board validation at 6 dofs that took no part", run.Out, StringComparison.Ordinal);
+        Assert.Contains("does not show that the forces hold on another receiver", run.Out, StringComparison.Ordinal);
+        using JsonDocument summary = JsonDocument.Parse(File.ReadAllText(_folder.PathTo("out", "summary.json")));
+        JsonElement validation = summary.RootElement.GetProperty("validations")[0];
+        Assert.InRange(validation.GetProperty("relative_error").GetDouble(), 0, 1e-4);
+        Assert.Equal("on board", validation.GetProperty("check").GetString());
+    }
+
+    /// <summary>The free-velocity route finds the blocked forces; sensors under the mounts find contact forces, which are something else.</summary>
+    [Fact]
+    public void Identify_OtherRoutes_AreComparedUnderTheirOwnNames()
+    {
+        Identify("clean.bench.yaml");
+        using JsonDocument summary = JsonDocument.Parse(File.ReadAllText(_folder.PathTo("out", "summary.json")));
+        Dictionary<string, JsonElement> routes = summary.RootElement.GetProperty("routes").EnumerateArray().ToDictionary(route => route.GetProperty("name").GetString()!);
+        Assert.Equal("blocked forces", routes["hung free"].GetProperty("finds").GetString());
+        Assert.InRange(routes["hung free"].GetProperty("relative_difference_from_in_situ").GetDouble(), 0, 1e-3);
+        Assert.Equal("contact forces of this bench", routes["force sensors"].GetProperty("finds").GetString());
+        Assert.True(routes["force sensors"].GetProperty("relative_difference_from_in_situ").GetDouble() > 0.1);
+    }
+
+    /// <summary>The bench as an assembly says the contact forces before they are measured: those of the finite element program.</summary>
+    [Fact]
+    public void Identify_BenchAsAssembly_PredictsTheMeasuredContactForces()
+    {
+        Identify("clean.bench.yaml");
+        Dictionary<string, double[]> ratios = CsvSpectra.ReadReal(_folder.PathTo("out", "bench_stiffness.csv"), "dof", "contact_to_blocked_db");
+        Dictionary<string, Complex[]> blocked = CsvSpectra.Read(_folder.PathTo("out", "blocked_forces", "running.csv"), "dof");
+        foreach ((string dof, Complex[] contact) in CsvSpectra.Read(Repository.Data("bench", "bench_contact_true.csv"), "dof"))
+        {
+            string source = $"m{dof[2]}{dof[3..]}";
+            double[] found = [.. blocked[source].Zip(ratios[source], (force, ratio) => force.Magnitude * Math.Pow(10, ratio / 20))];
+            double error = Math.Sqrt(found.Zip(contact, (f, c) => Math.Pow(f - c.Magnitude, 2)).Sum() / contact.Sum(c => c.Magnitude * c.Magnitude));
+            Assert.True(error < 1e-4, $"{dof}: {error}");
+        }
+    }
+
+    [Fact]
+    public void Identify_UniversalFileAsked_WritesTheSameForces()
+    {
+        Identify("clean.bench.yaml", "--uff");
+        File.WriteAllText(_folder.PathTo("vehicle.assembly.yaml"), Vehicle("out/blocked_forces/running.uff, part: compressor"));
+        Dictionary<string, Complex[]> fromUniversal = Predict();
+        File.WriteAllText(_folder.PathTo("vehicle.assembly.yaml"), Vehicle("out/blocked_forces/running.csv, part: compressor"));
+        Assert.All(Predict(), response => Near.Equal(response.Value, fromUniversal[response.Key], 1e-14));
+    }
+
+    [Fact]
+    public void Identify_Twice_GivesTheSameBytes()
+    {
+        Identify("noisy.bench.yaml");
+        Directory.Move(_folder.PathTo("out"), _folder.PathTo("first"));
+        Identify("noisy.bench.yaml");
+        foreach (string file in Directory.EnumerateFiles(_folder.PathTo("first"), "*", SearchOption.AllDirectories))
+        {
+            Assert.Equal(File.ReadAllBytes(file), File.ReadAllBytes(file.Replace(_folder.PathTo("first"), _folder.PathTo("out"), StringComparison.Ordinal)));
+        }
+    }
+
+    private CommandRun Identify(string bench, params string[] more) =>
+        CommandRun.Of(["identify", Repository.Data("bench", bench), "-o", _folder.PathTo("out"), "--no-pictures", .. more]);
+
+    private Dictionary<string, Complex[]> PredictVehicle()
+    {
+        File.WriteAllText(_folder.PathTo("vehicle.assembly.yaml"), Vehicle("out/source.forces.yaml, operation: running, part: compressor"));
+        return Predict();
+    }
+
+    private static string Vehicle(string forces) => $$"""
+        boltup: assembly/1
+        based_on: {{Repository.Data("case1", "constant.assembly.yaml")}}
+        operations:
+          internal: ~
+          blocked: ~
+          contact on coupled: ~
+          running: { amplitude: rms, blocked_forces: { file: {{forces}} } }
+        """;
+
+    /// <summary>Responses under the names of the truth.</summary>
+    private Dictionary<string, Complex[]> Predict()
+    {
+        CommandRun run = CommandRun.Of(
+            "predict", _folder.PathTo("vehicle.assembly.yaml"), "-o", _folder.PathTo("vehicle"), "--no-pictures", "--allow-outside");
+        Assert.True(run.ExitCode == 0, run.Error);
+        Dictionary<string, string> dofs = new()
+        {
+            ["seat rail"] = "seat_rail.z",
+            ["steering column"] = "steering_column.x",
+            ["floor"] = "floor.z",
+            ["driver ear"] = "driver_ear.p",
+            ["passenger ear"] = "passenger_ear.p",
+        };
+        return CsvSpectra.Read(_folder.PathTo("vehicle", "responses.csv"), "response").ToDictionary(response => dofs[response.Key], response => response.Value);
+    }
+
+    private static double[] BandDifferences(Complex[] truth, Complex[] predicted)
+    {
+        var bands = new BandSums(FrequencyAxis.Even(20, 5, truth.Length));
+        double[] true2 = [.. truth.Select(value => value.Magnitude * value.Magnitude)], predicted2 = [.. predicted.Select(value => value.Magnitude * value.Magnitude)];
+        return [.. Enumerable.Range(0, bands.Bands.Count).Select(band => 10 * Math.Log10(bands.Sum(band, predicted2) / bands.Sum(band, true2)))];
+    }
+}
