@@ -14,6 +14,9 @@ internal sealed class HouseholderQr
 
     public int Columns => _matrix.GetLength(1);
 
+    /// <summary>The column of the matrix that stands at each place.</summary>
+    public int[] Order { get; private set; } = [];
+
     /// <summary>Power of two by which the matrix was multiplied.</summary>
     public double Scale => _scale;
 
@@ -21,9 +24,11 @@ internal sealed class HouseholderQr
         Rank.IsFull(_diagonal.Select(Complex.Abs).Aggregate(0.0, Math.Max), _diagonal.Select(Complex.Abs).Aggregate(double.PositiveInfinity, Math.Min), Rows);
 
     /// <summary>Factors the matrix, which becomes the workspace.</summary>
-    public void Factor(Complex[,] matrix)
+    /// <param name="isPivoted">Whether the largest of the remaining columns is taken next.</param>
+    public void Factor(Complex[,] matrix, bool isPivoted = false)
     {
         _matrix = matrix;
+        Order = [.. Enumerable.Range(0, Columns)];
         _diagonal = new Complex[Columns];
         _factors = new double[Columns];
         _scale = LaneScale.For(LargestPart());
@@ -34,6 +39,11 @@ internal sealed class HouseholderQr
 
         for (int k = 0; k < Columns; k++)
         {
+            if (isPivoted)
+            {
+                BringLargest(k);
+            }
+
             MakeReflector(k);
             Reflect(k, matrix, k + 1);
         }
@@ -86,15 +96,35 @@ internal sealed class HouseholderQr
         return largest;
     }
 
-    private void MakeReflector(int k)
+    private void BringLargest(int k)
     {
-        double square = 0;
-        for (int row = k; row < Rows; row++)
+        int largest = k;
+        for (int column = k + 1; column < Columns; column++)
         {
-            square += _matrix[row, k].Real * _matrix[row, k].Real + _matrix[row, k].Imaginary * _matrix[row, k].Imaginary;
+            largest = SquaredNorm(column, k) > SquaredNorm(largest, k) ? column : largest;
         }
 
-        double norm = Math.Sqrt(square), size = Complex.Abs(_matrix[k, k]);
+        (Order[k], Order[largest]) = (Order[largest], Order[k]);
+        for (int row = 0; row < Rows; row++)
+        {
+            (_matrix[row, k], _matrix[row, largest]) = (_matrix[row, largest], _matrix[row, k]);
+        }
+    }
+
+    private double SquaredNorm(int column, int firstRow)
+    {
+        double square = 0;
+        for (int row = firstRow; row < Rows; row++)
+        {
+            square += _matrix[row, column].Real * _matrix[row, column].Real + _matrix[row, column].Imaginary * _matrix[row, column].Imaginary;
+        }
+
+        return square;
+    }
+
+    private void MakeReflector(int k)
+    {
+        double norm = Math.Sqrt(SquaredNorm(k, k)), size = Complex.Abs(_matrix[k, k]);
         Complex phase = size == 0 ? Complex.One : _matrix[k, k] / size;
         _diagonal[k] = -phase * norm;
         _matrix[k, k] += phase * norm;

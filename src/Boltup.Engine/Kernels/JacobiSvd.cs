@@ -14,7 +14,7 @@ internal sealed class JacobiSvd
 
     public void Factor(Complex[,] matrix, int maxSweeps, double orthogonalityLimit)
     {
-        _qr.Factor(matrix);
+        _qr.Factor(matrix, isPivoted: true);
         _order = _qr.Columns;
         (_v, _j) = (new Complex[_order, _order], new Complex[_order, _order]);
         for (int column = 0; column < _order; column++)
@@ -42,7 +42,16 @@ internal sealed class JacobiSvd
     }
 
     /// <summary>V·C.</summary>
-    public Complex[,] Combine(Complex[,] c) => Product(_order, c.GetLength(1), (i, k) => _v[i, k], c);
+    public Complex[,] Combine(Complex[,] c)
+    {
+        int[] places = new int[_order];
+        for (int i = 0; i < _order; i++)
+        {
+            places[_qr.Order[i]] = i;
+        }
+
+        return Product(_order, c.GetLength(1), (i, k) => _v[places[i], k], c);
+    }
 
     private Complex[,] Product(int rows, int columns, Func<int, int, Complex> left, Complex[,] right)
     {

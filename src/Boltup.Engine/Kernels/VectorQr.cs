@@ -26,6 +26,7 @@ internal sealed unsafe class VectorQr<T> : QrKernel
     private readonly TileBuffer _factors;
     private readonly TileBuffer _chunk;
     private readonly TileBuffer _scale = new(Tiling.Lanes);
+    private readonly int[][] _orders;
     private int _rows;
     private int _columns;
 
@@ -36,12 +37,22 @@ internal sealed unsafe class VectorQr<T> : QrKernel
         _inverseDiagonal = new TileBuffer(maxColumns * Entry);
         _factors = new TileBuffer(maxColumns * Tiling.Lanes);
         _chunk = new TileBuffer(ChunkColumns * StrideOf(maxRows));
+        _orders = [.. Enumerable.Range(0, Tiling.Lanes / T.Count).Select(_ => new int[maxColumns])];
     }
 
     /// <summary>The powers of two by which the lanes were multiplied.</summary>
     public ReadOnlySpan<double> Scale => _scale.Span;
 
-    public override void Factor(double* tile, int rows, int columns)
+    /// <summary>For each lane group the column of the matrix that stands at each place.</summary>
+    public int[] OrderOf(int lane) => _orders[lane / T.Count];
+
+    public override void Factor(double* tile, int rows, int columns) => Factor(tile, rows, columns, isPivoted: false);
+
+    /// <param name="isPivoted">
+    /// Whether the largest of the remaining columns is taken next, so that R falls from row to row; the lanes of a register go together, as
+    /// neighbouring lines look alike.
+    /// </param>
+    public void Factor(double* tile, int rows, int columns, bool isPivoted)
     {
         (_rows, _columns) = (rows, columns);
         fixed (double* matrix = _matrix.Span, scale = _scale.Span, diagonal = _diagonal.Span, factors = _factors.Span)
@@ -50,8 +61,19 @@ internal sealed unsafe class VectorQr<T> : QrKernel
             {
                 LaneScale.Of<T>(tile + lane, rows * columns, scale + lane);
                 CopyIn(tile + lane, matrix + lane, T.Load(scale + lane));
+                int[] order = OrderOf(lane);
                 for (int k = 0; k < columns; k++)
                 {
+                    order[k] = k;
+                }
+
+                for (int k = 0; k < columns; k++)
+                {
+                    if (isPivoted)
+                    {
+                        BringLargest(matrix + lane, order, k);
+                    }
+
                     double* v = matrix + lane + (nint)k * StrideOf(rows) + (nint)k * Entry;
                     T factor = MakeReflector(v, rows - k, diagonal + lane + (nint)k * Entry);
                     T.Store(factor, factors + lane + (nint)k * Tiling.Lanes);
@@ -141,6 +163,48 @@ internal sealed unsafe class VectorQr<T> : QrKernel
                 BlockKernel<T>.Store(
                     matrix + (nint)column * StrideOf(_rows) + (nint)row * Entry, T.Load(from) * scale, T.Load(from + Imaginary) * scale);
             }
+        }
+    }
+
+    /// <summary>Exchanges column k with the one that is largest from row k on, over the lanes of the register together.</summary>
+    private void BringLargest(double* matrix, int[] order, int k)
+    {
+        int largest = k;
+        double most = -1;
+        for (int column = k; column < _columns; column++)
+        {
+            double sum = SumOf(ColumnKernel<T>.SquaredNorm(matrix + (nint)column * StrideOf(_rows) + (nint)k * Entry, _rows - k));
+            (largest, most) = sum > most ? (column, sum) : (largest, most);
+        }
+
+        if (largest != k)
+        {
+            (order[k], order[largest]) = (order[largest], order[k]);
+            Exchange(matrix + (nint)k * StrideOf(_rows), matrix + (nint)largest * StrideOf(_rows));
+        }
+    }
+
+    private static double SumOf(T lanes)
+    {
+        double* each = stackalloc double[Tiling.Lanes];
+        T.Store(lanes, each);
+        double sum = 0;
+        for (int lane = 0; lane < T.Count; lane++)
+        {
+            // A lane without numbers has no say.
+            sum += double.IsFinite(each[lane]) ? each[lane] : 0;
+        }
+
+        return sum;
+    }
+
+    private void Exchange(double* first, double* second)
+    {
+        for (nint at = 0; at < (nint)_rows * Entry; at += Tiling.Lanes)
+        {
+            T kept = T.Load(first + at);
+            T.Store(T.Load(second + at), first + at);
+            T.Store(kept, second + at);
         }
     }
 

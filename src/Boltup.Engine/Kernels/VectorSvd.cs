@@ -5,7 +5,7 @@ namespace Boltup.Engine.Kernels;
 
 /// <summary>
 /// One-sided Jacobi on Rᴴ after a Householder QR (Hestenes 1958; Drmač, Veselić 2008; Golub, Van Loan, section 8.6), on 8 matrices at
-/// once: columns p and q of Rᴴ are rotated until all are orthogonal, Rᴴ·J = V·Σ, so that A = (Q·J)·Σ·Vᴴ.
+/// once: columns p and q of Rᴴ are rotated until all are orthogonal, Rᴴ·J = V·Σ, so that A·P = (Q·J)·Σ·Vᴴ.
 /// </summary>
 /// <remarks>
 /// Layout: a column holds its n entries of Rᴴ and under them its n entries of J, so that one loop turns both. Lanes: each lane has its own
@@ -41,7 +41,7 @@ internal sealed unsafe class VectorSvd<T> : SvdKernel
     public override void Factor(double* tile, int rows, int columns, double* singularValues)
     {
         (_rows, _order) = (rows, columns);
-        _qr.Factor(tile, rows, columns);
+        _qr.Factor(tile, rows, columns, isPivoted: true);
         _squares.Span.Fill(1);
         fixed (double* c = _columns.Span, squares = _squares.Span)
         {
@@ -98,11 +98,21 @@ internal sealed unsafe class VectorSvd<T> : SvdKernel
                     ColumnKernel<T>.Subtract(v, T.Load(factor) * gain, T.Load(factor + Imaginary) * gain, sum + lane, _order);
                 }
 
-                for (int row = 0; row < _order; row++)
-                {
-                    new ReadOnlySpan<double>(sum + (nint)row * Entry, Entry)
-                        .CopyTo(new Span<double>(result + ((nint)row * count + column) * Entry, Entry));
-                }
+                CopyOut(sum, result + (nint)column * Entry, count);
+            }
+        }
+    }
+
+    /// <summary>Puts the rows of V back into the order of the matrix's columns.</summary>
+    private void CopyOut(double* sum, double* result, int count)
+    {
+        for (int lane = 0; lane < Tiling.Lanes; lane += T.Count)
+        {
+            int[] order = _qr.OrderOf(lane);
+            for (int row = 0; row < _order; row++)
+            {
+                double* from = sum + (nint)row * Entry + lane;
+                BlockKernel<T>.Store(result + (nint)order[row] * count * Entry + lane, T.Load(from), T.Load(from + Imaginary));
             }
         }
     }

@@ -1,8 +1,5 @@
-using System.Globalization;
 using System.Numerics;
 using System.Text.Json;
-using Boltup.Engine.Acoustics;
-using Boltup.Engine.Spectra;
 using Boltup.Tests.Support;
 
 namespace Boltup.Tests.Cli;
@@ -32,17 +29,21 @@ public sealed class IdentifyCommandTests : IDisposable
         }
     }
 
-    /// <summary>Noisy data: about one percent in the responses and 0.1 dB in the bands, although single forces are far off.</summary>
+    /// <summary>Noisy data: two percent over all responses and 0.15 dB in level, although single forces are far off.</summary>
     [Fact]
-    public void Identify_NoisyBench_TransfersWithinOnePercentAndATenthOfADecibel()
+    public void Identify_NoisyBench_TransfersWithinTwoPercent()
     {
         Assert.Equal(0, Identify("noisy.bench.yaml").ExitCode);
         Dictionary<string, Complex[]> predicted = PredictVehicle();
         foreach ((string dof, Complex[] truth) in CsvSpectra.Read(Truth, "dof"))
         {
-            Assert.InRange(Near.RelativeError(truth, predicted[dof]), 1e-4, 0.03);
-            Assert.All(BandDifferences(truth, predicted[dof]), difference => Assert.InRange(Math.Abs(difference), 0, 1));
+            Assert.InRange(Near.RelativeError(truth, predicted[dof]), 1e-4, 0.02);
+            double levelDb = 10 * Math.Log10(predicted[dof].Sum(Power) / truth.Sum(Power));
+            Assert.InRange(levelDb, -0.15, 0.15);
         }
+
+        using JsonDocument summary = JsonDocument.Parse(File.ReadAllText(_folder.PathTo("out", "summary.json")));
+        Assert.InRange(summary.RootElement.GetProperty("validations")[0].GetProperty("relative_error").GetDouble(), 1e-4, 5e-3);
     }
 
     [Fact]
@@ -144,10 +145,5 @@ public sealed class IdentifyCommandTests : IDisposable
         return CsvSpectra.Read(_folder.PathTo("vehicle", "responses.csv"), "response").ToDictionary(response => dofs[response.Key], response => response.Value);
     }
 
-    private static double[] BandDifferences(Complex[] truth, Complex[] predicted)
-    {
-        var bands = new BandSums(FrequencyAxis.Even(20, 5, truth.Length));
-        double[] true2 = [.. truth.Select(value => value.Magnitude * value.Magnitude)], predicted2 = [.. predicted.Select(value => value.Magnitude * value.Magnitude)];
-        return [.. Enumerable.Range(0, bands.Bands.Count).Select(band => 10 * Math.Log10(bands.Sum(band, predicted2) / bands.Sum(band, true2)))];
-    }
+    private static double Power(Complex value) => value.Real * value.Real + value.Imaginary * value.Imaginary;
 }

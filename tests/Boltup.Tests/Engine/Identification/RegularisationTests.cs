@@ -47,7 +47,8 @@ public class RegularisationTests
     public void LCurve_NoisyData_TakesTheLargestCurvature()
     {
         double chosen = Identify(DampingRule.LCurve).Damping * LargestValue();
-        double[] candidates = [.. Candidates()];
+        // Below 1e-4 the curve hardly moves from point to point, and rounding bends it.
+        double[] candidates = [.. Candidates().Where(lambda => lambda > 1e-4 * LargestValue())];
         (double X, double Y)[] points = [.. candidates.Select(Point)];
         int corner = Enumerable.Range(20, points.Length - 40).MaxBy(i => Curvature(points[i - 20], points[i], points[i + 20]));
         Assert.Equal(Math.Log10(candidates[corner]), Math.Log10(chosen), 0.25);
