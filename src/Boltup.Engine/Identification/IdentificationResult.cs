@@ -11,6 +11,7 @@ namespace Boltup.Engine.Identification;
 /// <param name="Operations">One entry per operation, in the order of the bench file.</param>
 /// <param name="SingularValues">Of the indicator FRFs.</param>
 /// <param name="Coherence">Coherence of the installed FRFs; null when the bench gives none.</param>
+/// <param name="Quality">What else the data say of themselves.</param>
 /// <param name="Kernels">Name of the batch kernels that ran.</param>
 /// <param name="Diagnostics">Notes and warnings of the run.</param>
 public sealed record IdentificationResult(
@@ -23,5 +24,6 @@ public sealed record IdentificationResult(
     IReadOnlyList<IdentifiedOperation> Operations,
     SingularSpectrum SingularValues,
     CoherenceReport? Coherence,
+    BenchQuality Quality,
     string Kernels,
     IReadOnlyList<Diagnostic> Diagnostics);

@@ -20,6 +20,7 @@ public static class Identifier
             return null;
         }
 
+        BenchQuality quality = BenchQuality.Judge(bench, frf, diagnostics);
         TiledMatrix indicators = TileRows.Take(frf.Values, 0, bench.Indicators.Count);
         TiledMatrix validation = TileRows.Take(frf.Values, bench.Indicators.Count, bench.Validation.Count);
         TiledMatrix[] columns = [.. bench.Operations.Select(operation => MeasuredColumns(bench, operation))];
@@ -47,6 +48,7 @@ public static class Identifier
             operations,
             singularValues,
             bench.Coherence?.Report,
+            quality,
             KernelChoice.Name,
             [.. diagnostics.Items]);
     }

@@ -29,6 +29,7 @@ internal static class IdentificationSummary
         WriteSizes(json, result);
         WriteHolds(json, report.Holds);
         WriteOperations(json, report);
+        WriteChannels(json, result.Quality.Channels);
         WriteValidations(json, report.Evidence);
         WriteStiffness(json, report.Evidence.Stiffness);
         WriteRoutes(json, report.Evidence);
@@ -76,6 +77,26 @@ internal static class IdentificationSummary
         }
 
         json.WriteEndArray();
+    }
+
+    private static void WriteChannels(Utf8JsonWriter json, ChannelReport? channels)
+    {
+        if (channels is null)
+        {
+            return;
+        }
+
+        json.WriteStartObject("indicator_channels");
+        json.WriteFinite("misfit", channels.Misfit);
+        json.WriteFinite("misfit_with_suspects_corrected", channels.CorrectedMisfit);
+        json.WriteStartArray("suspects");
+        foreach (ChannelSuspect suspect in channels.Suspects)
+        {
+            json.WriteStringValue(suspect.Describe());
+        }
+
+        json.WriteEndArray();
+        json.WriteEndObject();
     }
 
     private static void WriteValidations(Utf8JsonWriter json, BenchEvidence evidence)

@@ -1,4 +1,5 @@
 using System.Text;
+using Boltup.Engine.Evidence;
 using Boltup.Engine.Identification;
 using Boltup.Reports.Results;
 
@@ -31,9 +32,21 @@ internal static class QualityTable
             Rows(csv, report, "least coherence", "installed FRFs", line => coherence.Least[line]);
         }
 
+        WriteAgreement(csv, report, "interface completeness", result.Quality.Completeness);
+        WriteAgreement(csv, report, "round trip over the interface", result.Quality.RoundTrip);
         WriteConsistency(csv, report);
         WriteRank(csv, report);
         csv.Flush();
+    }
+
+    /// <summary>Consistency, blind to a common factor, beside the level difference.</summary>
+    private static void WriteAgreement(CsvBytes csv, IdentificationReport report, string figure, FrfAgreement? agreement)
+    {
+        if (agreement is not null)
+        {
+            Rows(csv, report, figure, "consistency", line => agreement.Consistency[line]);
+            Rows(csv, report, figure, "level difference (dB)", line => agreement.LevelDifferenceDb[line]);
+        }
     }
 
     private static void WriteConsistency(CsvBytes csv, IdentificationReport report)
