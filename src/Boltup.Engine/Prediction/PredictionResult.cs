@@ -17,7 +17,11 @@ public sealed record PredictionResult(
     IReadOnlyList<OperationResult> Operations,
     Conditioning Conditioning,
     string Kernels,
-    IReadOnlyList<Diagnostic> Diagnostics);
+    IReadOnlyList<Diagnostic> Diagnostics)
+{
+    /// <summary>The stiffness of every mount that a joint goes through.</summary>
+    public IReadOnlyList<MountSpectrum> Mounts { get; init; } = [];
+}
 
 /// <summary>What one operation does to the responses and joints.</summary>
 /// <param name="Axis">Lines of this operation: those of its forces.</param>

@@ -88,6 +88,7 @@ public sealed class Predictor
             [.. _assembly.Operations.Select((operation, i) => reader.Read(operation, _cases[i]))],
             new Conditioning(_layout.Constraints.Count == 0 ? [] : solution.Condition, _layout.RotationLength),
             KernelChoice.Name,
-            [.. diagnostics.Items]);
+            [.. diagnostics.Items])
+        { Mounts = MountSpectra.Of(_assembly) };
     }
 }

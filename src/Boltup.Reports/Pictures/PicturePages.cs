@@ -10,7 +10,7 @@ namespace Boltup.Reports.Pictures;
 /// <param name="provenance">Closes every caption: program version and fingerprint of the inputs.</param>
 public sealed class PicturePages(PredictionResult result, string provenance)
 {
-    /// <summary>The overview sheet, then a page per response and one for the joints of each operation.</summary>
+    /// <summary>The overview sheet, then a page per response and one for the joints of each operation, then one per mount.</summary>
     public IReadOnlyList<Picture> All()
     {
         var pictures = new List<Picture>();
@@ -28,6 +28,7 @@ public sealed class PicturePages(PredictionResult result, string provenance)
             }
         }
 
+        pictures.AddRange(result.Mounts.Select(mount => MountPages.Of(mount, result.Axis, $"{result.Title} · {provenance}")));
         return PictureNames.MakeDistinct(pictures);
     }
 

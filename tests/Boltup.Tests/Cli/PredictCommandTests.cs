@@ -19,7 +19,7 @@ public class PredictCommandTests
         Assert.Equal(
             [
                 ".boltup-files", "5400-rpm-driver-ear.png", "5400-rpm-floor.png", "5400-rpm-joint-forces.png", "5400-rpm-passenger-ear.png",
-                "5400-rpm-seat-rail.png", "5400-rpm-steering-column.png", "joint_forces.csv", "overview.png", "responses.csv", "summary.json",
+                "5400-rpm-seat-rail.png", "5400-rpm-steering-column.png", "joint_forces.csv", "mount-base.png", "overview.png", "responses.csv", "summary.json",
             ],
             files);
     }
