@@ -25,4 +25,18 @@ public static partial class EngineCodes
         "Where k11, k22, −k12 and −k21 are the same, the mount passes on the force that it receives, and the 2×2 stiffness of its two ends cannot be inverted.",
         "a table with the column `term` in which all four terms of a direction have the same size",
         "Give k21 with its sign turned as a plain table, without the column `term`.");
+
+    public static readonly DiagnosticCode MountsLeak = new(
+        "ENG123",
+        "mounts that are not the only connection of two structures",
+        "Between the first end of one mount and the second end of another there is no element, so the inverse of the installed FRFs is zero there. Where it is not, the two structures are joined somewhere else too, dofs of the ends were left out, or the FRFs are not good enough to be inverted. The identified stiffness carries an error of about that size.",
+        "four mounts of which two were measured",
+        "Measure both ends of every mount and connection, with rotations where they matter.");
+
+    public static readonly DiagnosticCode RotationsOmitted = new(
+        "ENG124",
+        "rotations at the ends of mounts are left out",
+        "Inverse substructuring treats dofs that were not measured as free of force. Rotations nearly always are such dofs: where a mount resists rotation, or its ends lie beside the point of measurement, the identified stiffness is biased by what the rotations do.",
+        "one sensor with three axes at each end of a mount",
+        "Nothing to do for soft mounts whose ends hardly turn. Otherwise describe each end by six dofs, from at least three sensors.");
 }

@@ -12,6 +12,7 @@ internal static class CommandTree
     {
         PredictCommand.Build(screen, cancellation),
         IdentifyCommand.Build(screen),
+        MountCommand.Build(screen),
         CheckCommand.Build(screen),
         InspectCommand.Build(screen),
         SchemaCommand.Build(screen),

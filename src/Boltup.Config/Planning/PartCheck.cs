@@ -1,5 +1,3 @@
-using Boltup.Config.Binding;
-using Boltup.Config.Documents;
 using Boltup.Engine.Diagnostics;
 using Boltup.Engine.Parts;
 using Boltup.Engine.Spectra;
@@ -18,15 +16,7 @@ public static class PartCheck
         }
 
         using var library = new DataLibrary(options, diagnostics);
-        string name = document.Title?.Value ?? Path.GetFileName(document.Source.DisplayPath);
-        var start = new SourceSpan(document.Source.DisplayPath);
-        var alone = new PlacedPartDocument(
-            new Marked<string>(name, start),
-            new FileReference(document.Source.FullPath, document.Source.DisplayPath, start),
-            Turned: null,
-            Moved: null,
-            document);
-        if (new PartPlanner(library, diagnostics).Plan(alone) is { Model.Axis: { } axis } part)
+        if (LonePart.Plan(document, library, diagnostics) is { Model.Axis: { } axis } part)
         {
             Judge(part, axis, diagnostics);
         }

@@ -39,4 +39,25 @@ public static partial class PlanCodes
         "A passive mount is reciprocal: k12 and k21 are the same (ISO 10846-1), so one of them is enough.",
         "a table with k11, k21 and k22",
         "Nothing to do; measure both to see how good the measurement is.");
+
+    public static readonly DiagnosticCode BadEnds = new(
+        "PLN085",
+        "ends of a mount that are not there",
+        "A mount is identified between two points of the installation, one on each side of it. Both must be points of the part, and no point is an end of two mounts.",
+        "boltup mount installed.part.yaml --between m1",
+        "Name two points for each mount, such as `--between m1,b1 --between m2,b2`.");
+
+    public static readonly DiagnosticCode EndsNotMeasured = new(
+        "PLN086",
+        "ends of mounts that are not fully measured",
+        "Inverse substructuring inverts the FRFs between all ends of all mounts, so every end must be excited and must respond, and every pair of them must be there.",
+        "an installation that was excited on the source side only",
+        "Excite at both ends of every mount; where an end cannot be excited, `reciprocity: fill` takes the FRF from the other way round.");
+
+    public static readonly DiagnosticCode NotMeasured = new(
+        "PLN087",
+        "an installation without measured lines",
+        "Mounts are identified at the lines of a measurement. The part is a model, which has no lines of its own.",
+        "boltup mount lumped.part.yaml --between m1,b1",
+        "Name a part whose model is `frf`.");
 }

@@ -58,13 +58,13 @@ internal static class MountRules
 
     private static void CheckPassivity(Joint joint, FrequencyAxis axis, DiagnosticBag found)
     {
-        IReadOnlyList<double> offending = PassivityCheck.Offending(joint.Mount!, axis);
+        IReadOnlyList<double> offending = MountPassivity.Offending(joint.Mount!, axis);
         if (offending.Count == 0)
         {
             return;
         }
 
-        double smallest = PassivityCheck.SmallestLoss(joint.Mount!, axis, axis.IndexOf(offending[0]));
+        double smallest = MountPassivity.SmallestLoss(joint.Mount!, axis, axis.IndexOf(offending[0]));
         found.Warning(
             EngineCodes.MountGivesPower,
             $"{NameOf(joint)} gives power instead of dissipating it at {FrequencyList.Of(offending)}",

@@ -27,17 +27,17 @@ public class MountRulesTests
     public void Offending_MatrixWithANegativeEigenvalue_IsFound()
     {
         MountLaw mount = Matrix(4);
-        Assert.Equal(Axis.Count, PassivityCheck.Offending(mount, Axis).Count);
-        Assert.Equal(-0.1e5, PassivityCheck.SmallestLoss(mount, Axis, 17), 1e-3);
-        Assert.Empty(PassivityCheck.Offending(Matrix(2.9), Axis));
+        Assert.Equal(Axis.Count, MountPassivity.Offending(mount, Axis).Count);
+        Assert.Equal(-0.1e5, MountPassivity.SmallestLoss(mount, Axis, 17), 1e-3);
+        Assert.Empty(MountPassivity.Offending(Matrix(2.9), Axis));
     }
 
     [Fact]
     public void Offending_LosslessAndScaledMounts_AreNone()
     {
-        Assert.Empty(PassivityCheck.Offending(Chain.Mount(1e5, 0), Axis));
-        Assert.Empty(PassivityCheck.Offending(new ScaledMount(Chain.Mount(1e5, 0.1), 0.7), Axis));
-        Assert.Empty(PassivityCheck.Offending(new Rod(1e5, 0.2, 0.1).Mount(Axis), Axis));
+        Assert.Empty(MountPassivity.Offending(Chain.Mount(1e5, 0), Axis));
+        Assert.Empty(MountPassivity.Offending(new ScaledMount(Chain.Mount(1e5, 0.1), 0.7), Axis));
+        Assert.Empty(MountPassivity.Offending(new Rod(1e5, 0.2, 0.1).Mount(Axis), Axis));
     }
 
     [Fact]

@@ -9,7 +9,7 @@ namespace Boltup.Engine.Mounts;
 /// Does a mount dissipate? With e^{+jωt} the mean power that it takes up is ω/2 · xᴴ (K − Kᴴ)/(2j) x, so the anti-Hermitian part of its
 /// stiffness must have no negative eigenvalue; of a single spring that is Im k ≥ 0 (common practice).
 /// </summary>
-public sealed class PassivityCheck
+public sealed class MountPassivity
 {
     /// <summary>Share of the stiffness by which rounding may make a loss negative.</summary>
     private const double Tolerance = 1e-9;
@@ -21,7 +21,7 @@ public sealed class PassivityCheck
     private readonly Complex[,] _factor;
     private int _tile = -1;
 
-    private PassivityCheck(MountLaw mount, FrequencyAxis axis)
+    private MountPassivity(MountLaw mount, FrequencyAxis axis)
     {
         (_mount, _axis) = (mount, axis);
         _stiffness = new TiledMatrix(Tiling.Lanes, mount.Order, mount.Order);
@@ -33,7 +33,7 @@ public sealed class PassivityCheck
     /// <param name="axis">Lines within the band of the mount.</param>
     public static IReadOnlyList<double> Offending(MountLaw mount, FrequencyAxis axis)
     {
-        var check = new PassivityCheck(mount, axis);
+        var check = new MountPassivity(mount, axis);
         var found = new List<double>();
         for (int line = 0; line < axis.Count; line++)
         {
@@ -50,7 +50,7 @@ public sealed class PassivityCheck
     /// <summary>Smallest eigenvalue of the anti-Hermitian part at a line, in the unit of the stiffness.</summary>
     public static double SmallestLoss(MountLaw mount, FrequencyAxis axis, int line)
     {
-        var check = new PassivityCheck(mount, axis);
+        var check = new MountPassivity(mount, axis);
         check.Load(line);
         DenseAlgebra.PickUpProvider();
         return Matrix<Complex>.Build.DenseOfArray(check._loss).Evd(Symmetricity.Hermitian).EigenValues.Min(value => value.Real);
