@@ -18,26 +18,28 @@ internal sealed class InstalledEvidence(InstalledMounts installed, TiledMatrix s
     public MountEvidence Of(Direction direction)
     {
         Complex[] own = TransferOf(direction);
-        double size = Norm(own);
         Complex[] there = Between(mount.First, direction, mount.Second, direction);
         Complex[] back = Between(mount.Second, direction, mount.First, direction);
+        bool isAlone = installed.Dofs.Count == 2;
         return new MountEvidence(
             direction,
-            Norm([.. there.Zip(back, (a, b) => a - b)]) / size,
-            Norm([.. Others(direction)]) / size,
-            installed.Mounts.Count == 1 ? double.NaN : Norm([.. Leaks(direction)]) / size,
-            Norm([.. AloneOf(direction).Zip(own, (a, b) => a - b)]) / size);
+            Share(own, [[.. there.Zip(back, (a, b) => a - b)]]),
+            Share(own, Others(direction)),
+            installed.Mounts.Count == 1 ? double.NaN : Share(own, Leaks(direction)),
+            isAlone ? double.NaN : Share(own, [[.. AloneOf(direction).Zip(own, (a, b) => a - b)]]));
     }
 
-    private IEnumerable<Complex> Others(Direction direction) => installed.DirectionsOf(mount)
-        .Where(other => other != direction && IsLikeKind(other, direction))
-        .SelectMany(other => Between(mount.First, direction, mount.Second, other));
+    private Complex[][] Others(Direction direction) =>
+        [.. installed.DirectionsOf(mount)
+            .Where(other => other != direction && IsLikeKind(other, direction))
+            .Select(other => Between(mount.First, direction, mount.Second, other))];
 
-    private IEnumerable<Complex> Leaks(Direction direction) => installed.Mounts
-        .Where(other => other != mount)
-        .SelectMany(other => installed.DirectionsOf(other)
-            .Where(theirs => IsLikeKind(theirs, direction))
-            .SelectMany(theirs => Between(mount.First, direction, other.Second, theirs)));
+    private Complex[][] Leaks(Direction direction) =>
+        [.. installed.Mounts
+            .Where(other => other != mount)
+            .SelectMany(other => installed.DirectionsOf(other)
+                .Where(theirs => IsLikeKind(theirs, direction))
+                .Select(theirs => Between(mount.First, direction, other.Second, theirs)))];
 
     /// <summary>Translations and rotations have different units and are not compared.</summary>
     private static bool IsLikeKind(Direction one, Direction other) => one >= Direction.RX == other >= Direction.RX;
@@ -58,6 +60,12 @@ internal sealed class InstalledEvidence(InstalledMounts installed, TiledMatrix s
     private Complex[] Between(string point, Direction direction, string otherPoint, Direction otherDirection) =>
         stiffness.GatherSpectrum(installed.IndexOf(point, direction), installed.IndexOf(otherPoint, otherDirection));
 
-    private static double Norm(IReadOnlyCollection<Complex> values) =>
-        Math.Sqrt(values.Sum(value => value.Real * value.Real + value.Imaginary * value.Imaginary));
+    /// <summary>Median over the lines of the root of the summed squares of spectra, relative to the mount's own stiffness.</summary>
+    private static double Share(Complex[] own, Complex[][] spectra)
+    {
+        double[] sorted = [.. own.Select((k, line) => Math.Sqrt(spectra.Sum(spectrum => Square(spectrum[line])) / Square(k))).Order()];
+        return (sorted[(sorted.Length - 1) / 2] + sorted[sorted.Length / 2]) / 2;
+    }
+
+    private static double Square(Complex value) => value.Real * value.Real + value.Imaginary * value.Imaginary;
 }

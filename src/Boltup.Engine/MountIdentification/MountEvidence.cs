@@ -2,7 +2,7 @@ using Boltup.Engine.Spectra;
 
 namespace Boltup.Engine.MountIdentification;
 
-/// <summary>How far an identified stiffness can be trusted. Each number is a ratio of root mean squares over the lines.</summary>
+/// <summary>How far an identified stiffness can be trusted. Each number is a median over the lines, which a few bad ones do not move.</summary>
 /// <param name="NotReciprocal">Difference of the two transfer stiffnesses, first to second end and back, relative to their mean.</param>
 /// <param name="OtherDirections">
 /// Stiffness that couples the direction with the other directions of the same mount, relative to the direction's own. Of a mount without such
@@ -14,7 +14,7 @@ namespace Boltup.Engine.MountIdentification;
 /// </param>
 /// <param name="OwnEndsAlone">
 /// Change of the identified stiffness when only the dofs of this direction are measured and all the others are left out: how much omitted
-/// dofs can matter in this installation.
+/// dofs can matter in this installation. NaN where no others were measured.
 /// </param>
 public sealed record MountEvidence(
     Direction Direction, double NotReciprocal, double OtherDirections, double OtherMounts, double OwnEndsAlone);

@@ -58,7 +58,7 @@ public class InverseSubstructuringTests
         Near.Equal(
             [.. installed.Axis.Hz.ToArray().Select(hz => new Complex(3e5, 3e4 + 2 * Math.PI * hz * 20))], mount.Stiffness.Terms[0].Values, 1e-10);
         Assert.True(double.IsNaN(mount.Evidence[0].OtherMounts));
-        Assert.InRange(mount.Evidence[0].OwnEndsAlone, 0, 1e-10);
+        Assert.True(double.IsNaN(mount.Evidence[0].OwnEndsAlone));
     }
 
     /// <summary>Of a mount with mass effect the method finds the transfer stiffness −k₂₁.</summary>
