@@ -35,6 +35,24 @@ public sealed class CouplingLayout
     /// <summary>Factor of a constraint that makes rotations comparable: the length for a rotation, otherwise 1.</summary>
     public double ScaleOf(int constraint) => Constraints[constraint].Direction >= Direction.RX ? RotationLength : 1;
 
+    /// <summary>Turns the solution of the scaled interface problem into forces and moments.</summary>
+    /// <param name="lambda">constraints × columns entries.</param>
+    internal void Unscale(Span<double> lambda, int columns)
+    {
+        for (int constraint = 0; constraint < Constraints.Count; constraint++)
+        {
+            double scale = ScaleOf(constraint);
+            if (scale != 1)
+            {
+                int length = columns * Tiling.EntryLength;
+                foreach (ref double value in lambda.Slice(constraint * length, length))
+                {
+                    value *= scale;
+                }
+            }
+        }
+    }
+
     public PartLayout this[string part] => _byName[part];
 
     private void AddEnds(int row)

@@ -1,4 +1,5 @@
 using Boltup.Engine.Kernels;
+using Boltup.Engine.Paths;
 using Boltup.Engine.Spectra;
 
 namespace Boltup.Engine.Coupling;
@@ -24,7 +25,9 @@ internal sealed class CouplingSolver
     /// <summary>Solves all lines, tiles in parallel; the result does not depend on the number of threads.</summary>
     /// <param name="forces">For each part the forces on its columns: columns × cases. Null for a part without forces.</param>
     /// <param name="cases">Number of columns of forces.</param>
-    public CouplingSolution Solve(IReadOnlyList<TiledMatrix?> forces, int cases, CancellationToken cancellation)
+    /// <param name="transfers">What to fill with the transfers of the paths on the way; null where nobody asks for them.</param>
+    public CouplingSolution Solve(
+        IReadOnlyList<TiledMatrix?> forces, int cases, CancellationToken cancellation, PathTransfers? transfers = null)
     {
         var solution = new CouplingSolution(
             new TiledMatrix(_axis.Count, _order, cases),
@@ -34,7 +37,7 @@ internal sealed class CouplingSolver
             0,
             _axis.TileCount,
             new ParallelOptions { CancellationToken = cancellation },
-            () => new Worker(this, forces, solution, cases),
+            () => new Worker(this, forces, solution, cases, transfers),
             (tile, _, worker) =>
             {
                 worker.Solve(tile);
@@ -59,8 +62,10 @@ internal sealed class CouplingSolver
         private readonly TiledMatrix _partMotion;
         private readonly TiledMatrix _partForces;
         private readonly BatchLu _lu;
+        private readonly PathKernel? _paths;
 
-        public Worker(CouplingSolver solver, IReadOnlyList<TiledMatrix?> forces, CouplingSolution solution, int cases)
+        public Worker(
+            CouplingSolver solver, IReadOnlyList<TiledMatrix?> forces, CouplingSolution solution, int cases, PathTransfers? transfers)
         {
             (_solver, _forces, _solution, _cases) = (solver, forces, solution, cases);
             _interface = new InterfaceMatrix(solver._layout, solver._axis, solver._frfs);
@@ -68,6 +73,7 @@ internal sealed class CouplingSolver
             _partMotion = new TiledMatrix(Tiling.Lanes, solver._layout.Parts.Max(part => part.InterfaceCount), cases);
             _partForces = new TiledMatrix(Tiling.Lanes, solver._layout.Parts.Max(part => part.Columns.Count), cases);
             _lu = new BatchLu(solver._order);
+            _paths = transfers is null ? null : new PathKernel(solver._layout, solver._frfs, transfers);
         }
 
         public void Solve(int tile)
@@ -84,6 +90,8 @@ internal sealed class CouplingSolver
                     Respond(part, tile, responses);
                 }
             }
+
+            _paths?.Fill(tile, _lu);
         }
 
         private void SolveJointForces(int tile)
@@ -97,7 +105,7 @@ internal sealed class CouplingSolver
             _interface.Fill(tile, _matrix.Tile(0));
             _lu.Factor(_matrix.Tile(0), _solver._order);
             _lu.Solve(lambda, _cases);
-            UnscaleRotations(lambda);
+            _solver._layout.Unscale(lambda, _cases);
             KeepCondition(tile);
         }
 
@@ -120,22 +128,6 @@ internal sealed class CouplingSolver
                 {
                     TileEntry.AddScaled(
                         rightHandSide, end.Constraint * _cases + column, motion, end.Interface * _cases + column, factor);
-                }
-            }
-        }
-
-        private void UnscaleRotations(Span<double> lambda)
-        {
-            for (int constraint = 0; constraint < _solver._order; constraint++)
-            {
-                double scale = _solver._layout.ScaleOf(constraint);
-                if (scale != 1)
-                {
-                    int length = _cases * Tiling.EntryLength;
-                    foreach (ref double value in lambda.Slice(constraint * length, length))
-                    {
-                        value *= scale;
-                    }
                 }
             }
         }

@@ -1,5 +1,6 @@
 using System.Numerics;
 using Boltup.Engine.Diagnostics;
+using Boltup.Engine.Paths;
 using Boltup.Engine.Spectra;
 
 namespace Boltup.Engine.Prediction;
@@ -31,7 +32,14 @@ public sealed record OperationResult(
     FrequencyAxis Axis,
     Amplitude Amplitude,
     IReadOnlyList<ResponseSpectrum> Responses,
-    IReadOnlyList<JointForceSpectrum> JointForces);
+    IReadOnlyList<JointForceSpectrum> JointForces)
+{
+    /// <summary>Takes the responses apart into contributions; null where nobody asked for paths.</summary>
+    public OperationPaths? Paths { get; init; }
+
+    /// <summary>For each response its paths by forces and, where anything is joined, by joints; empty where nobody asked for paths.</summary>
+    public IReadOnlyList<ResponsePaths> RankedPaths { get; init; } = [];
+}
 
 /// <summary>One response over the lines of its operation.</summary>
 /// <param name="Name">The response's name in the assembly file.</param>

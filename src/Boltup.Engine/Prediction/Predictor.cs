@@ -2,6 +2,7 @@ using Boltup.Engine.Coupling;
 using Boltup.Engine.Diagnostics;
 using Boltup.Engine.Kernels;
 using Boltup.Engine.Parts;
+using Boltup.Engine.Paths;
 using Boltup.Engine.Spectra;
 
 namespace Boltup.Engine.Prediction;
@@ -25,10 +26,17 @@ public sealed class Predictor
     /// <summary>Computes everything that the assembly asks for.</summary>
     /// <returns>The result, or null after an error in <paramref name="diagnostics"/>.</returns>
     public static PredictionResult? Predict(
-        AssemblyModel assembly, DiagnosticBag diagnostics, CancellationToken cancellation = default)
+        AssemblyModel assembly, DiagnosticBag diagnostics, CancellationToken cancellation = default) =>
+        Predict(assembly, diagnostics, withPaths: false, cancellation);
+
+    /// <summary>Computes everything that the assembly asks for.</summary>
+    /// <param name="withPaths">Whether to take every response apart into the contributions of forces and joints as well.</param>
+    /// <returns>The result, or null after an error in <paramref name="diagnostics"/>.</returns>
+    public static PredictionResult? Predict(
+        AssemblyModel assembly, DiagnosticBag diagnostics, bool withPaths, CancellationToken cancellation = default)
     {
         var predictor = new Predictor(assembly);
-        return predictor.ReadParts(diagnostics) is { } frfs ? predictor.Solve(frfs, diagnostics, cancellation) : null;
+        return predictor.ReadParts(diagnostics) is { } frfs ? predictor.Solve(frfs, diagnostics, withPaths, cancellation) : null;
     }
 
     /// <summary>Judges an assembly and the FRFs that it needs without coupling them.</summary>
@@ -73,9 +81,11 @@ public sealed class Predictor
         return frf;
     }
 
-    private PredictionResult? Solve(TiledMatrix?[] frfs, DiagnosticBag diagnostics, CancellationToken cancellation)
+    private PredictionResult? Solve(TiledMatrix?[] frfs, DiagnosticBag diagnostics, bool withPaths, CancellationToken cancellation)
     {
-        CouplingSolution solution = new CouplingSolver(_layout, _assembly.Axis, frfs).Solve(_cases.Forces, _cases.Count, cancellation);
+        PathAnalysis? paths = withPaths ? new PathAnalysis(_assembly, _layout, _cases) : null;
+        CouplingSolution solution = new CouplingSolver(_layout, _assembly.Axis, frfs)
+            .Solve(_cases.Forces, _cases.Count, cancellation, paths?.Transfers);
         if (!new ConditionCheck(_layout, _assembly.Axis, frfs).Check(solution.Condition, diagnostics))
         {
             return null;
@@ -85,10 +95,16 @@ public sealed class Predictor
         return new PredictionResult(
             _assembly.Title,
             _assembly.Axis,
-            [.. _assembly.Operations.Select((operation, i) => reader.Read(operation, _cases[i]))],
+            [.. _assembly.Operations.Select((operation, i) => ReadOperation(i, reader, paths, solution))],
             new Conditioning(_layout.Constraints.Count == 0 ? [] : solution.Condition, _layout.RotationLength),
             KernelChoice.Name,
             [.. diagnostics.Items])
         { Mounts = MountSpectra.Of(_assembly) };
+    }
+
+    private OperationResult ReadOperation(int index, OperationReader reader, PathAnalysis? paths, CouplingSolution solution)
+    {
+        OperationResult result = reader.Read(_assembly.Operations[index], _cases[index]);
+        return paths is null ? result : paths.AddTo(result, index, solution);
     }
 }
