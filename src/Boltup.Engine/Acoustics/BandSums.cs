@@ -9,12 +9,13 @@ namespace Boltup.Engine.Acoustics;
 public sealed class BandSums
 {
     private readonly (int Line, double Share)[][] _parts;
+    private readonly double[] _edges;
 
     /// <summary>The bands of the given fraction of an octave that lines of an axis reach into.</summary>
     /// <param name="axis">Lines above 0 Hz; a line at 0 Hz belongs to no band.</param>
     public BandSums(FrequencyAxis axis, int perOctave = 3)
     {
-        double[] edges = CellEdges(axis);
+        double[] edges = _edges = CellEdges(axis);
         double lowest = Array.Find(edges, edge => edge > 0), highest = edges[^1];
         int first = OctaveBand.Of(lowest, perOctave).Index, last = OctaveBand.Of(highest * (1 - FrequencyAxis.RelativeTolerance), perOctave).Index;
         Bands = [.. Enumerable.Range(first, last - first + 1).Select(index => new OctaveBand(perOctave, index))];
@@ -26,6 +27,12 @@ public sealed class BandSums
 
     /// <summary>Number of lines with more than half of their cell in a band.</summary>
     public int LinesIn(int band) => _parts[band].Count(part => part.Share > 0.5);
+
+    /// <summary>The lines that reach into a band, adjacent and upwards, with the share of each line's power that falls into it.</summary>
+    public IReadOnlyList<(int Line, double Share)> PartsOf(int band) => _parts[band];
+
+    /// <summary>Width in Hz of the cell for which a line stands.</summary>
+    public double CellWidthHz(int line) => _edges[line + 1] - _edges[line];
 
     /// <summary>Sum of the powers in a band.</summary>
     /// <param name="power">Power of each line, such as the square of an rms value; not negative.</param>

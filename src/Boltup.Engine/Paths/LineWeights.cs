@@ -18,6 +18,9 @@ public sealed record LineWeights(int First, double[] Factors)
     /// <summary>One line with its whole power.</summary>
     public static LineWeights Line(int line) => new(line, [1]);
 
+    /// <summary>The factor of a line, 0 where none is given.</summary>
+    public double FactorAt(int line) => line >= First && line < First + Factors.Length ? Factors[line - First] : 0;
+
     /// <summary>Σ factor·(a·b + c·d): with real and imaginary parts the weighted scalar product of two spectra.</summary>
     /// <param name="a">All lines, as for the other spans.</param>
     internal double Dot(ReadOnlySpan<double> a, ReadOnlySpan<double> b, ReadOnlySpan<double> c, ReadOnlySpan<double> d)

@@ -30,7 +30,7 @@ internal sealed class PathAnalysis
     public OperationResult AddTo(OperationResult result, int index, CouplingSolution solution)
     {
         var paths = new OperationPaths(Transfers, _forces, solution.JointForces, _cases[index], result.Axis, _assembly.Operations[index]);
-        IReadOnlyList<PathBand> bands = ThirdOctaveShares.Of(result.Axis);
+        IReadOnlyList<PathBand> bands = PathBand.ThirdOctaves(result.Axis);
         PathView[] views = Transfers.Constraints.Count > 0 ? [PathView.Forces, PathView.Joints] : [PathView.Forces];
         var ranked = new ResponsePaths[_assembly.Responses.Count * views.Length];
         Parallel.For(0, ranked.Length, i =>

@@ -1,4 +1,4 @@
-using Boltup.Engine.Spectra;
+using Boltup.Engine.Acoustics;
 
 namespace Boltup.Engine.Paths;
 
@@ -77,26 +77,21 @@ public sealed record RequiredReduction(
     /// <summary>Largest mean square force per third octave.</summary>
     private static double UniformPower(OperationPaths paths, int response, IReadOnlyList<PathLimit> limits)
     {
-        IReadOnlyList<PathBand> bands = ThirdOctaveShares.Of(paths.Axis);
-        double[] squares = [.. Enumerable.Range(0, paths.Axis.Count).Select(line => paths.SquaredTransfers(response, line))];
-        return limits.Min(limit => limit.Power / bands.Sum(band => Gain(band, limit.Lines, squares, paths.Axis)));
+        var sums = new BandSums(paths.Axis);
+        double[] widths = [.. Enumerable.Range(0, paths.Axis.Count).Select(sums.CellWidthHz)];
+        double[] squares = [.. widths.Select((width, line) => width * paths.SquaredTransfers(response, line))];
+        return limits.Min(limit =>
+        {
+            double[] limited = [.. squares.Select((square, line) => square * limit.Lines.FactorAt(line))];
+            return limit.Power / sums.Bands.Select((_, band) => Mean(sums, band, limited, widths)).Sum();
+        });
     }
 
-    /// <summary>Mean of Σ|H|² over the frequencies of a band, at the lines that a limit counts and with its factors.</summary>
-    private static double Gain(PathBand band, LineWeights limit, double[] squares, FrequencyAxis axis)
+    /// <summary>Mean over the frequencies of a band that the lines fill.</summary>
+    private static double Mean(BandSums sums, int band, double[] values, double[] widths)
     {
-        double width = 0;
-        double sum = 0;
-        for (int i = 0; i < band.Weights.Factors.Length; i++)
-        {
-            int line = band.Weights.First + i;
-            double share = band.Weights.Factors[i] * ThirdOctaveShares.WidthOf(axis, line);
-            int inLimit = line - limit.First;
-            width += share;
-            sum += inLimit >= 0 && inLimit < limit.Factors.Length ? share * limit.Factors[inLimit] * squares[line] : 0;
-        }
-
-        return sum / width;
+        double width = sums.Sum(band, widths);
+        return width > 0 ? sums.Sum(band, values) / width : 0;
     }
 
     private static double Decibels(double powerRatio) => 10 * Math.Log10(powerRatio);

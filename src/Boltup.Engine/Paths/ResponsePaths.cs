@@ -8,6 +8,6 @@ public sealed record ResponsePaths(string Response, PathView View, PathRanking O
     internal static ResponsePaths Of(string response, PathView view, PathSpectra spectra, IReadOnlyList<PathBand> bands) => new(
         response,
         view,
-        PathRanking.Of(spectra, new PathBand(null, LineWeights.All(spectra.Lines))),
+        PathRanking.Of(spectra, PathBand.Overall(spectra.Lines)),
         [.. bands.Select(band => PathRanking.Of(spectra, band))]);
 }

@@ -27,18 +27,31 @@ public class PathRankingTests
         Assert.Equal(change, all.Overall.Paths.Single(path => path.Path.Name == "left.2.x").HalvedChange, Rounding);
     }
 
+    /// <summary>1 and −0.9 leave 0.1: shares 10 and −9; half of the first leaves −0.4, which is four times as much; 1.8 of 1.81 is cancelled.</summary>
     [Fact]
-    public void Of_EqualAndOppositeContributions_TheyCancelAndEitherAloneIsStronger()
+    public void Of_OpposedContributions_TheyCancel()
     {
-        ResponsePaths opposed = Rank(1, OppositeOf(1));
-        PathPair pair = Assert.Single(opposed.Overall.Cancelling);
-        Assert.Equal(["left.2.x", "right.2.x"], new[] { pair.First.Name, pair.Second.Name });
-        Assert.InRange(pair.Cancelled, 0.01, 1);
-        Assert.All(opposed.Overall.Paths, path => Assert.True(path.Power > opposed.Overall.Power));
+        PathRanking ranking = Rank([1], [-0.9]);
+        PathPair pair = Assert.Single(ranking.Cancelling);
+        Assert.Equal(["0", "1"], new[] { pair.First.Name, pair.Second.Name });
+        Assert.Equal(1.8 / 1.81, pair.Cancelled, Rounding);
+        Assert.Equal([10, -9], ranking.Paths.Select(path => Math.Round(path.Share, 9)));
+        Assert.Equal(20 * Math.Log10(4), ranking.Paths[0].HalvedChange, Rounding);
     }
 
     [Fact]
-    public void Of_ContributionsInPhase_NothingCancels() => Assert.Empty(Rank(1, 0).Overall.Cancelling);
+    public void Of_ContributionsInPhaseOrQuadrature_NothingCancels()
+    {
+        Assert.Empty(Rank([1, 2], [0.5, 3]).Cancelling);
+        Assert.Empty(Rank([1, 2], [Complex.ImaginaryOne, -2 * Complex.ImaginaryOne]).Cancelling);
+    }
+
+    [Fact]
+    public void Of_ManyPaths_NamesTheStrongestPairsFirst()
+    {
+        PathRanking ranking = Rank([4], [-3], [2], [-1]);
+        Assert.Equal([("0", "1"), ("1", "2"), ("0", "3"), ("2", "3")], ranking.Cancelling.Select(pair => (pair.First.Name, pair.Second.Name)));
+    }
 
     [Fact]
     public void Of_Bands_TheirPowersSumToTheOverallPower()
@@ -51,13 +64,21 @@ public class PathRankingTests
     private static ResponsePaths Rank(Complex left, Complex right) => TwoSources.Predict(
         ForceSum.Phase, TwoSources.Force(TwoSources.LeftFoot, left), TwoSources.Force(TwoSources.RightFoot, right)).RankedPaths[0];
 
-    /// <summary>The force on the right that is in antiphase at the response, at the strongest line of a force on the left.</summary>
-    private static Complex OppositeOf(Complex left)
+    /// <summary>Ranks paths named by number, by their contributions at each line.</summary>
+    private static PathRanking Rank(params Complex[][] contributions)
     {
-        PathSpectra unit = TwoSources.Predict(
-            ForceSum.Phase, TwoSources.Force(TwoSources.LeftFoot, left), TwoSources.Force(TwoSources.RightFoot, 1)).Paths(PathView.Forces);
-        Complex[] first = unit.Contribution(0);
-        int strongest = first.Index().MaxBy(line => Complex.Abs(line.Item)).Index;
-        return -first[strongest] / unit.Contribution(1)[strongest];
+        int lines = contributions[0].Length;
+        var spectra = new PathSpectra([.. contributions.Select((_, i) => new TransferPath(PathKind.Force, $"{i}"))], 1, lines, 1);
+        for (int path = 0; path < contributions.Length; path++)
+        {
+            for (int line = 0; line < lines; line++)
+            {
+                spectra.Real(path, 0)[line] = contributions[path][line].Real;
+                spectra.Imaginary(path, 0)[line] = contributions[path][line].Imaginary;
+            }
+        }
+
+        spectra.SumUp();
+        return PathRanking.Of(spectra, PathBand.Overall(lines));
     }
 }

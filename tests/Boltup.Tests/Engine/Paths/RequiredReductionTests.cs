@@ -48,8 +48,8 @@ public class RequiredReductionTests
     {
         OperationPaths paths = Predict(Left, Right).Paths!;
         PathSpectra spectra = paths.Of(0, PathView.Forces);
-        PathLimit[] limits = [.. Enumerable.Range(0, TwoSources.Axis.Count)
-            .Select(line => new PathLimit(LineWeights.Line(line), (line % 2 == 0 ? 0.5 : 0.8) * spectra.TotalPower(LineWeights.Line(line))))];
+        LineWeights[] halves = [new LineWeights(0, [.. Enumerable.Repeat(1.0, 10)]), new LineWeights(10, [.. Enumerable.Repeat(1.0, 11)])];
+        PathLimit[] limits = [.. halves.Select((half, i) => new PathLimit(half, (i == 0 ? 0.8 : 0.5) * spectra.TotalPower(half)))];
         double? together = RequiredReduction.Of(paths, 0, limits).Forces[0].Decibels;
         double?[] each = [.. limits.Select(limit => RequiredReduction.Of(paths, 0, [limit]).Forces[0].Decibels)];
         Assert.Equal(each.Max(), together);
@@ -64,7 +64,7 @@ public class RequiredReductionTests
         OperationPaths paths = Predict(Left, Right).Paths!;
         double level = RequiredReduction.Of(paths, 0, [new PathLimit(All, limit)]).UniformForceLevel;
         double power = 0;
-        foreach (PathBand band in ThirdOctaveShares.Of(TwoSources.Axis))
+        foreach (PathBand band in PathBand.ThirdOctaves(TwoSources.Axis))
         {
             double perShare = Math.Pow(10, level / 10) / band.Weights.Factors.Sum();
             for (int i = 0; i < band.Weights.Factors.Length; i++)
