@@ -14,6 +14,7 @@ internal sealed class PredictCommand(Screen screen, CancellationToken cancellati
     private readonly Argument<string> _assembly = new("ASSEMBLY") { Description = "An assembly file (*.assembly.yaml)" };
     private readonly Option<string> _output = SharedOptions.Output();
     private readonly Option<bool> _noPictures = SharedOptions.NoPictures();
+    private readonly Option<bool> _pathLines = new("--path-lines") { Description = "Write every contribution at every line as well" };
     private readonly Option<bool> _timing = SharedOptions.Timing();
     private readonly Option<bool> _allowOutside = SharedOptions.AllowOutside();
     private readonly Option<MessageForm> _messages = SharedOptions.Messages();
@@ -27,6 +28,7 @@ internal sealed class PredictCommand(Screen screen, CancellationToken cancellati
             command._assembly,
             command._output,
             command._noPictures,
+            command._pathLines,
             command._timing,
             command._allowOutside,
             command._messages,
@@ -44,10 +46,10 @@ internal sealed class PredictCommand(Screen screen, CancellationToken cancellati
         using AssemblyPlan? plan = AssemblyPlanner.Plan(path, parsed.LoadOptions(_allowOutside), diagnostics);
         Task<InputFingerprint[]>? fingerprints = plan is null ? null : Task.Run(() => Fingerprints(plan), cancellation);
         stages.End("load and plan");
-        PredictionResult? result = plan is null ? null : Predictor.Predict(plan.Assembly, diagnostics, cancellation);
+        PredictionResult? result = plan is null ? null : Predictor.Predict(plan.Assembly, diagnostics, withPaths: true, cancellation);
         stages.End("read and couple");
         string folder = parsed.GetValue(_output)!;
-        var options = new ResultOptions(ProgramVersion.Text, !parsed.GetValue(_noPictures));
+        var options = new ResultOptions(ProgramVersion.Text, !parsed.GetValue(_noPictures)) { PathLines = parsed.GetValue(_pathLines) };
         IReadOnlyList<string>? files = result is null
             ? null
             : ResultWriter.Write(result, fingerprints!.Result, folder, options, diagnostics);

@@ -16,6 +16,7 @@ internal static class PredictionSummary
         if (result.Operations.Any(operation => operation.Responses.Count > 0))
         {
             PrintLevels(screen, result);
+            PathSummary.Print(screen, result);
         }
 
         screen.Out.WriteLine(Cautions.Text);

@@ -6,4 +6,13 @@ public sealed record Panel(
     string Title, PictureAxis X, PictureAxis Y, IReadOnlyList<Series> Series, (double Left, double Top, double Width, double Height) Place)
 {
     public Marker? Marker { get; init; }
+
+    /// <summary>Filled rectangles, under the lines.</summary>
+    public IReadOnlyList<Bar> Bars { get; init; } = [];
+
+    /// <summary>Fills the frame with colours; there are no lines then.</summary>
+    public ColourMap? Map { get; init; }
+
+    /// <summary>Pixels left of the frame, for the labels of the ordinate.</summary>
+    public float LeftRoom { get; init; } = PictureStyle.LabelRoom;
 }

@@ -39,6 +39,11 @@ public static class PictureDrawer
     {
         using var plot = new Plot();
         StyleFrame(plot, panel);
+        foreach (Bar bar in panel.Bars)
+        {
+            AddBar(plot, bar, panel.X);
+        }
+
         foreach (Series series in panel.Series)
         {
             AddLine(plot, series, panel.X.IsLogarithmic);
@@ -47,7 +52,8 @@ public static class PictureDrawer
         SetAxis(plot.Axes.Bottom, panel.X);
         SetAxis(plot.Axes.Left, panel.Y);
         plot.Axes.SetLimits(Along(panel.X, panel.X.From), Along(panel.X, panel.X.To), panel.Y.From, panel.Y.To);
-        plot.Layout.Fixed(new PixelPadding(76, 22, panel.X.Label.Length > 0 ? 52 : 30, panel.Title.Length > 0 ? 34 : 10));
+        PixelPadding padding = PaddingOf(panel);
+        plot.Layout.Fixed(padding);
         if (panel.Marker is { } marker)
         {
             AddMarker(plot, marker, panel);
@@ -57,8 +63,17 @@ public static class PictureDrawer
         using var own = new SKBitmap((int)area.Width, (int)area.Height, SKColorType.Rgba8888, SKAlphaType.Opaque);
         using var ownCanvas = new SKCanvas(own);
         plot.Render(ownCanvas, own.Width, own.Height);
+        if (panel.Map is { } map)
+        {
+            var frame = new SKRectI((int)padding.Left, (int)padding.Top, own.Width - (int)padding.Right, own.Height - (int)padding.Bottom);
+            MapDrawer.Draw(own, frame, panel.X, map);
+        }
+
         canvas.DrawBitmap(own, MathF.Round(area.Left), MathF.Round(area.Top));
     }
+
+    private static PixelPadding PaddingOf(Panel panel) =>
+        new(panel.LeftRoom, 22, panel.X.Label.Length > 0 ? 52 : 30, panel.Title.Length > 0 ? 34 : 10);
 
     private static void StyleFrame(Plot plot, Panel panel)
     {
@@ -105,6 +120,22 @@ public static class PictureDrawer
         double[] y = [.. shown.Select(i => series.Y[i])];
         ScottPlot.Plottables.Scatter line = plot.Add.ScatterLine(x, y, ToColour(series.Colour));
         line.LineWidth = series.Thin ? PictureStyle.ComparisonWeight : PictureStyle.PredictionWeight;
+    }
+
+    private static void AddBar(Plot plot, Bar bar, PictureAxis x)
+    {
+        ScottPlot.Plottables.Rectangle rectangle = plot.Add.Rectangle(Along(x, bar.Left), Along(x, bar.Right), bar.Bottom, bar.Top);
+        rectangle.FillColor = ToColour(bar.Colour);
+        rectangle.LineWidth = 0;
+        if (bar.Text.Length > 0)
+        {
+            ScottPlot.Plottables.Text text = plot.Add.Text(bar.Text, Along(x, bar.Right), (bar.Bottom + bar.Top) / 2);
+            text.LabelFontName = PictureFonts.Family;
+            text.LabelFontSize = PictureStyle.TickSize;
+            text.LabelFontColor = ToColour(PictureStyle.Text);
+            text.LabelAlignment = Alignment.MiddleLeft;
+            text.OffsetX = 6;
+        }
     }
 
     private static void AddMarker(Plot plot, Marker marker, Panel panel)

@@ -10,7 +10,7 @@ namespace Boltup.Reports.Pictures;
 /// <param name="provenance">Closes every caption: program version and fingerprint of the inputs.</param>
 public sealed class PicturePages(PredictionResult result, string provenance)
 {
-    /// <summary>The overview sheet, then a page per response and one for the joints of each operation, then one per mount.</summary>
+    /// <summary>The overview sheet, then a page per response, one for its paths and one for the joints of each operation, then one per mount.</summary>
     public IReadOnlyList<Picture> All()
     {
         var pictures = new List<Picture>();
@@ -22,6 +22,7 @@ public sealed class PicturePages(PredictionResult result, string provenance)
         foreach (OperationResult operation in result.Operations)
         {
             pictures.AddRange(operation.Responses.Select((_, i) => Response(operation, i)));
+            pictures.AddRange(operation.Responses.Select((_, i) => PathPages.Of(operation, i, $"{result.Title} · {provenance}")).OfType<Picture>());
             if (operation.JointForces.Count > 0)
             {
                 pictures.Add(JointForces(operation));

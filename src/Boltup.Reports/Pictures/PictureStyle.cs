@@ -14,6 +14,11 @@ public static class PictureStyle
     /// <summary>Share of the width that the legend may take from the subtitle.</summary>
     public const float LegendShare = 0.65f;
 
+    /// <summary>Left of a frame with numbers, with names, and with nothing.</summary>
+    public const float LabelRoom = 76;
+    public const float NameRoom = 190;
+    public const float NoRoom = 10;
+
     public const float TitleSize = 24;
     public const float SubtitleSize = 17;
     public const float LabelSize = 16;
@@ -44,6 +49,32 @@ public static class PictureStyle
         new(0x77, 0x58, 0x04),
         new(0x31, 0x38, 0x3B),
     ];
+
+    /// <summary>
+    /// The colours of a map from low to high: lightness falls all the way, so that grey print keeps the order, and hue turns from sand over
+    /// rust to plum, for eyes that can use it.
+    /// </summary>
+    private static readonly (double At, Rgb Colour)[] Shades =
+    [
+        (0, new(0xF6, 0xF3, 0xEA)),
+        (0.24, new(0xEC, 0xB8, 0x5C)),
+        (0.52, new(0xC2, 0x5B, 0x33)),
+        (0.78, new(0x70, 0x22, 0x4E)),
+        (1, new(0x1E, 0x0E, 0x36)),
+    ];
+
+    /// <summary>The colour of a map at a share of its range; beyond the ends the colour of the end.</summary>
+    public static Rgb ShadeAt(double share)
+    {
+        double at = Math.Clamp(share, 0, 1);
+        int upper = Math.Max(1, Array.FindIndex(Shades, shade => shade.At >= at));
+        (double from, Rgb low) = Shades[upper - 1];
+        (double to, Rgb high) = Shades[upper];
+        double weight = (at - from) / (to - from);
+        return new Rgb(Mix(low.Red, high.Red, weight), Mix(low.Green, high.Green, weight), Mix(low.Blue, high.Blue, weight));
+    }
+
+    private static byte Mix(byte low, byte high, double weight) => (byte)Math.Round(low + weight * (high - low));
 
     /// <summary>The colour of the series at a place; more series than colours begin again.</summary>
     public static Rgb LineAt(int index) => Lines[index % Lines.Count];

@@ -46,7 +46,7 @@ public static class ResultTables
     }
 
     /// <summary>Every spectrum of an operation has the same frequencies, so they are turned into text once.</summary>
-    private static byte[][] FrequenciesOf(FrequencyAxis axis)
+    internal static byte[][] FrequenciesOf(FrequencyAxis axis)
     {
         var texts = new byte[axis.Count][];
         for (int line = 0; line < texts.Length; line++)
@@ -57,7 +57,7 @@ public static class ResultTables
         return texts;
     }
 
-    private static void WriteSpectrum(CsvBytes csv, byte[] key, byte[][] hz, IReadOnlyList<Complex> values, string unit)
+    internal static void WriteSpectrum(CsvBytes csv, byte[] key, byte[][] hz, IReadOnlyList<Complex> values, string unit)
     {
         byte[] unitField = Encoding.UTF8.GetBytes(unit);
         for (int line = 0; line < hz.Length; line++)

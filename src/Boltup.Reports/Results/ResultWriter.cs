@@ -9,6 +9,8 @@ public static class ResultWriter
 {
     public const string ResponsesFile = "responses.csv";
     public const string JointForcesFile = "joint_forces.csv";
+    public const string ContributionsFile = "contributions.csv";
+    public const string ContributionLinesFile = "contribution_lines.csv";
     public const string SummaryFile = "summary.json";
 
     /// <summary>Writes data files, and pictures side by side with them, and replaces earlier results as a whole.</summary>
@@ -27,8 +29,23 @@ public static class ResultWriter
             () => output.Write(ResponsesFile, stream => ResultTables.WriteResponses(stream, result)),
             () => output.Write(JointForcesFile, stream => ResultTables.WriteJointForces(stream, result)),
             () => output.Write(SummaryFile, stream => SummaryJson.Write(stream, result, fingerprints, options.ProgramVersion)),
+            () => WritePaths(result, output, options),
             () => WritePictures(result, fingerprints, output, options));
         return output.Commit(diagnostics);
+    }
+
+    private static void WritePaths(PredictionResult result, OutputFolder output, ResultOptions options)
+    {
+        if (!result.Operations.Any(operation => operation.RankedPaths.Count > 0))
+        {
+            return;
+        }
+
+        output.Write(ContributionsFile, stream => PathTables.WriteContributions(stream, result));
+        if (options.PathLines)
+        {
+            output.Write(ContributionLinesFile, stream => PathTables.WriteLines(stream, result));
+        }
     }
 
     private static void WritePictures(

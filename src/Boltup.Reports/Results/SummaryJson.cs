@@ -22,6 +22,7 @@ public static class SummaryJson
         SharedJson.WriteAxis(json, result.Axis);
         WriteConditioning(json, result);
         WriteLevels(json, result);
+        PathJson.Write(json, result);
         DiagnosticJson.WriteList(json, result.Diagnostics);
         SharedJson.WriteInputs(json, inputs);
         json.WriteString("cautions", Cautions.Text);

@@ -18,10 +18,23 @@ public class PredictCommandTests
         string[] files = [.. Directory.EnumerateFiles(folder.PathTo("out")).Select(path => Path.GetFileName(path)!).Order(StringComparer.Ordinal)];
         Assert.Equal(
             [
-                ".boltup-files", "5400-rpm-driver-ear.png", "5400-rpm-floor.png", "5400-rpm-joint-forces.png", "5400-rpm-passenger-ear.png",
-                "5400-rpm-seat-rail.png", "5400-rpm-steering-column.png", "joint_forces.csv", "mount-base.png", "overview.png", "responses.csv", "summary.json",
+                ".boltup-files", "5400-rpm-driver-ear-paths.png", "5400-rpm-driver-ear.png", "5400-rpm-floor-paths.png", "5400-rpm-floor.png",
+                "5400-rpm-joint-forces.png", "5400-rpm-passenger-ear-paths.png", "5400-rpm-passenger-ear.png", "5400-rpm-seat-rail-paths.png",
+                "5400-rpm-seat-rail.png", "5400-rpm-steering-column-paths.png", "5400-rpm-steering-column.png", "contributions.csv", "joint_forces.csv", "mount-base.png", "overview.png", "responses.csv", "summary.json",
             ],
             files);
+    }
+
+    [Fact]
+    public void Predict_PathLines_WritesEveryContributionAndPrintsTheStrongest()
+    {
+        using var folder = new TemporaryFolder();
+        CommandRun run = CommandRun.Of("predict", Demo, "-o", folder.PathTo("out"), "--no-pictures", "--path-lines");
+        Assert.Contains("strongest path", run.Out, StringComparison.Ordinal);
+        Assert.Contains("rear left z 59.6", run.Out, StringComparison.Ordinal);
+
+        // A head, then 5 responses of 12 forces and 12 directions of joints at 197 lines.
+        Assert.Equal(1 + 5 * 24 * 197, File.ReadLines(folder.PathTo("out", "contribution_lines.csv")).Count());
     }
 
     [Fact]
