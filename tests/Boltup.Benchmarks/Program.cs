@@ -2,6 +2,7 @@ using System.Globalization;
 using BenchmarkDotNet.Running;
 using Boltup.Benchmarks.Files;
 using Boltup.Benchmarks.Kernels;
+using Boltup.Benchmarks.Paths;
 
 if (args is ["ratios", .. string[] orders])
 {
@@ -18,6 +19,12 @@ if (args is ["inverses"])
 if (args is ["files"])
 {
     FileRates.Run(Console.Out);
+    return;
+}
+
+if (args is ["paths"])
+{
+    PathTimes.Run(Console.Out);
     return;
 }
 

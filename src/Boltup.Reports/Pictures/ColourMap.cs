@@ -19,8 +19,7 @@ public sealed record ColourMap(IReadOnlyList<double> X, IReadOnlyList<IReadOnlyL
         double largest = double.NaN;
         for (int i = first; i < X.Count && X[i] < to; i++)
         {
-            // The first comparison with NaN takes the value whatever it is.
-            largest = Rows[row][i] <= largest ? largest : Rows[row][i];
+            largest = double.IsNaN(largest) || Rows[row][i] > largest ? Rows[row][i] : largest;
         }
 
         return double.IsNaN(largest) ? Rows[row][Nearest(first, (from + to) / 2)] : largest;

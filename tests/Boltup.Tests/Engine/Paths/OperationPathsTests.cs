@@ -1,5 +1,8 @@
 using System.Numerics;
 using Boltup.Engine.Coupling;
+using Boltup.Engine.Diagnostics;
+using Boltup.Engine.Geometry;
+using Boltup.Engine.Parts;
 using Boltup.Engine.Paths;
 using Boltup.Engine.Prediction;
 using Boltup.Engine.Spectra;
@@ -68,6 +71,24 @@ public class OperationPathsTests
         Near.Equal(operation.Responses[0].Values, operation.Paths(PathView.Joints).Sum(), Rounding);
     }
 
+    /// <summary>The interface problem scales rotations by a length: forces and moments must come out of it in N and N·m.</summary>
+    [Fact]
+    public void Of_RotationsJoined_SumsToTheResponseInBothViews()
+    {
+        PlacedPart[] parts = [Placed("source", 1), Placed("receiver", 2)];
+        Direction[] all = [Direction.X, Direction.Y, Direction.Z, Direction.RX, Direction.RY, Direction.RZ];
+        Joint joint = Joint.Rigid("flange", new JointEnd("source", "2"), new JointEnd("receiver", "1"), all);
+        Complex[] spectrum = [.. TwoSources.Axis.Hz.ToArray().Select(hz => new Complex(1, hz / 50))];
+        var forces = new ForceSet(ForceKind.Applied, "source", TwoSources.Axis, [Dof.Parse("1.z"), Dof.Parse("2.ry")], [spectrum, spectrum]);
+        var response = new Response("turning", "receiver", Dof.Parse("2.rx"), Quantity.Velocity);
+        var operation = new Operation("run", ForceSum.Phase, Amplitude.Rms, [forces]);
+        var assembly = new AssemblyModel("flange", TwoSources.Axis, parts, [joint], [operation], [response]);
+        OperationResult result = Predictor.Predict(assembly, new DiagnosticBag(), withPaths: true)!.Operations[0];
+        Assert.Equal(6, result.Paths(PathView.Joints).Paths.Count);
+        Near.Equal(result.Responses[0].Values, result.Paths(PathView.Joints).Sum(), Rounding);
+        Near.Equal(result.Responses[0].Values, result.Paths(PathView.Forces).Sum(), 1e-10);
+    }
+
     [Fact]
     public void Of_NothingJoined_IsTheDirectPath()
     {
@@ -112,4 +133,6 @@ public class OperationPathsTests
             },
             iter: 20);
     }
+
+    private static PlacedPart Placed(string name, int seed) => new(name, new InventedPart(seed), [], Rotation.None, Vector3d.Zero);
 }
