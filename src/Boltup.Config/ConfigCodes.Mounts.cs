@@ -20,7 +20,7 @@ public static partial class ConfigCodes
 
     public static readonly DiagnosticCode TooManyElements = new(
         "CFG112", "mount made of absurdly many elements",
-        "Mounts in series and parallel that are themselves made of others multiply quickly. Beyond 64 elements the cause is most likely a "
+        "Mounts in series and parallel that are themselves made of others multiply quickly. Beyond 16 elements the cause is most likely a "
             + "slip, and the computation would take long.",
         "a: { parallel: [soft, soft] }\nb: { parallel: [a, a] }  # and so on",
         "Use `like` with `scale` for many equal mounts side by side.");

@@ -6,7 +6,8 @@ namespace Boltup.Config.Documents;
 /// <summary>Checks that every name in an assembly names something, as far as documents without data can tell.</summary>
 internal sealed class AssemblyReferences(AssemblyDocument assembly, DiagnosticBag diagnostics)
 {
-    private const int MaximumElements = 64;
+    /// <summary>Composed mounts are evaluated element by element on the stack, which this keeps short.</summary>
+    private const int MaximumElements = 16;
 
     private readonly Dictionary<string, KnownNames?> _pointsByPart = assembly.Parts.ToDictionary(
         part => part.Name.Value, part => part.Document?.KnownPoints is { } points ? new KnownNames("point", points) : null);

@@ -13,8 +13,7 @@ internal static class BothEnds
     /// <param name="directions">Directions of the target; those that the mount has beyond them are left out.</param>
     public static void Add(MountLaw mount, IReadOnlyList<Direction> directions, FrequencyAxis axis, int tile, Span<double> target)
     {
-        Span<double> own = stackalloc double[LargestOrder * LargestOrder * Tiling.EntryLength];
-        own = own[..(mount.Order * mount.Order * Tiling.EntryLength)];
+        Span<double> own = stackalloc double[mount.Order * mount.Order * Tiling.EntryLength];
         mount.FillStiffness(axis, tile, own);
         for (int row = 0; row < 2 * directions.Count; row++)
         {

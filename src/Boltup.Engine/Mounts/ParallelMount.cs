@@ -36,10 +36,10 @@ public sealed class ParallelMount : MountLaw
             return;
         }
 
-        Span<double> sum = stackalloc double[BothEnds.LargestOrder * BothEnds.LargestOrder * Tiling.EntryLength];
+        int size = Directions.Count;
+        Span<double> sum = stackalloc double[4 * size * size * Tiling.EntryLength];
         sum.Clear();
         AddBothEnds(axis, tile, sum);
-        int size = Directions.Count;
         for (int i = 0; i < size * size; i++)
         {
             TileEntry.AddScaled(stiffness, i, sum, i / size * 2 * size + i % size, 1);

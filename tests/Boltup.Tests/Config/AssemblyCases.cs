@@ -57,8 +57,8 @@ internal static class AssemblyCases
         new("CFG110", Head + "mounts: { a: { stiffness: { x: 1 N/m }, relaxation: { stiffening: «0.5», time: 1 ms } } }\n", "at least 1"),
         new("CFG110", Head + "mounts: { a: { stiffness: { x: 1 N/m }, relaxation: { stiffening: 2, time: 1 ms, order: «1.5» } } }\n", "at most 1"),
         new("CFG111", Head + "mounts: { soft: { stiffness: { x: 1 N/m } }, b: { parallel: «[soft, b]» } }\n", "made of itself"),
-        new("CFG112", Head + "mounts: { a: { stiffness: { x: 1 N/m } }, b: { parallel: [a, a, a, a, a] }, c: { parallel: [b, b, b, b, b] }, "
-            + "«d»: { series: [c, c, c] } }\n", "64 elements"),
+        new("CFG112", Head + "mounts: { a: { stiffness: { x: 1 N/m } }, b: { parallel: [a, a, a, a, a] }, c: { parallel: [b, b, b] }, "
+            + "«d»: { series: [c, b] } }\n", "16 elements"),
         new("CFG054", Head + "responses: { r: { at: «ground.z» } }\n"),
         new("CFG054", Head + "joints: { j: { between: [ground, «ground»], rigid: [x] } }\n"),
         new("CFG055", "boltup: assembly/1\nparts: { body: { file: body.part.yaml, turned: { about: «[0, 0, 0]», by: 90 deg } } }\n"),

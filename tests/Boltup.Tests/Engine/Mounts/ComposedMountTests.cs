@@ -2,6 +2,7 @@ using System.Numerics;
 using Boltup.Engine.Mounts;
 using Boltup.Engine.Spectra;
 using Boltup.Tests.Support;
+using CsCheck;
 
 namespace Boltup.Tests.Engine.Mounts;
 
@@ -76,6 +77,58 @@ public class ComposedMountTests
         Assert.Equal((20, 400), new ParallelMount(mounts).Band);
         Assert.Equal((20, 400), new SeriesMount(mounts).Band);
         Assert.Null(new SeriesMount([Chain.Mount(1, 0), Chain.Mount(1, 0)]).Band);
+    }
+
+    /// <summary>Whatever is composed of elements that dissipate dissipates.</summary>
+    [Fact]
+    public void Composed_OfPassiveElements_IsPassive() =>
+        Composed(4).Sample(mount => Assert.Empty(MountPassivity.Offending(mount, FrequencyAxis.Even(20, 90, 11))), iter: 300);
+
+    /// <summary>As deep as a document may nest them, with the largest of all elements, on the small stack of a worker thread.</summary>
+    [Fact]
+    public void FillStiffness_SixteenNestedTwoPortsOfSixDirections_FitsASmallStack()
+    {
+        MountLaw mount = SixRods;
+        for (int i = 1; i < 16; i++)
+        {
+            mount = i % 2 == 0 ? new SeriesMount([SixRods, mount]) : new ParallelMount([SixRods, mount]);
+        }
+
+        Complex found = Complex.NaN;
+        var thread = new Thread(() => found = MountAt.Entry(mount, Hz), maxStackSize: 1 << 20);
+        thread.Start();
+        thread.Join();
+        Assert.True(Complex.IsFinite(found));
+    }
+
+    private static Gen<MountLaw> Composed(int depth)
+    {
+        Gen<MountLaw> element = Gen.OneOf(
+            Gen.Select(Gen.Double[1e4, 1e6], Gen.Double[0, 0.5]).Select(MountLaw (k, loss) => Chain.Mount(k, loss)),
+            Gen.Select(Gen.Double[1e4, 1e6], Gen.Double[1.1, 10]).Select(
+                MountLaw (k, d) => new RelaxingMount(Chain.Mount(k, 0), new Relaxation(d, 1e-3, 0.5))),
+            Gen.Select(Gen.Double[1e4, 1e6], Gen.Double[0.01, 0.5]).Select(
+                MountLaw (k, mass) => new Rod(k, mass, 0.05).Mount(FrequencyAxis.Even(20, 90, 11))));
+        return depth == 0
+            ? element
+            : Gen.OneOf(
+                element,
+                Gen.Select(Composed(depth - 1), Composed(depth - 1)).Select(MountLaw (a, b) => new ParallelMount([a, b])),
+                Gen.Select(Composed(depth - 1), Composed(depth - 1)).Select(MountLaw (a, b) => new SeriesMount([a, b])));
+    }
+
+    private static TwoPortMount SixRods
+    {
+        get
+        {
+            FrequencyAxis axis = FrequencyAxis.FromHertz([Hz]);
+            (Complex driving, Complex transfer) = new Rod(4e5, 0.1, 0.06).Terms(Hz);
+            return new TwoPortMount(Enum.GetValues<Direction>().Where(direction => direction <= Direction.RZ).Select(direction => new TwoPortTable(
+                new StiffnessTable(direction, axis, [driving]),
+                new StiffnessTable(direction, axis, [transfer]),
+                new StiffnessTable(direction, axis, [transfer]),
+                new StiffnessTable(direction, axis, [driving]))));
+        }
     }
 
     private static DiagonalMount Spring(Direction direction, double stiffness) => new([new SpringDamper(direction, stiffness, 0, 0)]);
