@@ -20,17 +20,18 @@ public static class ContactOfAssembly
         AssemblyModel units = installed.Assembly with
         {
             Axis = axis,
-            Operations = [.. dofs.Select(dof => UnitForce(installed.Source, axis, dof))],
+            Operations = [.. dofs.Select((_, unit) => UnitForce(installed.Source, axis, dofs, unit))],
             Responses = [],
         };
         return Predictor.Predict(units, diagnostics) is { } prediction ? Read(prediction, installed, dofs, axis) : null;
     }
 
-    private static Operation UnitForce(string part, FrequencyAxis axis, Dof dof)
+    /// <summary>One at a dof, and zero at all others: nothing is left to be assumed.</summary>
+    private static Operation UnitForce(string part, FrequencyAxis axis, IReadOnlyList<Dof> dofs, int unit)
     {
-        var ones = new Complex[axis.Count];
-        Array.Fill(ones, Complex.One);
-        return new Operation(dof.ToString(), ForceSum.Phase, Amplitude.Rms, [new ForceSet(ForceKind.Blocked, part, axis, [dof], [ones])]);
+        Complex[][] spectra = [.. dofs.Select(_ => new Complex[axis.Count])];
+        Array.Fill(spectra[unit], Complex.One);
+        return new Operation(dofs[unit].ToString(), ForceSum.Phase, Amplitude.Rms, [new ForceSet(ForceKind.Blocked, part, axis, dofs, spectra)]);
     }
 
     private static TiledMatrix Read(PredictionResult prediction, InstalledSource installed, IReadOnlyList<Dof> dofs, FrequencyAxis axis)

@@ -7,6 +7,10 @@ internal sealed record CsvHeader(string Text, string Format, FunctionKind Kind, 
 
     public static readonly CsvHeader Spectrum = new("dof,frequency_hz,real,imag", "CSV of spectra", FunctionKind.Spectrum, 1);
 
+    /// <summary>Auto and cross spectra: the row dof times the conjugate of the column dof.</summary>
+    public static readonly CsvHeader CrossSpectra = new(
+        "row,column,frequency_hz,real,imag", "CSV of auto and cross spectra", FunctionKind.CrossSpectrum, 2);
+
     public static readonly CsvHeader Stiffness = new(
         "direction,frequency_hz,real,imag", "CSV of dynamic stiffness", FunctionKind.MountStiffness, 1);
 
@@ -21,7 +25,7 @@ internal sealed record CsvHeader(string Text, string Format, FunctionKind Kind, 
     public static readonly CsvHeader TwoPortFamily = new(
         "at,term,direction,frequency_hz,real,imag", "CSV of dynamic stiffness", FunctionKind.MountStiffness, 3);
 
-    public static IReadOnlyList<CsvHeader> All { get; } = [Frf, Spectrum, Stiffness, StiffnessFamily, TwoPort, TwoPortFamily];
+    public static IReadOnlyList<CsvHeader> All { get; } = [Frf, Spectrum, CrossSpectra, Stiffness, StiffnessFamily, TwoPort, TwoPortFamily];
 
     /// <summary>What each name column holds.</summary>
     public IReadOnlyList<CsvName> Names { get; } = [.. Text.Split(',').Take(NameColumns).Select(CsvName.Of)];

@@ -66,7 +66,7 @@ internal sealed class CsvTable(CsvHeader header, string displayPath, DiagnosticB
         Values.Add([.. curve.Values]);
         bool isStiffness = header.Kind == FunctionKind.MountStiffness;
         Dof first = DofOf(curve.Names[isStiffness ? ^1 : 0]);
-        Dof? second = header.Kind == FunctionKind.Frf ? DofOf(curve.Names[1]) : null;
+        Dof? second = header.Kind is FunctionKind.Frf or FunctionKind.CrossSpectrum ? DofOf(curve.Names[1]) : null;
         return new Curve
         {
             Index = index,

@@ -12,6 +12,9 @@ public sealed class IdentifyCommandTests : IDisposable
 {
     private static readonly string Truth = Repository.Data("case1", "truth", "response.csv");
 
+    private static readonly string Clean = Repository.Data("bench", "clean.bench.yaml");
+    private static readonly string Noisy = Repository.PathTo("configs", "supplier.bench.yaml");
+
     private readonly TemporaryFolder _folder = new();
 
     public void Dispose() => _folder.Dispose();
@@ -20,9 +23,9 @@ public sealed class IdentifyCommandTests : IDisposable
     [Fact]
     public void Identify_CleanBench_TransfersToTheVehicle()
     {
-        CommandRun run = Identify("clean.bench.yaml");
+        CommandRun run = Identify(Clean);
         Assert.Equal(0, run.ExitCode);
-        Dictionary<string, Complex[]> predicted = PredictVehicle();
+        Dictionary<string, Complex[]> predicted = PredictVehicle("running");
         foreach ((string dof, Complex[] truth) in CsvSpectra.Read(Truth, "dof"))
         {
             Near.Equal(truth, predicted[dof], 1e-5);
@@ -33,8 +36,8 @@ public sealed class IdentifyCommandTests : IDisposable
     [Fact]
     public void Identify_NoisyBench_TransfersWithinTwoPercent()
     {
-        Assert.Equal(0, Identify("noisy.bench.yaml").ExitCode);
-        Dictionary<string, Complex[]> predicted = PredictVehicle();
+        Assert.Equal(0, Identify(Noisy).ExitCode);
+        Dictionary<string, Complex[]> predicted = PredictVehicle("5400 rpm");
         foreach ((string dof, Complex[] truth) in CsvSpectra.Read(Truth, "dof"))
         {
             Assert.InRange(Near.RelativeError(truth, predicted[dof]), 1e-4, 0.02);
@@ -43,13 +46,16 @@ public sealed class IdentifyCommandTests : IDisposable
         }
 
         using JsonDocument summary = JsonDocument.Parse(File.ReadAllText(_folder.PathTo("out", "summary.json")));
-        Assert.InRange(summary.RootElement.GetProperty("validations")[0].GetProperty("relative_error").GetDouble(), 1e-4, 5e-3);
+        JsonElement validations = summary.RootElement.GetProperty("validations");
+        Assert.InRange(validations[0].GetProperty("relative_error").GetDouble(), 1e-4, 5e-3);
+        Assert.Equal("transfer", validations[1].GetProperty("check").GetString());
+        Assert.InRange(validations[1].GetProperty("relative_error").GetDouble(), 1e-4, 0.02);
     }
 
     [Fact]
     public void Identify_CleanBench_SaysWhichCheckWasMade()
     {
-        CommandRun run = Identify("clean.bench.yaml");
+        CommandRun run = Identify(Clean);
         Assert.Contains("on-board validation at 6 dofs that took no part", run.Out, StringComparison.Ordinal);
         Assert.Contains("does not show that the forces hold on another receiver", run.Out, StringComparison.Ordinal);
         using JsonDocument summary = JsonDocument.Parse(File.ReadAllText(_folder.PathTo("out", "summary.json")));
@@ -62,7 +68,7 @@ public sealed class IdentifyCommandTests : IDisposable
     [Fact]
     public void Identify_OtherRoutes_AreComparedUnderTheirOwnNames()
     {
-        Identify("clean.bench.yaml");
+        Identify(Clean);
         using JsonDocument summary = JsonDocument.Parse(File.ReadAllText(_folder.PathTo("out", "summary.json")));
         Dictionary<string, JsonElement> routes = summary.RootElement.GetProperty("routes").EnumerateArray().ToDictionary(route => route.GetProperty("name").GetString()!);
         Assert.Equal("blocked forces", routes["hung free"].GetProperty("finds").GetString());
@@ -75,7 +81,7 @@ public sealed class IdentifyCommandTests : IDisposable
     [Fact]
     public void Identify_BenchAsAssembly_PredictsTheMeasuredContactForces()
     {
-        Identify("clean.bench.yaml");
+        Identify(Clean);
         Dictionary<string, double[]> ratios = CsvSpectra.ReadReal(_folder.PathTo("out", "bench_stiffness.csv"), "dof", "contact_to_blocked_db");
         Dictionary<string, Complex[]> blocked = CsvSpectra.Read(_folder.PathTo("out", "blocked_forces", "running.csv"), "dof");
         foreach ((string dof, Complex[] contact) in CsvSpectra.Read(Repository.Data("bench", "bench_contact_true.csv"), "dof"))
@@ -90,7 +96,7 @@ public sealed class IdentifyCommandTests : IDisposable
     [Fact]
     public void Identify_UniversalFileAsked_WritesTheSameForces()
     {
-        Identify("clean.bench.yaml", "--uff");
+        Identify(Clean, "--uff");
         File.WriteAllText(_folder.PathTo("vehicle.assembly.yaml"), Vehicle("out/blocked_forces/running.uff, part: compressor"));
         Dictionary<string, Complex[]> fromUniversal = Predict();
         File.WriteAllText(_folder.PathTo("vehicle.assembly.yaml"), Vehicle("out/blocked_forces/running.csv, part: compressor"));
@@ -100,9 +106,9 @@ public sealed class IdentifyCommandTests : IDisposable
     [Fact]
     public void Identify_Twice_GivesTheSameBytes()
     {
-        Identify("noisy.bench.yaml");
+        Identify(Noisy);
         Directory.Move(_folder.PathTo("out"), _folder.PathTo("first"));
-        Identify("noisy.bench.yaml");
+        Identify(Noisy);
         foreach (string file in Directory.EnumerateFiles(_folder.PathTo("first"), "*", SearchOption.AllDirectories))
         {
             Assert.Equal(File.ReadAllBytes(file), File.ReadAllBytes(file.Replace(_folder.PathTo("first"), _folder.PathTo("out"), StringComparison.Ordinal)));
@@ -110,11 +116,11 @@ public sealed class IdentifyCommandTests : IDisposable
     }
 
     private CommandRun Identify(string bench, params string[] more) =>
-        CommandRun.Of(["identify", Repository.Data("bench", bench), "-o", _folder.PathTo("out"), "--no-pictures", .. more]);
+        CommandRun.Of(["identify", bench, "-o", _folder.PathTo("out"), "--no-pictures", .. more]);
 
-    private Dictionary<string, Complex[]> PredictVehicle()
+    private Dictionary<string, Complex[]> PredictVehicle(string operation)
     {
-        File.WriteAllText(_folder.PathTo("vehicle.assembly.yaml"), Vehicle("out/source.forces.yaml, operation: running, part: compressor"));
+        File.WriteAllText(_folder.PathTo("vehicle.assembly.yaml"), Vehicle($"out/source.forces.yaml, operation: {operation}, part: compressor"));
         return Predict();
     }
 

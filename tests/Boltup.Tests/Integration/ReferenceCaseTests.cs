@@ -53,7 +53,7 @@ public class ReferenceCaseTests
     public void BlockedForces_OnTheBodyAlone_AreWrong() => AssertWrong(BodyAlone.Value, "blocked");
 
     [Fact]
-    public void ContactForcesOfTheBench_OnTheBodyAlone_AreWrong() => AssertWrong(BodyAlone.Value, "bench contact");
+    public void ContactForcesOfTheBench_OnTheBodyAlone_AreWrong() => AssertWrong(BodyAlone.Value, "bench contact", 0.4);
 
     /// <summary>
     /// The whole vehicle turned by a quarter about z and moved: a stiffness along x is then one along y, while a vertical acceleration and
@@ -110,8 +110,8 @@ public class ReferenceCaseTests
         }
     }
 
-    private static void AssertWrong(PredictionResult result, string operation) =>
-        Assert.True(Near.RelativeError(Truth("response"), Responses(result, operation)) > 0.1);
+    private static void AssertWrong(PredictionResult result, string operation, double least = 0.1) =>
+        Assert.True(Near.RelativeError(Truth("response"), Responses(result, operation)) > least);
 
     /// <summary>All spectra of a truth file, one after the other in the order of the file.</summary>
     private static Complex[] Truth(string name)

@@ -19,7 +19,7 @@ internal static class BenchData
 
     /// <summary>FRFs of a file in Data/bench as receptances; coherences as real parts.</summary>
     public static FrfMatrix Frf(string file, IReadOnlyList<Dof> rows, IReadOnlyList<Dof> columns) =>
-        FrfAt(Repository.Data("bench", file), rows, columns);
+        FrfAt(PathOf(file), rows, columns);
 
     /// <summary>The free compressor of the demo, whose interface is 101–104.</summary>
     public static FrfMatrix FreeCompressor() => FrfAt(Repository.PathTo("examples", "minibus", "compressor.unv"), Interface, Interface);
@@ -27,10 +27,22 @@ internal static class BenchData
     /// <summary>Spectra of a file in Data/bench; motion becomes displacement.</summary>
     public static SpectrumSet Spectra(string file, IReadOnlyList<Dof> dofs)
     {
-        using DataFile data = Open(Repository.Data("bench", file));
+        using DataFile data = Open(PathOf(file));
         Curve[] curves = [.. dofs.Select(dof => data.Curves.Single(curve => curve.Response == dof))];
         return new SpectrumSet(curves[0].Axis, dofs, [.. curves.Select(curve => Read(data, curve))]);
     }
+
+    /// <summary>The noisy set and the bench alone belong to the example.</summary>
+    private static string PathOf(string file) => file switch
+    {
+        "bench_insitu_noisy.unv" => Example("bench.unv"),
+        "bench_insitu_coherence.unv" => Example("bench_coherence.unv"),
+        "bench_operation_noisy.unv" => Example("bench_5400rpm.unv"),
+        "bench_free.unv" => Example("bench_alone.unv"),
+        _ => Repository.Data("bench", file),
+    };
+
+    private static string Example(string file) => Repository.PathTo("examples", "supplier", file);
 
     private static FrfMatrix FrfAt(string path, IReadOnlyList<Dof> rows, IReadOnlyList<Dof> columns)
     {

@@ -47,6 +47,28 @@ internal sealed class BenchFolder : IDisposable
 
     public static string SpectrumTable(string[] dofs, int seed) => Table("dof", dofs, seed);
 
+    /// <summary>Auto and cross spectra of some mechanisms, each the spectrum of a seed, of the pairs that are asked for.</summary>
+    public static string CrossTable(Func<int, int, bool> isGiven, params int[] seeds)
+    {
+        Complex[][][] mechanisms = [.. seeds.Select(seed =>
+        {
+            var random = new Random(seed);
+            return Sensors.Select(_ => Hz.Select(_ => new Complex(random.NextDouble() - 0.5, random.NextDouble() - 0.5)).ToArray()).ToArray();
+        })];
+        var text = new StringBuilder("row,column,frequency_hz,real,imag\n");
+        for (int i = 0; i < Sensors.Length * Sensors.Length * Hz.Length; i++)
+        {
+            int row = i / Hz.Length / Sensors.Length, column = i / Hz.Length % Sensors.Length, line = i % Hz.Length;
+            Complex sum = mechanisms.Aggregate(Complex.Zero, (total, each) => total + each[row][line] * Complex.Conjugate(each[column][line]));
+            if (isGiven(row, column))
+            {
+                text.Append(CultureInfo.InvariantCulture, $"{Sensors[row]},{Sensors[column]},{Hz[line]},{sum.Real},{sum.Imaginary}\n");
+            }
+        }
+
+        return text.ToString();
+    }
+
     public BenchPlan? Plan()
     {
         Write("a.bench.yaml", Yaml);

@@ -115,6 +115,51 @@ public sealed class BenchPlannerTests : IDisposable
         Assert.Equal(EngineCodes.FewRuns, Assert.Single(_bench.Diagnostics.Items).Code);
     }
 
+    /// <summary>Either half of the matrix is enough, and the columns add up to it.</summary>
+    [Theory]
+    [InlineData(false)]
+    [InlineData(true)]
+    public void Plan_CrossSpectra_BecomeColumnsThatAddUpToThem(bool isUpperHalf)
+    {
+        _bench.Write("cross.csv", BenchFolder.CrossTable((row, column) => isUpperHalf ? column >= row : column <= row, 1, 2));
+        _bench.Replace("file: run.csv", "cross_spectra: cross.csv");
+        using BenchPlan? plan = _bench.Plan();
+        Assert.NotNull(plan);
+        BenchOperation operation = plan.Bench.Operations[0];
+        Assert.Equal(PhaseReference.Free, operation.Phase);
+        Assert.All(SpectralRank.Of(operation.Columns), rank => Assert.Equal(2, rank));
+        IdentificationResult result = Identifier.Run(plan.Bench, new DiagnosticBag())!;
+        Assert.All(SpectralRank.Of(result.Operations[0].Forces), rank => Assert.InRange(rank, 1, 2));
+    }
+
+    [Fact]
+    public void Plan_CrossSpectraThatAreNotHermitian_AreAnError()
+    {
+        string table = BenchFolder.CrossTable((_, _) => true, 1);
+        int at = table.IndexOf("s1.z,s2.z,110,", StringComparison.Ordinal) + "s1.z,s2.z,110,".Length;
+        _bench.Write("cross.csv", table[..at] + "7" + table[table.IndexOf(',', at)..]);
+        _bench.Replace("file: run.csv", "cross_spectra: cross.csv");
+        Expect(EngineCodes.SpectraNotHermitian, "`s1.z` and `s2.z` do not fit each other or their auto spectra at 110 Hz");
+    }
+
+    [Fact]
+    public void Plan_NegativeAutoSpectrum_IsAnError()
+    {
+        string table = BenchFolder.CrossTable((_, _) => true, 1);
+        int at = table.IndexOf("s3.z,s3.z,120,", StringComparison.Ordinal) + "s3.z,s3.z,120,".Length;
+        _bench.Write("cross.csv", table[..at] + "-" + table[at..]);
+        _bench.Replace("file: run.csv", "cross_spectra: cross.csv");
+        Expect(EngineCodes.SpectraNotHermitian, "120 Hz");
+    }
+
+    [Fact]
+    public void Plan_MissingCrossSpectrum_IsAnErrorThatNamesThePair()
+    {
+        _bench.Write("cross.csv", BenchFolder.CrossTable((row, column) => row + column != 1, 1));
+        _bench.Replace("file: run.csv", "cross_spectra: cross.csv");
+        Expect(PlanCodes.OtherSensors, "lacks 2 of 16");
+    }
+
     private void Expect(DiagnosticCode code, string words)
     {
         using BenchPlan? plan = _bench.Plan();
