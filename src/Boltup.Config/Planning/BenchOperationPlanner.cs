@@ -15,7 +15,7 @@ internal sealed class BenchOperationPlanner(DataLibrary library, PointNames name
     {
         if (document.IsCrossSpectra)
         {
-            return new CrossSpectraPlanner(library, names, diagnostics).Plan(document, sensors);
+            return PlanCrossSpectra(document, sensors);
         }
 
         var planner = new SpectraPlanner(library, names, diagnostics);
@@ -35,6 +35,20 @@ internal sealed class BenchOperationPlanner(DataLibrary library, PointNames name
                 columns,
                 runs.Length == 1 ? null : (SpectrumSet[])runs!)
             { Origin = document.Name.Span };
+    }
+
+    private BenchOperation? PlanCrossSpectra(BenchSpectraDocument document, IReadOnlyList<Dof> sensors)
+    {
+        int OrderOf(Dof dof, Quantity inFile) => !dof.IsMotion ? 0 : FrfQuantity.DerivativeOrder(
+            inFile is Quantity.Displacement or Quantity.Velocity or Quantity.Acceleration ? inFile : document.Motion?.Value ?? Quantity.Acceleration);
+        var planner = new CrossSpectraPlanner(library, names.Resolve, OrderOf, diagnostics);
+        return planner.Read(document.Files[0], sensors) is { } columns
+            ? new BenchOperation(document.Name.Value, AmplitudeOf(document, inFile: null), PhaseReference.Free, columns)
+            {
+                Origin = document.Name.Span,
+                IsDensity = planner.IsDensity,
+            }
+            : null;
     }
 
     private IReadOnlyList<SpectrumSet>? Average(BenchSpectraDocument document, SpectrumSet[] runs)

@@ -16,13 +16,15 @@ internal sealed class ForcePlanner(AssemblyDocument assembly, DataLibrary librar
     public Operation? Plan(OperationDocument document)
     {
         Amplitude? stated = document.Amplitude?.Value;
-        var sets = new List<ForceSet>();
-        foreach (ForceDocument forces in document.Forces)
+        ForceSet[]?[] read = [.. document.Forces.Select(forces => ReadSets(forces, ref stated))];
+        bool isFree = read.Any(sets => sets?.Length > 1);
+        if (isFree && document.Forces.Count > 1 && document.Sum == ForceSum.Phase)
         {
-            if (ReadSet(forces, ref stated) is { } set)
-            {
-                sets.Add(set);
-            }
+            diagnostics.Error(
+                PlanCodes.PhaseUnknown,
+                $"operation `{document.Name}` adds forces in phase, and auto and cross spectra have no phase reference",
+                document.Name.Span,
+                "say `sum: energy`");
         }
 
         if (stated is null)
@@ -34,12 +36,15 @@ internal sealed class ForcePlanner(AssemblyDocument assembly, DataLibrary librar
                 "say `amplitude: rms` or `amplitude: peak`");
         }
 
-        return sets.Count < document.Forces.Count
+        return read.Contains(null)
             ? null
-            : new Operation(document.Name.Value, document.Sum, stated ?? Amplitude.Rms, sets) { Origin = document.Name.Span };
+            : new Operation(
+                document.Name.Value, isFree ? ForceSum.Energy : document.Sum, stated ?? Amplitude.Rms, [.. read.SelectMany(sets => sets!)])
+            { Origin = document.Name.Span };
     }
 
-    private ForceSet? ReadSet(ForceDocument document, ref Amplitude? stated)
+    /// <summary>One set, or one for each principal component where there is no phase reference: powers add.</summary>
+    private ForceSet[]? ReadSets(ForceDocument document, ref Amplitude? stated)
     {
         if (library.Open(document.DataFile) is not { } file)
         {
@@ -47,6 +52,11 @@ internal sealed class ForcePlanner(AssemblyDocument assembly, DataLibrary librar
         }
 
         stated ??= document.HandoverOperation?.Amplitude;
+
+        if (CrossSpectraPlanner.Recognises(file))
+        {
+            return ReadCrossSpectra(document);
+        }
 
         Curve[] curves = [.. file.Curves.Where(curve => curve is { Kind: FunctionKind.Spectrum, Response: not null })];
         if (curves.Length == 0)
@@ -60,7 +70,7 @@ internal sealed class ForcePlanner(AssemblyDocument assembly, DataLibrary librar
         }
 
         stated ??= curves.Select(curve => curve.Amplitude).FirstOrDefault(amplitude => amplitude is not null);
-        return AreForces(curves) && ShareAxis(curves) ? Read(document, file, curves) : null;
+        return AreForces(curves) && ShareAxis(curves) && Read(document, file, curves) is { } set ? [set] : null;
     }
 
     private bool AreForces(Curve[] curves)
@@ -96,9 +106,36 @@ internal sealed class ForcePlanner(AssemblyDocument assembly, DataLibrary librar
         return other is null;
     }
 
+    private ForceSet[]? ReadCrossSpectra(ForceDocument document)
+    {
+        PointNames names = NamesOf(document);
+        var planner = new CrossSpectraPlanner(library, dof => names.Resolve(dof) ?? dof, (_, _) => 0, diagnostics);
+        if (planner.Read(document.DataFile, wanted: null) is not { } columns)
+        {
+            return null;
+        }
+
+        CheckHandover(document, columns[0].Axis);
+        return [.. columns.Select(column => new ForceSet(document.Kind, document.Part.Value, column.Axis, column.Dofs, column.Values)
+        {
+            Origin = document.File.Span,
+        })];
+    }
+
+    private PointNames NamesOf(ForceDocument document) =>
+        new(assembly.FindPart(document.Part.Value)!.Document!.Points, new DiagnosticBag());
+
+    private void CheckHandover(ForceDocument document, FrequencyAxis axis)
+    {
+        if (document.Handover is { } handover)
+        {
+            new HandoverCheck(assembly, document, handover, diagnostics).Run(axis);
+        }
+    }
+
     private ForceSet? Read(ForceDocument document, DataFile file, Curve[] curves)
     {
-        var names = new PointNames(assembly.FindPart(document.Part.Value)!.Document!.Points, new DiagnosticBag());
+        PointNames names = NamesOf(document);
         var spectra = new List<Complex[]>();
         foreach (Curve curve in curves)
         {
@@ -111,10 +148,7 @@ internal sealed class ForcePlanner(AssemblyDocument assembly, DataLibrary librar
             spectra.Add(values);
         }
 
-        if (document.Handover is { } handover)
-        {
-            new HandoverCheck(assembly, document, handover, diagnostics).Run(curves[0].Axis);
-        }
+        CheckHandover(document, curves[0].Axis);
 
         // A file names dofs by node or by the part's own point names.
         return new ForceSet(

@@ -68,4 +68,11 @@ public static partial class PlanCodes
             + "noise with the look of a spectrum.",
         "holds: { from: 50 Hz, to: 800 Hz }, and the assembly is computed up to 2000 Hz",
         "Restrict `frequencies` to the band, or ask the supplier for forces over a wider one.");
+
+    public static readonly DiagnosticCode PhaseUnknown = new(
+        "PLN029",
+        "forces without a phase reference cannot be added in phase",
+        "Auto and cross spectra say how forces of one source belong together, not how they lie in time to the forces of another file.",
+        "blocked_forces: [{ file: fan.csv, part: fan }, { file: road.csv, part: axle }]  # road.csv holds row,column,…",
+        "Say `sum: energy` in the operation.");
 }

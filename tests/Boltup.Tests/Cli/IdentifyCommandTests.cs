@@ -1,5 +1,8 @@
 using System.Numerics;
 using System.Text.Json;
+using Boltup.Engine.Diagnostics;
+using Boltup.Files;
+using Boltup.Files.Csv;
 using Boltup.Tests.Support;
 
 namespace Boltup.Tests.Cli;
@@ -93,6 +96,26 @@ public sealed class IdentifyCommandTests : IDisposable
         }
     }
 
+    /// <summary>
+    /// Two runs without a common phase, one the spectra of the bench and one twice as strong in other phases: the cabin gets √((1 + 4)/2) times
+    /// the magnitude, through G_ff in the handover.
+    /// </summary>
+    [Fact]
+    public void Identify_RunsWithFreePhase_TransferAsCrossSpectra()
+    {
+        string bench = File.ReadAllText(Clean).Replace("file: bench_operation_clean.unv", $"runs: [{Repository.Data("bench", "bench_operation_clean.unv")}, twice.csv], phase: free, quantity: acceleration", StringComparison.Ordinal);
+        bench = bench[..bench.IndexOf("model:", StringComparison.Ordinal)].Replace("bench_insitu", Repository.Data("bench", "bench_insitu"), StringComparison.Ordinal);
+        string path = _folder.Write("free.bench.yaml", bench);
+        _folder.Write("twice.csv", Turned(Repository.Data("bench", "bench_operation_clean.unv"), new Complex(1.2, 1.6)));
+        CommandRun run = CommandRun.Of("identify", path, "-o", _folder.PathTo("out"), "--no-pictures", "--allow-outside");
+        Assert.True(run.ExitCode == 0, run.Error);
+        Dictionary<string, Complex[]> predicted = PredictVehicle("running");
+        foreach ((string dof, Complex[] truth) in CsvSpectra.Read(Truth, "dof"))
+        {
+            Near.Equal([.. truth.Select(value => (Complex)(Math.Sqrt(2.5) * value.Magnitude))], predicted[dof], 1e-4);
+        }
+    }
+
     [Fact]
     public void Identify_UniversalFileAsked_WritesTheSameForces()
     {
@@ -122,6 +145,20 @@ public sealed class IdentifyCommandTests : IDisposable
     {
         File.WriteAllText(_folder.PathTo("vehicle.assembly.yaml"), Vehicle($"out/source.forces.yaml, operation: {operation}, part: compressor"));
         return Predict();
+    }
+
+    /// <summary>The spectra of a file, multiplied, as a CSV.</summary>
+    private static string Turned(string path, Complex factor)
+    {
+        using DataFile file = DataFile.Open(path, path, new DiagnosticBag())!;
+        using var text = new StringWriter();
+        CsvWriter.WriteSpectra(text, file.Curves[0].Axis, file.Curves.Select(curve =>
+        {
+            var values = new Complex[curve.Axis.Count];
+            file.ReadSpectrum(curve, values, new DiagnosticBag());
+            return (curve.Response!, values.Select(value => factor * value).ToArray());
+        }));
+        return text.ToString();
     }
 
     private static string Vehicle(string forces) => $$"""
