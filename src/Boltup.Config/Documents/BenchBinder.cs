@@ -19,6 +19,7 @@ internal sealed class BenchBinder(DiagnosticBag diagnostics)
             root["title"]?.MarkedText(),
             root["frequencies"] is YamlMap frequencies ? FrequencyBinder.Bind(frequencies, diagnostics) : null,
             [.. root["points"].Entries().Select(point => PointBinder.Bind(point, diagnostics))],
+            VirtualPointBinder.Bind(root["virtual_points"], diagnostics),
             BindNames(@interface["points"]),
             [.. @interface["directions"].Items().Select(item => item.Direction())],
             @interface["mounts_belong_to"]?.Text() is { } side ? side == "source" : null,

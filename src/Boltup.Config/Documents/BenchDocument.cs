@@ -14,6 +14,7 @@ public sealed record BenchDocument(
     Marked<string>? Title,
     FrequencyDocument? Frequencies,
     IReadOnlyList<PointDocument> Points,
+    IReadOnlyList<VirtualPointDocument> VirtualPoints,
     IReadOnlyList<Marked<string>> Interface,
     IReadOnlyList<Marked<Direction>> Directions,
     bool? MountsBelongToSource,
@@ -26,5 +27,7 @@ public sealed record BenchDocument(
     BenchModelDocument? Model,
     IReadOnlyList<RouteDocument> Routes)
 {
-    public PointDocument? FindPoint(string name) => Points.FirstOrDefault(point => point.Name.Value == name);
+    /// <summary>A point of this name, listed or virtual.</summary>
+    public PointDocument? FindPoint(string name) =>
+        Points.Concat(VirtualPoints.Select(point => point.AsPoint)).FirstOrDefault(point => point.Name.Value == name);
 }

@@ -8,12 +8,13 @@ namespace Boltup.Config.Documents;
 /// <summary>Checks that the names within a bench file agree.</summary>
 internal sealed class BenchReferences(BenchDocument bench, DiagnosticBag diagnostics)
 {
-    private readonly KnownNames _points = new("point", bench.Points.Select(point => point.Name.Value));
+    private readonly KnownNames _points = new("point", bench.Points.Select(point => point.Name.Value).Concat(bench.VirtualPoints.Select(point => point.Name.Value)));
     private readonly KnownNames _operations = new("operation", bench.Operations.Select(operation => operation.Name.Value));
 
     public void Check()
     {
         PointNodes.Check(bench.Points, diagnostics);
+        VirtualPointBinder.Check(bench.VirtualPoints, bench.Points, diagnostics);
         foreach (Marked<string> name in bench.Interface.Concat(bench.Indicators).Concat(bench.Validation).Concat(bench.Second?.Sensors ?? []))
         {
             _points.Check(name.Value, name.Span, diagnostics);

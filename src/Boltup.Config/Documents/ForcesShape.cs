@@ -36,7 +36,7 @@ public static class ForcesShape
         new("sign", new TextKind("a convention"), "what a positive force is"),
         new("mounts_belong_to", new ChoiceKind("source", "receiver"),
             "whether the forces act below the mounts, which are then part of the source, or above them"),
-        new("points", new NamedKind("point", new ShapeKind(PartShape.Point), IsDotted: true, Minimum: 1), "where they act", IsRequired: true),
+        new("points", new NamedKind("point", new ShapeKind(SharedKinds.Point), IsDotted: true, Minimum: 1), "where they act", IsRequired: true),
         new("directions", new ListKind(SharedKinds.MotionDirection, IsSet: true), "in which directions, along the axes of each point", IsRequired: true),
         new("holds", new ShapeKind(Holds), "the band in which they hold", IsRequired: true),
         new("operations", new NamedKind("operation", new ShapeKind(Operation), Minimum: 1), "the forces", IsRequired: true),

@@ -13,7 +13,8 @@ internal sealed class PartBinder(DiagnosticBag diagnostics)
         root["title"]?.MarkedText(),
         [.. root["points"].Entries().Select(point => PointBinder.Bind(point, diagnostics))],
         root["lumped"] is YamlMap lumped ? BindLumped(lumped) : BindFrf(root["frf"]!),
-        root["reciprocity"] is YamlNode fill ? new(true, fill.Span) : null);
+        root["reciprocity"] is YamlNode fill ? new(true, fill.Span) : null,
+        VirtualPointBinder.Bind(root["virtual_points"], diagnostics));
 
     private static FrfModelDocument BindFrf(YamlNode files) => new([.. files.Items().Cast<YamlMap>().Select(FrfFileBinder.Bind)]);
 

@@ -11,13 +11,17 @@ public sealed record PartDocument(
     Marked<string>? Title,
     IReadOnlyList<PointDocument> Points,
     PartModelDocument Model,
-    Marked<bool>? FillsReciprocity)
+    Marked<bool>? FillsReciprocity,
+    IReadOnlyList<VirtualPointDocument> VirtualPoints)
 {
+    /// <summary>Listed points, then virtual ones.</summary>
+    public IEnumerable<PointDocument> AllPoints => Points.Concat(VirtualPoints.Select(point => point.AsPoint));
+
     /// <summary>Names of all points as far as the document tells, or null when only the data know them.</summary>
     public IReadOnlyList<string>? KnownPoints => Model switch
     {
         LumpedModelDocument lumped => [.. lumped.Masses.Select(mass => mass.Point.Value)],
-        _ when Points.Count > 0 => [.. Points.Select(point => point.Name.Value)],
+        _ when Points.Count > 0 => [.. AllPoints.Select(point => point.Name.Value)],
         _ => null,
     };
 }

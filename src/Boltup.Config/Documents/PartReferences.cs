@@ -9,6 +9,7 @@ internal static class PartReferences
     public static void Check(PartDocument part, DiagnosticBag diagnostics)
     {
         PointNodes.Check(part.Points, diagnostics);
+        VirtualPointBinder.Check(part.VirtualPoints, part.Points, diagnostics);
         if (part.Model is LumpedModelDocument lumped)
         {
             CheckLumped(part, lumped, diagnostics);

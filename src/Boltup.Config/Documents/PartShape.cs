@@ -6,22 +6,6 @@ namespace Boltup.Config.Documents;
 /// <summary>The keys of a part document.</summary>
 public static class PartShape
 {
-    private static readonly ListKind Components = new(new NumberKind("1"), 3, 3);
-
-    private static readonly Shape Axes = new("the axes of a point",
-    [
-        new("x", Components, "direction of the point's x axis in the axes of the part"),
-        new("y", Components, "direction of the point's y axis in the axes of the part"),
-        new("z", Components, "direction of the point's z axis in the axes of the part"),
-    ]);
-
-    internal static readonly Shape Point = new("a point",
-    [
-        new("node", new NumberKind("101", IsInteger: true), "number of the point in a Universal File"),
-        new("at", SharedKinds.Position, "position in the axes of the part"),
-        new("axes", new ShapeKind(Axes), "own axes of the point: two of x, y, z, the third completes a right-handed set"),
-    ]);
-
     private static readonly Shape FrfFile = new("an FRF file",
     [
         new("file", new PathKind("an FRF file"), "Universal File or FRF CSV", IsRequired: true),
@@ -50,7 +34,8 @@ public static class PartShape
     [
         new("boltup", new ChoiceKind("part/1"), "kind and version of the document", IsRequired: true),
         new("title", new TextKind("a title"), "what the part is"),
-        new("points", new NamedKind("point", new ShapeKind(Point), IsDotted: true), "named places on the part"),
+        new("points", new NamedKind("point", new ShapeKind(SharedKinds.Point), IsDotted: true), "named places on the part"),
+        new("virtual_points", VirtualPointShape.Named, "points of six dofs with sensors and impacts around them"),
         new("frf", new ListKind(new ShapeKind(FrfFile)), "files of measured or computed FRFs"),
         new("lumped", new ShapeKind(Lumped), "masses and links along one direction"),
         new("modal", new ReservedKind(), "natural frequencies, damping ratios and mode shapes"),

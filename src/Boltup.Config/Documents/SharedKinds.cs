@@ -12,6 +12,24 @@ internal static class SharedKinds
     /// <summary>Directions in which something can move.</summary>
     public static readonly ChoiceKind MotionDirection = new("x", "y", "z", "rx", "ry", "rz");
 
+    private static readonly ListKind Components = new(new NumberKind("1"), 3, 3);
+
+    /// <summary>Own axes of a point.</summary>
+    public static readonly Shape Axes = new("the axes of a point",
+    [
+        new("x", Components, "direction of the point's x axis in the axes of the part"),
+        new("y", Components, "direction of the point's y axis in the axes of the part"),
+        new("z", Components, "direction of the point's z axis in the axes of the part"),
+    ]);
+
+    /// <summary>A named place.</summary>
+    public static readonly Shape Point = new("a point",
+    [
+        new("node", new NumberKind("101", IsInteger: true), "number of the point in a Universal File"),
+        new("at", Position, "position in the axes of the part"),
+        new("axes", new ShapeKind(Axes), "own axes of the point: two of x, y, z, the third completes a right-handed set"),
+    ]);
+
     /// <summary>Evenly spaced lines.</summary>
     public static readonly Shape Frequencies = new("a frequency range",
     [

@@ -47,7 +47,9 @@ public sealed class BenchPlanner
     private BenchPlan? Plan(IReadOnlyList<SourceFile> filesRead)
     {
         IReadOnlyList<FrfFileDocument> files = [.. _document.InstalledFrfs.Select(file => file.Frf)];
-        if (new FrfPlanner(_library, _diagnostics).Plan("installed source", _document.Points, files, fillByReciprocity: false) is not { } installed)
+        MeasuredPart? data = new FrfPlanner(_library, _diagnostics).Plan("installed source", _document.Points, files, fillByReciprocity: false);
+        var virtualPoints = new VirtualPointPlanner(_document.VirtualPoints, _document.Points, _diagnostics);
+        if (virtualPoints.Plan(data) is not { } installed)
         {
             return null;
         }
@@ -66,13 +68,14 @@ public sealed class BenchPlanner
         string title = _document.Title?.Value ?? Path.GetFileName(_document.Source.DisplayPath);
         var bench = new BenchModel(
             title, axis, installed, forces, indicators, validation, [.. operations.Select(operation => OnAxis(operation, axis))], _document.Solve.Value);
+        bench = bench with { VirtualPoints = virtualPoints.PointsOf(data!) ?? [], Data = data };
         bench = bench with { Coherence = new CoherencePlanner(_document, _library, _names, _diagnostics).Plan(bench) };
         BenchExtras? extras = _diagnostics.HasErrors ? null : new BenchExtrasPlanner(_document, _options, _library, _names, _diagnostics).Plan(bench);
         return extras is null ? null : new BenchPlan(_document, bench, extras, [.. filesRead, .. extras.Inputs, .. _library.Files], _library);
     }
 
     /// <summary>Every direction of a point that the FRFs hold.</summary>
-    private Dof[] SensorsAt(IReadOnlyList<Marked<string>> points, MeasuredPart installed, bool motionOnly)
+    private Dof[] SensorsAt(IReadOnlyList<Marked<string>> points, IPartModel installed, bool motionOnly)
     {
         var sensors = new List<Dof>();
         foreach (Marked<string> point in points)
@@ -92,7 +95,7 @@ public sealed class BenchPlanner
         return [.. sensors];
     }
 
-    private void CheckCompleteness(MeasuredPart installed, Dof[] forces, Dof[] sensors)
+    private void CheckCompleteness(IPartModel installed, Dof[] forces, Dof[] sensors)
     {
         foreach (Dof force in forces)
         {
@@ -150,9 +153,9 @@ public sealed class BenchPlanner
     }
 
     /// <summary>The lines that all have, within what the document asks for.</summary>
-    private FrequencyAxis? AxisOf(MeasuredPart installed, BenchOperation[] operations)
+    private FrequencyAxis? AxisOf(IPartModel installed, BenchOperation[] operations)
     {
-        FrequencyAxis? axis = _document.Frequencies?.ToAxis() ?? installed.Axis;
+        FrequencyAxis axis = _document.Frequencies?.ToAxis() ?? installed.Axis!;
         foreach (BenchOperation operation in operations)
         {
             FrequencyAxis? both = axis.SharedWith(operation.Columns[0].Axis);
@@ -171,12 +174,8 @@ public sealed class BenchPlanner
             axis = both;
         }
 
-        if (axis.FirstHz == 0)
-        {
-            axis = axis.Within(double.Epsilon, axis.LastHz);
-        }
-
-        return axis;
+        // Motion at 0 Hz is no acceleration: that line says nothing of forces.
+        return axis.FirstHz == 0 ? axis.Within(double.Epsilon, axis.LastHz) : axis;
     }
 
     private static BenchOperation OnAxis(BenchOperation operation, FrequencyAxis axis) => operation with

@@ -17,7 +17,8 @@ internal sealed class PartPlanner(DataLibrary library, DiagnosticBag diagnostics
         IPartModel? model = document.Model switch
         {
             LumpedModelDocument lumped => PlanLumped(placed.Name.Value, lumped),
-            FrfModelDocument frf => new FrfPlanner(library, diagnostics).Plan(placed.Name.Value, document, frf),
+            FrfModelDocument frf => new VirtualPointPlanner(document.VirtualPoints, document.Points, diagnostics)
+                .Plan(new FrfPlanner(library, diagnostics).Plan(placed.Name.Value, document, frf)),
             _ => throw new InvalidOperationException($"no planner for {document.Model.GetType().Name}"),
         };
         return model is null
@@ -25,7 +26,7 @@ internal sealed class PartPlanner(DataLibrary library, DiagnosticBag diagnostics
             : new PlacedPart(
                 placed.Name.Value,
                 model,
-                [.. document.Points.Select(PlanPoint)],
+                [.. document.AllPoints.Select(PlanPoint)],
                 placed.Turned is { } turn ? Rotation.About(turn.About.Value, turn.AngleRad.Value) : Rotation.None,
                 placed.Moved?.Value ?? Vector3d.Zero,
                 placed.Name.Span);

@@ -1,5 +1,6 @@
 using Boltup.Engine.Parts;
 using Boltup.Engine.Spectra;
+using Boltup.Engine.VirtualPoints;
 
 namespace Boltup.Engine.Identification;
 
@@ -21,6 +22,12 @@ public sealed record BenchModel(
 {
     /// <summary>Coherence of the installed FRFs; null when the bench gives none.</summary>
     public BenchCoherence? Coherence { get; init; }
+
+    /// <summary>Virtual points of the interface; their channels are dofs of <see cref="Data"/>.</summary>
+    public IReadOnlyList<VirtualPoint> VirtualPoints { get; init; } = [];
+
+    /// <summary>The installed FRFs as measured, without virtual points; null where there are none.</summary>
+    public IPartModel? Data { get; init; }
 
     /// <summary>All sensors, indicators first.</summary>
     public IReadOnlyList<Dof> Sensors { get; } = [.. Indicators, .. Validation];

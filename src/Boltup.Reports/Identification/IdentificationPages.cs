@@ -20,6 +20,7 @@ public sealed class IdentificationPages(IdentificationReport report)
         SingularValues(),
         .. report.Evidence.Stiffness is { } stiffness ? [Stiffness(stiffness)] : Array.Empty<Picture>(),
         .. report.Result.Coherence is { } coherence ? [Coherence(coherence)] : Array.Empty<Picture>(),
+        .. report.Result.Quality.VirtualPoints.Count > 0 ? [VirtualPointPage.Of(report.Result.Quality.VirtualPoints, report.Provenance)] : Array.Empty<Picture>(),
     ];
 
     /// <summary>Blocked forces of an operation, a panel for each point.</summary>

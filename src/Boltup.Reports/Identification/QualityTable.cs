@@ -1,6 +1,7 @@
 using System.Text;
 using Boltup.Engine.Evidence;
 using Boltup.Engine.Identification;
+using Boltup.Engine.VirtualPoints;
 using Boltup.Reports.Results;
 
 namespace Boltup.Reports.Identification;
@@ -34,6 +35,11 @@ internal static class QualityTable
 
         WriteAgreement(csv, report, "interface completeness", result.Quality.Completeness);
         WriteAgreement(csv, report, "round trip over the interface", result.Quality.RoundTrip);
+        foreach (VirtualPointQuality point in result.Quality.VirtualPoints)
+        {
+            Rows(csv, report, $"rigidity of {(point.OfImpacts ? "impacts" : "sensors")}", point.Point, line => point.PerLine[line]);
+        }
+
         WriteConsistency(csv, report);
         WriteRank(csv, report);
         csv.Flush();

@@ -7,7 +7,7 @@ internal static class BenchCases
     public const string Handover = "boltup: forces/1\npoints: { m1: { at: [0 mm, 0 mm, 0 mm] } }\ndirections: [x]\n"
         + "holds: { from: 20 Hz, to: 500 Hz }\noperations:\n  slow: { file: compressor.uff, phase: common, amplitude: rms }\n";
 
-    private const string Head = "boltup: bench/1\npoints: { m1: { node: 1 }, s1: { node: 2 }, v1: { node: 3 } }\n"
+    private const string Head = "boltup: bench/1\npoints: { m1: { node: 1 }, s1: { node: 2 }, v1: { node: 3, at: [0 mm, 0 mm, 0 mm] } }\n"
         + "interface: { points: [m1], directions: [x] }\n";
 
     private const string Data = "installed_frf: [ { file: compressor.uff } ]\n";
@@ -27,6 +27,8 @@ internal static class BenchCases
         new("CFG021", Head + Rest + "routes: { free: «{ method: free_velocity, operations: { run: { file: compressor.uff } } }» }\n", "`free_velocity` needs"),
         new("CFG021", Head + Rest + "routes: { mounts: { method: «mount_stiffness», operations: { run: { file: compressor.uff } } } }\n", "bench.assembly.yaml"),
         new("CFG050", Head + Rest + "routes: { sensors: { method: contact_force, operations: { «walk»: { file: compressor.uff } } } }\n", "run"),
+        new("CFG083", Head + "virtual_points: { «m1»: { at: [0 mm, 0 mm, 0 mm], sensors: [v1] } }\n" + Rest, "name of its own"),
+        new("CFG084", Head + "virtual_points: { v: { at: [0 mm, 0 mm, 0 mm], sensors: [«s1»] } }\n" + Rest, "s1: { at:"),
     ];
 
     public static readonly DiagnosticCase[] Handovers =
