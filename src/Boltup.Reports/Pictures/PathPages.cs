@@ -24,6 +24,9 @@ internal static class PathPages
     /// <summary>Room right of the longest bar for its words, as a share of the range.</summary>
     private const double WordRoom = 0.55;
 
+    /// <summary>Letters that fit beside the bars.</summary>
+    private const int LongestName = 22;
+
     private const double BarThickness = 0.36;
     private const int ScaleSteps = 120;
 
@@ -59,7 +62,7 @@ internal static class PathPages
     {
         double to = Step * Math.Ceiling(reference.Decibels(Math.Sqrt(shown[0].Power)) / Step);
         var x = new PictureAxis($"Level of the path in dB re {reference.Text}", to - BarRange, to + WordRoom * BarRange, false, Ticks.Even(to - BarRange, to, 4));
-        AxisTick[] names = [.. shown.Select((path, row) => new AxisTick(-row, path.Path.Name))];
+        AxisTick[] names = [.. shown.Select((path, row) => new AxisTick(-row, Short(path.Path.Name)))];
         var y = new PictureAxis("", 0.5 - shown.Length, 0.5, false, names);
         return new Panel("", x, y, [], (0, 0, 0.48, 1))
         {
@@ -67,6 +70,9 @@ internal static class PathPages
             Bars = [.. shown.Select((path, row) => BarOf(path, row, to - BarRange, reference))],
         };
     }
+
+    /// <summary>Long names lose their middle: the direction stands at the end.</summary>
+    private static string Short(string name) => name.Length <= LongestName ? name : $"{name[..(LongestName - 6)]}…{name[^5..]}";
 
     private static Bar BarOf(RankedPath path, int row, double from, LevelReference reference)
     {

@@ -17,12 +17,14 @@ public class PathRankingTests
         Assert.True(ranking.Paths[0].Power >= ranking.Paths[1].Power);
     }
 
-    [Fact]
-    public void Of_HalvedForce_TheLevelChangesAsSaid()
+    [Theory]
+    [InlineData(ForceSum.Phase)]
+    [InlineData(ForceSum.Energy)]
+    public void Of_HalvedForce_TheLevelChangesAsSaid(ForceSum sum)
     {
         (Complex left, Complex right) = (new Complex(1, 0.5), new Complex(-0.3, 0.8));
-        ResponsePaths all = Rank(left, right);
-        PathRanking halved = Rank(left / 2, right).Overall;
+        ResponsePaths all = Rank(left, right, sum);
+        PathRanking halved = Rank(left / 2, right, sum).Overall;
         double change = 10 * Math.Log10(halved.Power / all.Overall.Power);
         Assert.Equal(change, all.Overall.Paths.Single(path => path.Path.Name == "left.2.x").HalvedChange, Rounding);
     }
@@ -61,8 +63,8 @@ public class PathRankingTests
         Assert.Equal(paths.Overall.Power, paths.Bands.Sum(band => band.Power), Rounding * paths.Overall.Power);
     }
 
-    private static ResponsePaths Rank(Complex left, Complex right) => TwoSources.Predict(
-        ForceSum.Phase, TwoSources.Force(TwoSources.LeftFoot, left), TwoSources.Force(TwoSources.RightFoot, right)).RankedPaths[0];
+    private static ResponsePaths Rank(Complex left, Complex right, ForceSum sum = ForceSum.Phase) => TwoSources.Predict(
+        sum, TwoSources.Force(TwoSources.LeftFoot, left), TwoSources.Force(TwoSources.RightFoot, right)).RankedPaths[0];
 
     /// <summary>Ranks paths named by number, by their contributions at each line.</summary>
     private static PathRanking Rank(params Complex[][] contributions)

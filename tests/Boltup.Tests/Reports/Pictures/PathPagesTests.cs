@@ -42,6 +42,18 @@ public class PathPagesTests
     }
 
     [Fact]
+    public void Of_LongName_KeepsItsDirection()
+    {
+        RankedPath[] renamed = [TinyPaths.ByJoint.Paths[0] with { Path = new TransferPath(PathKind.Joint, "a mount behind the left front wheel rx") }];
+        OperationResult operation = TinyPaths.Operation with
+        {
+            RankedPaths = [TinyPaths.Operation.RankedPaths[1] with { Overall = TinyPaths.ByJoint with { Paths = renamed } }],
+        };
+        string label = PathPages.Of(operation, 0, "caption")!.Panels[0].Y.Ticks[0].Label;
+        Assert.Equal((22, "a mount behind t…el rx"), (label.Length, label));
+    }
+
+    [Fact]
     public void Of_NobodyAskedForPaths_IsNoPage() => Assert.Null(PathPages.Of(TinyResult.Plain.Operations[0], 0, "caption"));
 
     [Fact]
