@@ -21,7 +21,7 @@ internal static class PredictionSummary
 
         screen.Out.WriteLine(Cautions.Text);
         screen.Out.WriteLine($"wrote {files.Count} files to {folder}: {string.Join(", ", files.Where(IsMain))}");
-        screen.Out.WriteLine($"next: look at {Path.Combine(folder, files.FirstOrDefault(file => file == "overview.png") ?? ResultWriter.SummaryFile)}; change a mount and predict into another folder");
+        screen.Out.WriteLine($"next: look at {Path.Combine(folder, files.FirstOrDefault(file => file == ResultWriter.ReportFile) ?? ResultWriter.SummaryFile)}; change a mount and predict into another folder");
     }
 
     private static bool IsMain(string file) => file is ResultWriter.ResponsesFile or ResultWriter.JointForcesFile or ResultWriter.SummaryFile;

@@ -1,5 +1,6 @@
 using Boltup.Engine.Diagnostics;
 using Boltup.Engine.Prediction;
+using Boltup.Reports.Html;
 using Boltup.Reports.Pictures;
 
 namespace Boltup.Reports.Results;
@@ -12,6 +13,7 @@ public static class ResultWriter
     public const string ContributionsFile = "contributions.csv";
     public const string ContributionLinesFile = "contribution_lines.csv";
     public const string SummaryFile = "summary.json";
+    public const string ReportFile = "report.html";
 
     /// <summary>Writes data files, and pictures side by side with them, and replaces earlier results as a whole.</summary>
     /// <param name="fingerprints">Fingerprints of all inputs.</param>
@@ -29,6 +31,7 @@ public static class ResultWriter
             () => output.Write(ResponsesFile, stream => ResultTables.WriteResponses(stream, result)),
             () => output.Write(JointForcesFile, stream => ResultTables.WriteJointForces(stream, result)),
             () => output.Write(SummaryFile, stream => SummaryJson.Write(stream, result, fingerprints, options.ProgramVersion)),
+            () => output.Write(ReportFile, stream => PageRenderer.Write(stream, result, fingerprints, options.ProgramVersion)),
             () => WritePaths(result, output, options),
             () => WritePictures(result, fingerprints, output, options));
         return output.Commit(diagnostics);

@@ -20,7 +20,7 @@ public class PredictCommandTests
             [
                 ".boltup-files", "5400-rpm-driver-ear-paths.png", "5400-rpm-driver-ear.png", "5400-rpm-floor-paths.png", "5400-rpm-floor.png",
                 "5400-rpm-joint-forces.png", "5400-rpm-passenger-ear-paths.png", "5400-rpm-passenger-ear.png", "5400-rpm-seat-rail-paths.png",
-                "5400-rpm-seat-rail.png", "5400-rpm-steering-column-paths.png", "5400-rpm-steering-column.png", "contributions.csv", "joint_forces.csv", "mount-base.png", "overview.png", "responses.csv", "summary.json",
+                "5400-rpm-seat-rail.png", "5400-rpm-steering-column-paths.png", "5400-rpm-steering-column.png", "contributions.csv", "joint_forces.csv", "mount-base.png", "overview.png", "report.html", "responses.csv", "summary.json",
             ],
             files);
     }

@@ -16,7 +16,7 @@ public sealed class ResultWriterTests : IDisposable
     {
         IReadOnlyList<string>? names = TinyResult.Write(_folder.PathTo("out"), _diagnostics);
 
-        Assert.Equal(["joint_forces.csv", "responses.csv", "summary.json"], names);
+        Assert.Equal(["joint_forces.csv", "report.html", "responses.csv", "summary.json"], names);
         Assert.Empty(_diagnostics.Items);
     }
 
@@ -43,7 +43,7 @@ public sealed class ResultWriterTests : IDisposable
         Assert.Contains("a-b-c.png", names);
         Assert.Contains("a-b-c-2.png", names);
         Assert.Contains("a-b-joint-forces-2.png", names);
-        Assert.Equal(3 + 7, names.Count);
+        Assert.Equal(4 + 7, names.Count);
     }
 
     [Fact]
