@@ -25,4 +25,11 @@ public static partial class EngineCodes
         "The rigid motion that the other channels agree on does not explain this one. It is flipped or turned, stands elsewhere than stated, or the structure bends in between.",
         "a sensor glued with its y axis reversed",
         "Check sign, direction and position. Above the frequency at which the piece bends a virtual point has no meaning.");
+
+    public static readonly DiagnosticCode VirtualPointFigures = new(
+        "ENG053",
+        "the figures of a virtual point",
+        "Consistency is 1 where the channels move, or load the point, as a rigid piece would; 1/2 for a channel that is unrelated to the others, 0 for one that is flipped. The condition number says how well the channels tell the six motions apart.",
+        "boltup check bracket.part.yaml",
+        "Nothing to cure. Below about 0.9 look at the channel that is named.");
 }

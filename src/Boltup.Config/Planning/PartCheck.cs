@@ -1,6 +1,8 @@
+using Boltup.Config.Documents;
 using Boltup.Engine.Diagnostics;
 using Boltup.Engine.Parts;
 using Boltup.Engine.Spectra;
+using Boltup.Engine.VirtualPoints;
 
 namespace Boltup.Config.Planning;
 
@@ -19,6 +21,28 @@ public static class PartCheck
         if (LonePart.Plan(document, library, diagnostics) is { Model.Axis: { } axis } part)
         {
             Judge(part, axis, diagnostics);
+            JudgeVirtualPoints(document, library, axis, diagnostics);
+        }
+    }
+
+    private static void JudgeVirtualPoints(PartDocument document, DataLibrary library, FrequencyAxis axis, DiagnosticBag diagnostics)
+    {
+        // The part is planned already, and said what there is to say of its files.
+        var said = new DiagnosticBag();
+        if (document.Model is not FrfModelDocument frf || document.VirtualPoints.Count == 0
+            || new FrfPlanner(library, said).Plan("part", document, frf) is not { } data)
+        {
+            return;
+        }
+
+        IReadOnlyList<VirtualPoint> points = new VirtualPointPlanner(document.VirtualPoints, document.Points, said).PointsOf(data) ?? [];
+        foreach ((VirtualPoint point, VirtualPointDocument written) in points.Zip(document.VirtualPoints))
+        {
+            foreach (VirtualPointQuality quality in VirtualPointCheck.Measure(data, point, axis, diagnostics))
+            {
+                VirtualPointCheck.Report(quality, written.Name.Span, diagnostics);
+                VirtualPointCheck.Judge(quality, written.Name.Span, diagnostics);
+            }
         }
     }
 

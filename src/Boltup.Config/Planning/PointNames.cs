@@ -31,8 +31,11 @@ internal sealed class PointNames
         }
     }
 
-    /// <summary>The dof under the part's own point name, or null when the part does not list the point.</summary>
-    public Dof? Resolve(Dof inData) => _byNameInData is null
-        ? inData
-        : _byNameInData.TryGetValue(inData.Point, out string? name) ? inData with { Point = name } : null;
+    /// <summary>
+    /// The dof under the part's own point name, or null when the part does not list the point. Data name it by its node, or as the part does.
+    /// </summary>
+    public Dof? Resolve(Dof inData) => _byNameInData is null ? inData
+        : _byNameInData.TryGetValue(inData.Point, out string? name) ? inData with { Point = name }
+        : _byNameInData.ContainsValue(inData.Point) ? inData
+        : null;
 }

@@ -41,6 +41,16 @@ public static class VirtualPointCheck
         return found;
     }
 
+    /// <summary>Says the figures of a point as a note.</summary>
+    public static void Report(VirtualPointQuality quality, SourceSpan? origin, DiagnosticBag diagnostics)
+    {
+        (Dof dof, double least) = quality.Channels.MinBy(channel => channel.Consistency);
+        diagnostics.Note(
+            EngineCodes.VirtualPointFigures,
+            string.Create(CultureInfo.InvariantCulture, $"virtual point `{quality.Point}`, {quality.Channels.Count} {(quality.OfImpacts ? "impacts" : "sensor channels")}: consistency {quality.Overall:F3}, lowest `{dof}` {least:F3}, condition number {quality.Condition:F1}"),
+            origin);
+    }
+
     /// <summary>Names channels that do not go with the others.</summary>
     public static void Judge(VirtualPointQuality quality, SourceSpan? origin, DiagnosticBag diagnostics)
     {

@@ -48,7 +48,7 @@ public sealed class IdentificationPages(IdentificationReport report)
         double[] hz = validation.Report.Axis.Hz.ToArray();
         Panel[] panels = [.. shown.Select((dof, i) =>
         {
-            (Quantity quantity, string unit) = dof.Dof.IsMotion ? (Quantity.Displacement, "m") : (Quantity.Pressure, "Pa");
+            (Quantity quantity, string unit) = dof.Dof.IsMotion ? (Quantity.Acceleration, dof.Dof.IsRotation ? "rad/s²" : "m/s²") : (Quantity.Pressure, "Pa");
             LevelReference reference = LevelReference.For(quantity, unit);
             Series[] lines =
             [

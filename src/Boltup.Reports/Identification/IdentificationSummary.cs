@@ -3,6 +3,8 @@ using Boltup.Engine.Acoustics;
 using Boltup.Engine.Evidence;
 using Boltup.Engine.Identification;
 using Boltup.Engine.Prediction;
+using Boltup.Engine.Spectra;
+using Boltup.Engine.VirtualPoints;
 using Boltup.Reports.Diagnostics;
 using Boltup.Reports.Results;
 
@@ -30,6 +32,7 @@ internal static class IdentificationSummary
         WriteHolds(json, report.Holds);
         WriteOperations(json, report);
         WriteChannels(json, result.Quality.Channels);
+        WriteVirtualPoints(json, result.Quality.VirtualPoints);
         WriteValidations(json, report.Evidence);
         WriteStiffness(json, report.Evidence.Stiffness);
         WriteRoutes(json, report.Evidence);
@@ -151,7 +154,41 @@ internal static class IdentificationSummary
         }
 
         json.WriteEndArray();
+        json.WriteStartArray("strong_coupling");
+        foreach (BenchStiffnessDof dof in stiffness.Dofs.Where(dof => dof.StrongCoupling.Count > 0))
+        {
+            json.WriteStartObject();
+            json.WriteString("dof", dof.Dof.ToString());
+            json.WriteString("bands", string.Join(", ", dof.StrongCoupling));
+            json.WriteEndObject();
+        }
+
+        json.WriteEndArray();
         json.WriteEndObject();
+    }
+
+    private static void WriteVirtualPoints(Utf8JsonWriter json, IReadOnlyList<VirtualPointQuality> qualities)
+    {
+        json.WriteStartArray("virtual_points");
+        foreach (VirtualPointQuality quality in qualities)
+        {
+            json.WriteStartObject();
+            json.WriteString("point", quality.Point);
+            json.WriteString("channels", quality.OfImpacts ? "impacts" : "sensors");
+            json.WriteFinite("consistency", quality.Overall);
+            json.WriteFinite("condition_number", quality.Condition);
+            json.WriteBoolean("proves_nothing", quality.IsExactlyDetermined);
+            json.WriteStartObject("per_channel");
+            foreach ((Dof dof, double consistency) in quality.Channels)
+            {
+                json.WriteFinite(dof.ToString(), consistency);
+            }
+
+            json.WriteEndObject();
+            json.WriteEndObject();
+        }
+
+        json.WriteEndArray();
     }
 
     private static void WriteRoutes(Utf8JsonWriter json, BenchEvidence evidence)

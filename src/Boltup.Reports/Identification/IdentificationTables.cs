@@ -60,7 +60,7 @@ public static class IdentificationTables
         }
     }
 
-    /// <summary>Predicted against measured per line: motion as displacement in m, sound in Pa.</summary>
+    /// <summary>Predicted against measured per line: motion as acceleration in m/s², sound in Pa.</summary>
     public static void WriteValidation(Stream output, IdentificationReport report)
     {
         var csv = new CsvBytes(output);

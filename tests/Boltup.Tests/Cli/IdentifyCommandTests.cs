@@ -116,6 +116,38 @@ public sealed class IdentifyCommandTests : IDisposable
         }
     }
 
+    /// <summary>Motion of both ends of the mounts times their stiffness: the contact forces of the finite element program, found from the prediction.</summary>
+    [Fact]
+    public void Identify_MountStiffnessRoute_FindsTheContactForces()
+    {
+        string both = _folder.Write("both.assembly.yaml", $$"""
+            boltup: assembly/1
+            based_on: {{Repository.PathTo("configs", "bench.assembly.yaml")}}
+            operations:
+              running: { amplitude: rms, applied_forces: { file: {{Repository.Data("case1", "forces", "internal.csv")}}, part: compressor } }
+            responses:
+            {{string.Join('\n', MountEnds().Select(end => $"  {end}: {{ at: {(end[0] == 'm' ? "compressor" : "bench")}.{end} }}"))}}
+            """);
+        Assert.Equal(0, CommandRun.Of("predict", both, "-o", _folder.PathTo("both"), "--no-pictures", "--allow-outside").ExitCode);
+        string[] rows = File.ReadAllLines(_folder.PathTo("both", "responses.csv"));
+        _folder.Write("both.csv", "dof,frequency_hz,real,imag\n" + string.Concat(rows.Skip(1).Select(row => string.Join(',', row.Split(',')[1..5]) + "\n")));
+        string bench = File.ReadAllText(Clean)
+            .Replace("bench_", Repository.Data("bench") + "/bench_", StringComparison.Ordinal)
+            .Replace("../../../../configs", Repository.PathTo("configs"), StringComparison.Ordinal);
+        bench = bench[..bench.IndexOf("routes:", StringComparison.Ordinal)]
+            + "routes:\n  mounts: { method: mount_stiffness, operations: { running: { file: both.csv, quantity: acceleration, amplitude: rms } } }\n";
+        CommandRun run = CommandRun.Of("identify", _folder.Write("mounts.bench.yaml", bench), "-o", _folder.PathTo("out"), "--no-pictures", "--allow-outside");
+        Assert.True(run.ExitCode == 0, run.Error);
+        Dictionary<string, Complex[]> found = CsvSpectra.Read(_folder.PathTo("out", "routes", "mounts-running.csv"), "dof");
+        foreach ((string dof, Complex[] contact) in CsvSpectra.Read(Repository.Data("bench", "bench_contact_true.csv"), "dof"))
+        {
+            Near.Equal(contact, found[$"m{dof[2]}{dof[3..]}"], 1e-4);
+        }
+    }
+
+    private static IEnumerable<string> MountEnds() =>
+        "mb".SelectMany(side => Enumerable.Range(1, 4).SelectMany(i => "xyz".Select(direction => $"{side}{i}.{direction}")));
+
     [Fact]
     public void Identify_UniversalFileAsked_WritesTheSameForces()
     {
