@@ -7,6 +7,9 @@ internal static class ExitCode
 {
     public const int Done = 0;
 
+    /// <summary>Done, and a target is missed.</summary>
+    public const int TargetMissed = 1;
+
     /// <summary>The input is wrong.</summary>
     public const int WrongInput = 2;
 

@@ -74,4 +74,10 @@ public static partial class ConfigCodes
         "A quoted text holds a control character, which could change what a terminal or a report shows.",
         "title: \"\\e[31mred\"",
         "Remove the escape.");
+
+    public static readonly DiagnosticCode NoThirdOctave = new(
+        "CFG100", "a band that is no third octave",
+        "Bands of a target are named by the nominal centres of third octaves (IEC 61260-1), with their unit.",
+        "third_octaves: { 70 Hz: 45 dB }",
+        "Write 63 Hz or 80 Hz; the series is 1, 1.25, 1.6, 2, 2.5, 3.15, 4, 5, 6.3, 8 times powers of ten.");
 }

@@ -1,4 +1,5 @@
 using System.Globalization;
+using Boltup.Engine.Acoustics;
 using Boltup.Cli.Terminal;
 using Boltup.Engine.Paths;
 using Boltup.Engine.Prediction;

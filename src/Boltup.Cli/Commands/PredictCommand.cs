@@ -65,7 +65,8 @@ internal sealed class PredictCommand(Screen screen, CancellationToken cancellati
             stages.Print(screen.Error);
         }
 
-        return ExitCode.Of(diagnostics);
+        bool isMissed = files is not null && result!.Verdicts.Any(verdict => verdict.IsMissed);
+        return ExitCode.Of(diagnostics) is var code && code == ExitCode.Done && isMissed ? ExitCode.TargetMissed : code;
     }
 
     private static InputFingerprint[] Fingerprints(AssemblyPlan plan) =>

@@ -23,7 +23,10 @@ internal sealed partial class AssemblyBinder(DiagnosticBag diagnostics)
         [.. root["joints"].Entries().Select(BindJoint).OfType<JointDocument>()],
         [.. root["operations"].Entries().Select(BindOperation)],
         [.. root["responses"].Entries().Select(BindResponse).OfType<ResponseDocument>()],
-        root["joint_gap"]?.Si(Dimension.Length) ?? DefaultJointGapM);
+        root["joint_gap"]?.Si(Dimension.Length) ?? DefaultJointGapM)
+    {
+        Targets = [.. root["targets"].Entries().Select(BindTarget)],
+    };
 
     private PlacedPartDocument BindPart(YamlEntry entry)
     {

@@ -19,6 +19,9 @@ public sealed record AssemblyDocument(
     IReadOnlyList<ResponseDocument> Responses,
     double JointGapM)
 {
+    /// <summary>Limits on responses.</summary>
+    public IReadOnlyList<TargetDocument> Targets { get; init; } = [];
+
     public PlacedPartDocument? FindPart(string name) => Parts.FirstOrDefault(part => part.Name.Value == name);
 
     public MountDocument? FindMount(string name) => Mounts.FirstOrDefault(mount => mount.Name.Value == name);

@@ -25,6 +25,17 @@ internal sealed class AssemblyReferences(AssemblyDocument assembly, DiagnosticBa
             CheckHandover(force);
         }
 
+        var responses = new KnownNames("response", assembly.Responses.Select(response => response.Name.Value));
+        var operations = new KnownNames("operation", assembly.Operations.Select(operation => operation.Name.Value));
+        foreach (TargetDocument target in assembly.Targets)
+        {
+            responses.Check(target.Response.Value, target.Response.Span, diagnostics);
+            foreach (Marked<string> operation in target.Operations)
+            {
+                operations.Check(operation.Value, operation.Span, diagnostics);
+            }
+        }
+
         foreach (ResponseDocument response in assembly.Responses)
         {
             CheckPoint(response.At.Value.Part, response.At.Value.Dof.Point, response.At.Span);

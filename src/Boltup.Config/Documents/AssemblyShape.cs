@@ -96,6 +96,20 @@ public static class AssemblyShape
         new("as", new ChoiceKind("acceleration", "velocity", "displacement"), "quantity of a motion; acceleration by default"),
     ]);
 
+    private static readonly QuantityKind Level = new(Dimension.Level, "45");
+
+    private static readonly Shape Target = new("a target",
+    [
+        new("response", new TextKind("the name of a response"), "the response that it limits", IsRequired: true),
+        new("limit", Level, "overall level that must not be exceeded, in dB re the reference of the quantity"),
+        new("third_octaves", new NamedKind("band", Level, Minimum: 1), "levels of third octaves, by their nominal centres such as `63 Hz`"),
+        new("weighting", new ChoiceKind("A", "C", "Z"), "frequency weighting of sound; none (Z) by default"),
+        new("from", new QuantityKind(Dimension.Frequency, "20", Sign.NotNegative), "first frequency that counts"),
+        new("to", new QuantityKind(Dimension.Frequency, "1000", Sign.Positive), "last frequency that counts"),
+        new("operations", new ListKind(new TextKind("the name of an operation"), IsSet: true), "operations that it holds for; all by default"),
+    ],
+    KeyRule.ExactlyOne("limit", "third_octaves"));
+
     public static readonly Shape Root = new("an assembly",
     [
         new("boltup", new ChoiceKind("assembly/1"), "kind and version of the document", IsRequired: true),
@@ -110,6 +124,6 @@ public static class AssemblyShape
             "distance up to which joined points count as coinciding; 5 mm by default"),
         new("operations", new NamedKind("operation", new ShapeKind(Operation), MakesFileNames: true), "running conditions"),
         new("responses", new NamedKind("response", new ShapeKind(Response), MakesFileNames: true), "dofs that somebody cares about"),
-        new("targets", new ReservedKind(AllowsEmpty: true), "limits on responses"),
+        new("targets", new NamedKind("target", new ShapeKind(Target)), "limits on responses"),
     ]);
 }

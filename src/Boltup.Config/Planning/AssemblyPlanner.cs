@@ -61,7 +61,10 @@ public sealed class AssemblyPlanner
             joints!,
             operations!,
             [.. _document.Responses.Select(PlanResponse)])
-        { JointGap = _document.JointGapM };
+        {
+            JointGap = _document.JointGapM,
+            Targets = [.. _document.Targets.Select(target => target.ToTarget())],
+        };
     }
 
     private static Joint? PlanJoint(JointDocument document, MountPlanner mounts)

@@ -1,6 +1,7 @@
 using Boltup.Engine.Coupling;
 using Boltup.Engine.Parts;
 using Boltup.Engine.Spectra;
+using Boltup.Engine.Targets;
 
 namespace Boltup.Engine.Prediction;
 
@@ -14,6 +15,9 @@ public sealed record AssemblyModel(
     IReadOnlyList<Operation> Operations,
     IReadOnlyList<Response> Responses)
 {
+    /// <summary>Limits on responses.</summary>
+    public IReadOnlyList<Target> Targets { get; init; } = [];
+
     /// <summary>Distance in m beyond which two joined points draw a warning.</summary>
     public double JointGap { get; init; } = 0.005;
 }

@@ -2,6 +2,7 @@ using System.Numerics;
 using Boltup.Engine.Diagnostics;
 using Boltup.Engine.Paths;
 using Boltup.Engine.Spectra;
+using Boltup.Engine.Targets;
 
 namespace Boltup.Engine.Prediction;
 
@@ -22,6 +23,9 @@ public sealed record PredictionResult(
 {
     /// <summary>The stiffness of every mount that a joint goes through.</summary>
     public IReadOnlyList<MountSpectrum> Mounts { get; init; } = [];
+
+    /// <summary>One verdict for each target and operation that it holds for.</summary>
+    public IReadOnlyList<TargetVerdict> Verdicts { get; init; } = [];
 }
 
 /// <summary>What one operation does to the responses and joints.</summary>

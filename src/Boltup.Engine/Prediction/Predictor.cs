@@ -4,6 +4,7 @@ using Boltup.Engine.Kernels;
 using Boltup.Engine.Parts;
 using Boltup.Engine.Paths;
 using Boltup.Engine.Spectra;
+using Boltup.Engine.Targets;
 
 namespace Boltup.Engine.Prediction;
 
@@ -92,14 +93,19 @@ public sealed class Predictor
         }
 
         var reader = new OperationReader(_assembly, _layout, solution, _responseRows);
+        OperationResult[] operations = [.. _assembly.Operations.Select((_, i) => ReadOperation(i, reader, paths, solution))];
+        IReadOnlyList<TargetVerdict> verdicts = TargetCheck.Run(_assembly.Targets, operations, diagnostics);
         return new PredictionResult(
             _assembly.Title,
             _assembly.Axis,
-            [.. _assembly.Operations.Select((operation, i) => ReadOperation(i, reader, paths, solution))],
+            operations,
             new Conditioning(_layout.Constraints.Count == 0 ? [] : solution.Condition, _layout.RotationLength),
             KernelChoice.Name,
             [.. diagnostics.Items])
-        { Mounts = MountSpectra.Of(_assembly) };
+        {
+            Mounts = MountSpectra.Of(_assembly),
+            Verdicts = verdicts,
+        };
     }
 
     private OperationResult ReadOperation(int index, OperationReader reader, PathAnalysis? paths, CouplingSolution solution)

@@ -1,3 +1,4 @@
+using Boltup.Engine.Acoustics;
 using Boltup.Engine.Paths;
 using Boltup.Engine.Prediction;
 using Boltup.Reports.Results;

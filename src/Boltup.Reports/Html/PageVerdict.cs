@@ -1,6 +1,8 @@
 using System.Globalization;
 using Boltup.Engine.Diagnostics;
 using Boltup.Engine.Prediction;
+using Boltup.Engine.Targets;
+using Boltup.Reports.Results;
 
 namespace Boltup.Reports.Html;
 
@@ -9,7 +11,15 @@ internal static class PageVerdict
 {
     /// <summary>The highest level of every quantity, because levels of different references do not compare; then what the run complained of.</summary>
     public static IReadOnlyList<string> Of(IReadOnlyList<PageLevel> levels, PredictionResult result) =>
-        [.. levels.GroupBy(level => level.Level.Reference.Text).Select(Highest), Complaints(result)];
+        [.. result.Verdicts.Select(Sentence), .. levels.GroupBy(level => level.Level.Reference.Text).Select(Highest), Complaints(result)];
+
+    private static string Sentence(TargetVerdict verdict)
+    {
+        string cure = VerdictText.Cure(verdict) is { } words ? $" ({words})" : "";
+        return string.Create(
+            CultureInfo.InvariantCulture,
+            $"Target {verdict.Target.Name}, {verdict.Operation}: {VerdictText.Margin(verdict)}; {verdict.Target.Response} has {VerdictText.Level(verdict)} re {verdict.Reference.Text}, limit {verdict.LimitDb:0.#} dB{cure}.");
+    }
 
     private static string Highest(IEnumerable<PageLevel> levels)
     {

@@ -1,4 +1,5 @@
 using System.Globalization;
+using Boltup.Engine.Acoustics;
 using Boltup.Engine.Evidence;
 using Boltup.Engine.Identification;
 using Boltup.Engine.Prediction;

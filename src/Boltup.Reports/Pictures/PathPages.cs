@@ -1,5 +1,6 @@
 using System.Globalization;
 using System.Numerics;
+using Boltup.Engine.Acoustics;
 using Boltup.Engine.Paths;
 using Boltup.Engine.Prediction;
 using Boltup.Reports.Results;

@@ -1,3 +1,4 @@
+using Boltup.Engine.Acoustics;
 using Boltup.Engine.Spectra;
 using Boltup.Reports.Results;
 

@@ -1,5 +1,6 @@
 using System.Globalization;
 using System.Numerics;
+using Boltup.Engine.Acoustics;
 using Boltup.Engine.Prediction;
 using Boltup.Engine.Spectra;
 using Boltup.Reports.Results;

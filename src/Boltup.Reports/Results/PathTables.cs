@@ -1,4 +1,5 @@
 using System.Text;
+using Boltup.Engine.Acoustics;
 using Boltup.Engine.Paths;
 using Boltup.Engine.Prediction;
 

@@ -10,6 +10,8 @@ public static class ResultWriter
 {
     public const string ResponsesFile = "responses.csv";
     public const string JointForcesFile = "joint_forces.csv";
+    public const string LevelsFile = "levels.csv";
+    public const string BandsFile = "bands.csv";
     public const string ContributionsFile = "contributions.csv";
     public const string ContributionLinesFile = "contribution_lines.csv";
     public const string SummaryFile = "summary.json";
@@ -32,6 +34,8 @@ public static class ResultWriter
             () => output.Write(JointForcesFile, stream => ResultTables.WriteJointForces(stream, result)),
             () => output.Write(SummaryFile, stream => SummaryJson.Write(stream, result, fingerprints, options.ProgramVersion)),
             () => output.Write(ReportFile, stream => PageRenderer.Write(stream, result, fingerprints, options.ProgramVersion)),
+            () => output.Write(LevelsFile, stream => LevelTables.WriteLevels(stream, result)),
+            () => output.Write(BandsFile, stream => LevelTables.WriteBands(stream, result)),
             () => WritePaths(result, output, options),
             () => WritePictures(result, fingerprints, output, options));
         return output.Commit(diagnostics);

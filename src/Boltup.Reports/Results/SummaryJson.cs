@@ -1,6 +1,8 @@
 using System.Globalization;
 using System.Text.Json;
+using Boltup.Engine.Paths;
 using Boltup.Engine.Prediction;
+using Boltup.Engine.Targets;
 using Boltup.Reports.Diagnostics;
 
 namespace Boltup.Reports.Results;
@@ -22,6 +24,7 @@ public static class SummaryJson
         SharedJson.WriteAxis(json, result.Axis);
         WriteConditioning(json, result);
         WriteLevels(json, result);
+        WriteVerdicts(json, result);
         PathJson.Write(json, result);
         DiagnosticJson.WriteList(json, result.Diagnostics);
         SharedJson.WriteInputs(json, inputs);
@@ -53,6 +56,58 @@ public static class SummaryJson
     private static string OneLine(IReadOnlyList<double> values) => $"[{string.Join(", ", values.Select(Short))}]";
 
     private static string Short(double value) => double.IsFinite(value) ? value.ToString("G3", CultureInfo.InvariantCulture) : "null";
+
+    private static void WriteVerdicts(Utf8JsonWriter json, PredictionResult result)
+    {
+        json.WriteStartArray("targets");
+        foreach (TargetVerdict verdict in result.Verdicts)
+        {
+            json.WriteStartObject();
+            json.WriteString("target", verdict.Target.Name);
+            json.WriteString("response", verdict.Target.Response);
+            json.WriteString("operation", verdict.Operation);
+            json.WriteString("weighting", verdict.Target.Weighting.ToString());
+            json.WriteFinite("level_db", verdict.LevelDb);
+            json.WriteNumber("limit_db", verdict.LimitDb);
+            json.WriteString("db_reference", verdict.Reference.Text);
+            if (verdict.Band is { } band)
+            {
+                json.WriteNumber("deciding_third_octave_hz", band.NominalHz);
+            }
+
+            json.WriteFinite("margin_db", verdict.MarginDb);
+            json.WriteString("verdict", !verdict.IsJudged ? "not judged" : verdict.IsMissed ? "missed" : "met");
+            WriteReduction(json, verdict);
+            json.WriteEndObject();
+        }
+
+        json.WriteEndArray();
+    }
+
+    private static void WriteReduction(Utf8JsonWriter json, TargetVerdict verdict)
+    {
+        if (verdict.Reduction is not { } reduction)
+        {
+            return;
+        }
+
+        json.WriteFinite("all_forces_change_db", reduction.AllForcesChange);
+        json.WriteFinite("largest_uniform_force_db_re_1_n", reduction.UniformForceLevel);
+        WritePathReductions(json, "reduction_of_one_joint_path_db", reduction.Joints);
+        WritePathReductions(json, "reduction_of_one_force_db", reduction.Forces);
+    }
+
+    /// <summary>Null where the path alone cannot meet the target.</summary>
+    private static void WritePathReductions(Utf8JsonWriter json, string name, IReadOnlyList<PathReduction> reductions)
+    {
+        json.WriteStartObject(name);
+        foreach (PathReduction reduction in reductions)
+        {
+            json.WriteFinite(reduction.Path.Name, reduction.Decibels ?? double.NaN);
+        }
+
+        json.WriteEndObject();
+    }
 
     private static void WriteLevels(Utf8JsonWriter json, PredictionResult result)
     {

@@ -20,7 +20,7 @@ public class PredictCommandTests
             [
                 ".boltup-files", "5400-rpm-driver-ear-paths.png", "5400-rpm-driver-ear.png", "5400-rpm-floor-paths.png", "5400-rpm-floor.png",
                 "5400-rpm-joint-forces.png", "5400-rpm-passenger-ear-paths.png", "5400-rpm-passenger-ear.png", "5400-rpm-seat-rail-paths.png",
-                "5400-rpm-seat-rail.png", "5400-rpm-steering-column-paths.png", "5400-rpm-steering-column.png", "contributions.csv", "joint_forces.csv", "mount-base.png", "overview.png", "report.html", "responses.csv", "summary.json",
+                "5400-rpm-seat-rail.png", "5400-rpm-steering-column-paths.png", "5400-rpm-steering-column.png", "bands.csv", "contributions.csv", "joint_forces.csv", "levels.csv", "mount-base.png", "overview.png", "report.html", "responses.csv", "summary.json",
             ],
             files);
     }
@@ -35,6 +35,27 @@ public class PredictCommandTests
 
         // A head, then 5 responses of 12 forces and 12 directions of joints at 197 lines.
         Assert.Equal(1 + 5 * 24 * 197, File.ReadLines(folder.PathTo("out", "contribution_lines.csv")).Count());
+    }
+
+    [Fact]
+    public void Predict_MissedTarget_ExitsWithOneAndSaysWhatWouldMeetIt()
+    {
+        using var folder = new TemporaryFolder();
+        string stricter = folder.Write("a.assembly.yaml", $$"""
+            boltup: assembly/1
+            based_on: {{Demo}}
+            targets: { driver ear overall: { limit: 50 dB } }
+            """);
+        CommandRun run = CommandRun.Of("predict", stricter, "-o", folder.PathTo("out"), "--no-pictures", "--allow-outside");
+        Assert.Equal(1, run.ExitCode);
+        Assert.Contains("missed by 5.6 dB", run.Out, StringComparison.Ordinal);
+        Assert.Contains("to meet it: all forces 5.6 dB lower", run.Out, StringComparison.Ordinal);
+        using JsonDocument summary = JsonDocument.Parse(File.ReadAllText(folder.PathTo("out", "summary.json")));
+        JsonElement target = summary.RootElement.GetProperty("targets")[0];
+        Assert.Equal("missed", target.GetProperty("verdict").GetString());
+        Assert.Equal(-5.64, target.GetProperty("margin_db").GetDouble(), 0.01);
+        Assert.Equal(-5.64, target.GetProperty("all_forces_change_db").GetDouble(), 0.01);
+        Assert.Contains("Target driver ear overall, 5400 rpm: missed by 5.6 dB", File.ReadAllText(folder.PathTo("out", "report.html")), StringComparison.Ordinal);
     }
 
     [Fact]

@@ -16,7 +16,7 @@ public sealed class ResultWriterTests : IDisposable
     {
         IReadOnlyList<string>? names = TinyResult.Write(_folder.PathTo("out"), _diagnostics);
 
-        Assert.Equal(["joint_forces.csv", "report.html", "responses.csv", "summary.json"], names);
+        Assert.Equal(["bands.csv", "joint_forces.csv", "levels.csv", "report.html", "responses.csv", "summary.json"], names);
         Assert.Empty(_diagnostics.Items);
     }
 

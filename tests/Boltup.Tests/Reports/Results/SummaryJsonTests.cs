@@ -15,7 +15,7 @@ public class SummaryJsonTests
 
         string[] keys = [.. json.RootElement.EnumerateObject().Select(property => property.Name)];
         Assert.Equal(
-            ["boltup", "title", "program_version", "kernels", "frequencies", "interface_condition", "levels", "diagnostics", "inputs", "cautions"], keys);
+            ["boltup", "title", "program_version", "kernels", "frequencies", "interface_condition", "levels", "targets", "diagnostics", "inputs", "cautions"], keys);
         Assert.Equal("results/1", json.RootElement.GetProperty("boltup").GetString());
         Assert.Equal("1.2.3", json.RootElement.GetProperty("program_version").GetString());
     }

@@ -1,6 +1,6 @@
 using Boltup.Engine.Spectra;
 
-namespace Boltup.Reports.Results;
+namespace Boltup.Engine.Acoustics;
 
 /// <summary>What 0 dB is (ISO 1683; from memory).</summary>
 /// <param name="Value">In the SI unit of the quantity.</param>
