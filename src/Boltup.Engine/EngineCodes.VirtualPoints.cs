@@ -32,4 +32,11 @@ public static partial class EngineCodes
         "Consistency is 1 where the channels move, or load the point, as a rigid piece would; 1/2 for a channel that is unrelated to the others, 0 for one that is flipped. The condition number says how well the channels tell the six motions apart.",
         "boltup check bracket.part.yaml",
         "Nothing to cure. Below about 0.9 look at the channel that is named.");
+
+    public static readonly DiagnosticCode ChannelUnchecked = new(
+        "ENG054",
+        "a channel of a virtual point that no other checks",
+        "Some motion is seen by this channel alone, so that it fits whatever it says: the directions normal to the plane of three triaxial sensors are an example. Its consistency of 1 is no evidence.",
+        "three triaxial sensors on a flat plate: their three normal directions are just enough for one translation and two rotations",
+        "Add a sensor, or impacts, so that every motion is seen at least once more than it needs.");
 }

@@ -44,5 +44,5 @@ public static class PartShape
         new("frame", new ReservedKind(), "frame of beams in space"),
         new("reciprocity", new ChoiceKind("fill"), "use a measured Y_ji where Y_ij is missing"),
     ],
-    KeyRule.ExactlyOne("frf", "lumped", "modal", "matrices", "rigid_body", "frame"));
+    KeyRule.ExactlyOne("frf", "lumped", "modal", "matrices", "rigid_body", "frame"), KeyRule.Needs("virtual_points", "frf"));
 }

@@ -21,6 +21,11 @@ internal sealed class VirtualPointPlanner(
     /// <summary>The virtual points with their channels, or null after an error.</summary>
     public IReadOnlyList<VirtualPoint>? PointsOf(IPartModel data)
     {
+        if (!documents.Aggregate(true, (complete, document) => HasData(document, data) && complete))
+        {
+            return null;
+        }
+
         VirtualPoint[] planned = [.. documents.Select(document => new VirtualPoint(
             document.Name.Value,
             document.At.Value,
@@ -29,6 +34,26 @@ internal sealed class VirtualPointPlanner(
             ChannelsOf(document, document.Impacts, data.Excitations)))];
         bool fine = planned.Zip(documents).All(pair => VirtualPointCheck.SeesAllMotions(pair.First, pair.Second.Name.Span, diagnostics));
         return fine ? planned : null;
+    }
+
+    private bool HasData(VirtualPointDocument document, IPartModel data) =>
+        HasData(document, document.Sensors, data.Responses, "sensor", "moves at") & HasData(document, document.Impacts, data.Excitations, "impact", "is excited at");
+
+    /// <summary>A channel that the document counts on and the data lack would leave a point that is judged, and moves, by fewer.</summary>
+    private bool HasData(
+        VirtualPointDocument document, IReadOnlyList<Marked<string>> names, IReadOnlyCollection<Dof> known, string kind, string verb)
+    {
+        Marked<string>[] missing = [.. names.Where(name => !known.Any(dof => dof.Point == name.Value && dof.IsTranslation))];
+        foreach (Marked<string> name in missing)
+        {
+            diagnostics.Error(
+                PlanCodes.ChannelWithoutData,
+                $"virtual point `{document.Name}`: no FRF {verb} its {kind} `{name}`",
+                name.Span,
+                "name the point as the data do, give it its `node`, or leave it out of the virtual point");
+        }
+
+        return missing.Length == 0;
     }
 
     private MeasuredChannel[] ChannelsOf(VirtualPointDocument document, IReadOnlyList<Marked<string>> names, IReadOnlyCollection<Dof> known) =>

@@ -13,6 +13,9 @@ public sealed class RigidTransform
     /// <summary>Smallest over largest singular value of the scaled R from which a motion counts as seen.</summary>
     private const double SeenShare = 1e-6;
 
+    /// <summary>Least freedom of a channel that counts as checked by the others.</summary>
+    private const double LeastFreedom = 1e-6;
+
     private static readonly string[] Motions =
         ["translation along x", "translation along y", "translation along z", "rotation about x", "rotation about y", "rotation about z"];
 
@@ -63,6 +66,16 @@ public sealed class RigidTransform
 
     /// <summary>T_f = W·R(RᵀWR)⁻¹, channels × 6: the forces along the channels that make up a load at the point.</summary>
     public Matrix<double> ChannelsFromLoad() => _weights * Rows * (Rows.Transpose() * _weights * Rows).Inverse();
+
+    /// <summary>
+    /// How far each channel is checked by the others: 1 − h with h on the diagonal of R·T_u. 0 where a channel alone sees some motion, as the
+    /// directions normal to the plane of three sensors do: it then fits whatever it says.
+    /// </summary>
+    public double[] Freedom()
+    {
+        Vector<double> share = (Rows * MotionFromChannels()).Diagonal();
+        return [.. share.Select(own => 1 - own > LeastFreedom ? 1 - own : 0)];
+    }
 
     private static double Entry(VirtualPoint point, MeasuredChannel channel, int column)
     {

@@ -10,8 +10,8 @@ namespace Boltup.Engine.VirtualPoints;
 /// <summary>Judges virtual points: whether their channels see all motions, and agree with a rigid piece.</summary>
 public static class VirtualPointCheck
 {
-    /// <summary>Consistency of a channel below which it is a suspect (common practice).</summary>
-    private const double LeastConsistency = 0.8;
+    /// <summary>Consistency with the other channels below which one is a suspect: 1.6 times too large or too small, or 26° out of phase.</summary>
+    private const double LeastConsistency = 0.95;
 
     /// <summary>Refuses points whose channels miss a motion, and warns about those that are exactly determined.</summary>
     /// <returns>False after an error in <paramref name="diagnostics"/>.</returns>
@@ -44,25 +44,26 @@ public static class VirtualPointCheck
     /// <summary>Says the figures of a point as a note.</summary>
     public static void Report(VirtualPointQuality quality, SourceSpan? origin, DiagnosticBag diagnostics)
     {
-        (Dof dof, double least) = quality.Channels.MinBy(channel => channel.Consistency);
+        string odd = quality.Odd is { } channel
+            ? string.Create(CultureInfo.InvariantCulture, $"lowest with the others `{channel.Dof}` {channel.Consistency:F3}")
+            : "no channel is checked by the others";
         diagnostics.Note(
             EngineCodes.VirtualPointFigures,
-            string.Create(CultureInfo.InvariantCulture, $"virtual point `{quality.Point}`, {quality.Channels.Count} {(quality.OfImpacts ? "impacts" : "sensor channels")}: consistency {quality.Overall:F3}, lowest `{dof}` {least:F3}, condition number {quality.Condition:F1}"),
+            string.Create(CultureInfo.InvariantCulture, $"virtual point `{quality.Point}`, {quality.Channels.Count} {(quality.OfImpacts ? "impacts" : "sensor channels")}: consistency {quality.Overall:F3}, {odd}, condition number {quality.Condition:F1}"),
             origin);
     }
 
     /// <summary>Names channels that do not go with the others.</summary>
     public static void Judge(VirtualPointQuality quality, SourceSpan? origin, DiagnosticBag diagnostics)
     {
-        (Dof dof, double least) = quality.Channels.MinBy(channel => channel.Consistency);
-        if (!quality.IsExactlyDetermined && least < LeastConsistency)
+        if (quality.Odd is { } odd && odd.Consistency < LeastConsistency)
         {
             diagnostics.Warning(
                 EngineCodes.ChannelNotRigid,
-                string.Create(CultureInfo.InvariantCulture, $"virtual point `{quality.Point}`: {(quality.OfImpacts ? "impact" : "sensor channel")} `{dof}` does not move with the rigid piece (consistency {least:F2})"),
+                string.Create(CultureInfo.InvariantCulture, $"virtual point `{quality.Point}`: {(quality.OfImpacts ? "impact" : "sensor channel")} `{odd.Dof}` does not move with the rigid piece (consistency {odd.Consistency:F2})"),
                 origin,
                 "check its sign, direction and position; leave it out if the structure bends between it and the point",
-                string.Create(CultureInfo.InvariantCulture, $"all channels together: {quality.Overall:F2}"));
+                string.Create(CultureInfo.InvariantCulture, $"leaving it out removes {odd.Share:P0} of the misfit of all channels, whose consistency is {quality.Overall:F2}"));
         }
     }
 
@@ -89,7 +90,29 @@ public static class VirtualPointCheck
                 "add channels: without them neither a flipped channel nor a flexible piece can be noticed");
         }
 
+        SayWhatIsUnchecked(point, transform, kind, origin, diagnostics);
         return true;
+    }
+
+    private static void SayWhatIsUnchecked(
+        VirtualPoint point, RigidTransform transform, string kind, SourceSpan? origin, DiagnosticBag diagnostics)
+    {
+        if (transform.Channels.Count <= 6)
+        {
+            return;
+        }
+
+        double[] freedom = transform.Freedom();
+        string[] alone = [.. transform.Channels.Where((_, i) => freedom[i] == 0).Select(channel => $"`{channel.Dof}`")];
+        if (alone.Length > 0)
+        {
+            diagnostics.Warning(
+                EngineCodes.ChannelUnchecked,
+                $"virtual point `{point.Name}`: no other channel checks {alone.Length} of its {transform.Channels.Count} {kind} channels",
+                origin,
+                kind == "sensor" ? "add a sensor outside the plane or line of the others" : "add impacts along these directions in other places",
+                $"flipped or misplaced, they would fit all the same: {string.Join(", ", alone)}");
+        }
     }
 
     private static VirtualPointQuality Measure(
@@ -100,6 +123,7 @@ public static class VirtualPointCheck
         Matrix<double> filter = ofImpacts
             ? (transform.ChannelsFromLoad() * transform.Rows.Transpose()).Transpose()
             : transform.Rows * transform.MotionFromChannels();
+        var search = new OddChannelSearch(transform);
         var perLine = new double[axis.Count];
         var sums = new (double Sum, double Sizes)[channels.Count];
         for (int line = 0; line < axis.Count; line++)
@@ -115,6 +139,7 @@ public static class VirtualPointCheck
                         filtered += filter[channel, other] * value(line, other, k);
                     }
 
+                    search.Add(channel, measured, filtered);
                     error += Square(measured - filtered);
                     power += Square(measured);
                     sums[channel] = (sums[channel].Sum + Square(measured + filtered), sums[channel].Sizes + Square(measured) + Square(filtered));
@@ -126,7 +151,10 @@ public static class VirtualPointCheck
 
         return new VirtualPointQuality(
             point.Name, ofImpacts, axis, perLine,
-            [.. channels.Select((channel, i) => (channel.Dof, sums[i].Sum / (2 * sums[i].Sizes)))], transform.Condition(), transform.IsExactlyDetermined);
+            [.. channels.Select((channel, i) => (channel.Dof, sums[i].Sum / (2 * sums[i].Sizes)))], transform.Condition(), transform.IsExactlyDetermined)
+        {
+            Odd = search.Find(),
+        };
     }
 
     private static double Square(Complex value) => value.Real * value.Real + value.Imaginary * value.Imaginary;

@@ -22,6 +22,9 @@ public sealed record VirtualPointQuality(
     double Condition,
     bool IsExactlyDetermined)
 {
+    /// <summary>The channel that disagrees most with the others; null when none is checked by the others.</summary>
+    public OddChannel? Odd { get; init; }
+
     /// <summary>Mean of <see cref="PerLine"/>.</summary>
     public double Overall => PerLine.Average();
 }

@@ -35,6 +35,7 @@ internal static class PartCases
         new("CFG012", Lumped + "«colour»: b\n", "a part knows `boltup`"),
         new("CFG013", Head + "frf:\n  - «{ quantity: mobility }»\n", "add `file`"),
         new("CFG013", Head + "«lumped»:\n  direction: x\n", "`masses`"),
+        new("CFG021", Lumped + "points: { s1: { at: [0 mm, 0 mm, 0 mm] } }\n«virtual_points»: { v: { at: [0 mm, 0 mm, 0 mm], sensors: [s1] } }\n", "`frf`"),
         new("CFG014", Head + "lumped: { direction: x, masses: «[1 kg]» }", "a list, expected a map"),
         new("CFG014", Lumped + "«title»: { a: 1 }\n".Replace("«title»: { a: 1 }", "title: «{ a: 1 }»", StringComparison.Ordinal), "expected a title"),
         new("CFG014", "«-» a\n- b\n", "a list, expected a map"),

@@ -17,7 +17,7 @@ internal sealed class RigidBody : IPartModel
     private const double Mass = 4;
 
     private readonly Dictionary<string, (Vector3d At, Rotation Axes)> _points = [];
-    private readonly HashSet<Dof> _flipped = [];
+    private readonly Dictionary<Dof, double> _factors = [];
 
     public RigidBody(Rotation? axes = null)
     {
@@ -36,7 +36,10 @@ internal sealed class RigidBody : IPartModel
 
     public IReadOnlyCollection<Dof> Excitations => Responses;
 
-    public void Flip(Dof dof) => _flipped.Add(dof);
+    public void Flip(Dof dof) => Scale(dof, -1);
+
+    /// <summary>A wrong calibration of a sensor or hammer channel.</summary>
+    public void Scale(Dof dof, double factor) => _factors[dof] = factor;
 
     /// <summary>The point with the first sensors and impacts around it.</summary>
     public VirtualPoint Point(Vector3d at, Rotation axes, int sensors = 4, int impacts = 4) =>
@@ -59,8 +62,8 @@ internal sealed class RigidBody : IPartModel
         for (int i = 0; i < rows.Count * columns.Count; i++)
         {
             Dof row = rows[i / columns.Count], column = columns[i % columns.Count];
-            double sign = _flipped.Contains(row) ? -1 : 1;
-            frf.Values.ScatterSpectrum(i / columns.Count, i % columns.Count, [.. Enumerable.Range(0, axis.Count).Select(line => sign * Receptance(
+            double factor = _factors.GetValueOrDefault(row, 1) * _factors.GetValueOrDefault(column, 1);
+            frf.Values.ScatterSpectrum(i / columns.Count, i % columns.Count, [.. Enumerable.Range(0, axis.Count).Select(line => factor * Receptance(
                 axis.Omega(line), _points[row.Point].At, Along(row), Vector3d.Zero, _points[column.Point].At, Along(column), Vector3d.Zero))]);
         }
 
