@@ -1,8 +1,9 @@
 namespace Boltup.Engine.Evidence;
 
 /// <summary>
-/// Finds the corrections that make channels agree: first robustly, by leaving out whatever disturbs the others most and judging it by what
-/// the rest predicts; then one by one, by the single factor or exchange that helps most; and keeps those alone that matter by themselves.
+/// Finds the corrections that make channels agree, in two ways: one by one, by the single factor or exchange that helps most, which is sharp
+/// for one fault; and by leaving out whatever disturbs the others most and judging it by what the rest predicts, which withstands several.
+/// Either way keeps only what matters by itself, and the simpler explanation wins unless the other leaves much less unexplained.
 /// </summary>
 internal sealed class ChannelSearch(ChannelFit fit, int forces)
 {
@@ -37,9 +38,27 @@ internal sealed class ChannelSearch(ChannelFit fit, int forces)
     /// <summary>The corrections and, for each, the factor by which the misfit rises without it.</summary>
     public IReadOnlyList<(ChannelCorrection Correction, double Rise)> Find()
     {
-        List<ChannelCorrection> corrections = _redundancy >= RobustRedundancy ? Explain(Disturbing()) : [];
-        AddSingles(corrections);
-        return Confirm(corrections);
+        List<(ChannelCorrection Correction, double Rise)> sharp = Search([]);
+        if (_redundancy < RobustRedundancy)
+        {
+            return sharp;
+        }
+
+        List<(ChannelCorrection Correction, double Rise)> robust = Search(Explain(Disturbing()));
+        return Cost(robust) < Cost(sharp) ? robust : sharp;
+    }
+
+    private List<(ChannelCorrection Correction, double Rise)> Search(List<ChannelCorrection> start)
+    {
+        AddSingles(start);
+        return Confirm(start);
+    }
+
+    /// <summary>What is left unexplained, doubled by every correction that it takes.</summary>
+    private double Cost(List<(ChannelCorrection Correction, double Rise)> found)
+    {
+        fit.Apply(found.Select(entry => entry.Correction));
+        return Math.ScaleB(Math.Max(fit.Misfit(), Nothing), found.Count);
     }
 
     /// <summary>The channels without which the others agree.</summary>
@@ -181,9 +200,9 @@ internal sealed class ChannelSearch(ChannelFit fit, int forces)
     /// <summary>Drops, weakest first, what does not matter by itself while all others are in place.</summary>
     private List<(ChannelCorrection Correction, double Rise)> Confirm(List<ChannelCorrection> corrections)
     {
+        Refit(corrections);
         while (corrections.Count > 0)
         {
-            Refit(corrections);
             fit.Apply(corrections);
             double misfit = Math.Max(fit.Misfit(), Nothing);
             List<(ChannelCorrection Correction, double Rise)> rises = [.. corrections.Select(correction => (correction, MisfitWithout(correction, corrections) / misfit))];
@@ -194,6 +213,7 @@ internal sealed class ChannelSearch(ChannelFit fit, int forces)
             }
 
             corrections.Remove(weakest);
+            Refit(corrections);
         }
 
         return [];
