@@ -39,7 +39,7 @@ internal static class PageMarkup
     public static string Number(double value, string shown)
     {
         bool isFormat = shown.Length == 2 && shown[0] == 'F';
-        string text = !isFormat ? shown : double.IsFinite(value) ? value.ToString(shown, CultureInfo.InvariantCulture) : "–";
+        string text = !isFormat ? shown : double.IsFinite(value) ? value.ToString(shown, CultureInfo.InvariantCulture).Replace('-', '−') : "–";
         string sortsBy = double.IsFinite(value) ? value.ToString("R", CultureInfo.InvariantCulture) : "";
         return $"<td class=\"number\" data-value=\"{sortsBy}\">{Text(text)}</td>";
     }

@@ -8,6 +8,11 @@
   const button = (text, act) => { const b = element("button", text); b.type = "button"; b.onclick = act; return b; };
   const room = { left: 46, right: 22, top: 10, bottom: 36 };
   const charts = [];
+  const seen = new Map();
+  // A page of many diagrams opens at once when each is drawn only as it comes near; printing draws all of them.
+  const watcher = new IntersectionObserver(entries => {
+    for (const entry of entries) if (entry.isIntersecting) { watcher.unobserve(entry.target); seen.get(entry.target)(); }
+  }, { rootMargin: "600px" });
 
   function plainTicks(low, high) {
     const ticks = [];
@@ -147,7 +152,8 @@
       if (keys[event.key] && !event.ctrlKey && !event.metaKey) { event.preventDefault(); keys[event.key](); }
     };
     charts.push(draw);
-    draw();
+    seen.set(canvas, draw);
+    watcher.observe(canvas);
   }
 
   function sortable(table) {
@@ -172,5 +178,6 @@
   document.querySelectorAll("table").forEach(sortable);
   addEventListener("resize", redraw);
   for (const query of ["print", "(prefers-color-scheme: dark)"]) matchMedia(query).addEventListener("change", redraw);
+  addEventListener("beforeprint", redraw);
   addEventListener("beforeprint", () => document.querySelectorAll("details").forEach(item => { item.open = true; }));
 })();
