@@ -1,6 +1,6 @@
 using System.Globalization;
-using Boltup.Engine.Acoustics;
 using Boltup.Cli.Terminal;
+using Boltup.Engine.Acoustics;
 using Boltup.Engine.Paths;
 using Boltup.Engine.Prediction;
 using Boltup.Reports.Results;

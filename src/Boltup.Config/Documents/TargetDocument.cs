@@ -17,5 +17,6 @@ public sealed record TargetDocument(
     IReadOnlyList<TargetLimit> Limits)
 {
     public Target ToTarget() => new(
-        Name.Value, Response.Value, [.. Operations.Select(operation => operation.Value)], Weighting, FromHz, ToHz, Limits) { Origin = Name.Span };
+        Name.Value, Response.Value, [.. Operations.Select(operation => operation.Value)], Weighting, FromHz, ToHz, Limits)
+    { Origin = Name.Span };
 }

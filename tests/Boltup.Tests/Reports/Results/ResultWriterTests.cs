@@ -43,7 +43,7 @@ public sealed class ResultWriterTests : IDisposable
         Assert.Contains("a-b-c.png", names);
         Assert.Contains("a-b-c-2.png", names);
         Assert.Contains("a-b-joint-forces-2.png", names);
-        Assert.Equal(4 + 7, names.Count);
+        Assert.Equal(6 + 7, names.Count);
     }
 
     [Fact]
