@@ -16,6 +16,9 @@ public static class FrfQuality
     /// <summary>Mean of |Yᵢⱼ − Yⱼᵢ| over the mean of |Yᵢⱼ| + |Yⱼᵢ| from which a pair is worth a warning (common practice: about 1 dB).</summary>
     private const double TolerableAsymmetry = 0.06;
 
+    /// <summary>Share of the driving points below which an FRF is zero for all that matters, and its two directions may differ as they like.</summary>
+    private const double Negligible = 1e-3;
+
     /// <summary>Checks the interface FRFs of a part.</summary>
     /// <param name="dofs">Names of the first rows and columns of the matrix, which are the same dofs.</param>
     /// <param name="frf">Receptances; further rows and columns are ignored.</param>
@@ -99,19 +102,24 @@ public static class FrfQuality
     {
         double difference = 0;
         double sum = 0;
+        double driving = 0;
         for (int tile = 0; tile < frf.TileCount; tile++)
         {
             ReadOnlySpan<double> a = frf.Entry(tile, first.Row, second.Column);
             ReadOnlySpan<double> b = frf.Entry(tile, second.Row, first.Column);
+            ReadOnlySpan<double> own = frf.Entry(tile, first.Row, first.Column);
+            ReadOnlySpan<double> other = frf.Entry(tile, second.Row, second.Column);
             for (int lane = 0; lane < Tiling.Lanes; lane++)
             {
                 int imaginary = lane + Tiling.Lanes;
                 difference += Length(a[lane] - b[lane], a[imaginary] - b[imaginary]);
                 sum += Length(a[lane], a[imaginary]) + Length(b[lane], b[imaginary]);
+                driving += 2 * Math.Sqrt(Length(own[lane], own[imaginary]) * Length(other[lane], other[imaginary]));
             }
         }
 
-        return sum > 0 ? difference / sum : 0;
+        double size = Math.Max(sum, Negligible * driving);
+        return size > 0 ? difference / size : 0;
     }
 
     private static double Length(double real, double imaginary) => Math.Sqrt(real * real + imaginary * imaginary);

@@ -2,6 +2,7 @@ using System.Numerics;
 using Boltup.Engine;
 using Boltup.Engine.Diagnostics;
 using Boltup.Engine.Geometry;
+using Boltup.Engine.Parts;
 using Boltup.Engine.Spectra;
 using Boltup.Engine.VirtualPoints;
 using Boltup.Tests.Support;
@@ -30,6 +31,15 @@ public class VirtualPointTests
                 body.Axis.Omega(4), Place, Translation(row), Rotating(row), Place, Translation(column), Rotating(column));
             Assert.Equal(0, (expected - frf[4, row, column]).Magnitude, Exact * Scale(frf, row, column));
         }
+    }
+
+    /// <summary>Entries that are zero in theory are round-off in the data: no reason to call the body not reciprocal.</summary>
+    [Fact]
+    public void Judge_SixDofFrfOfARigidBody_IsReciprocal()
+    {
+        var body = new RigidBody();
+        FrfQuality.Judge("body", null, FrfQuality.Measure(Virtual(body, body.Point(Vector3d.Zero, Rotation.None))), _diagnostics);
+        Assert.Empty(_diagnostics.Items);
     }
 
     /// <summary>Hand-computed: a sensor 0.1 m along x sees +0.1 m of its z motion for −1 rad about y, and of its y motion for +1 rad about z.</summary>
