@@ -18,6 +18,7 @@ internal static class PredictionSummary
             PrintLevels(screen, result);
             PathSummary.Print(screen, result);
             TargetSummary.Print(screen, result);
+            ExposureSummary.Print(screen, result);
         }
 
         screen.Out.WriteLine(Cautions.Text);

@@ -44,7 +44,7 @@ internal sealed partial class AssemblyBinder
     {
         var map = (YamlMap)entry.Value;
         return BindDof(map["at"]!) is Marked<AssemblyDof> at
-            ? new ResponseDocument(entry.MarkedKey(), at, BindAs(map["as"], at))
+            ? new ResponseDocument(entry.MarkedKey(), at, BindAs(map["as"], at)) { Weighting = BindWeighting(map["weighting"]) }
             : null;
     }
 

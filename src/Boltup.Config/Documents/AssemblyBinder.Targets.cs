@@ -12,14 +12,26 @@ internal sealed partial class AssemblyBinder
     private TargetDocument BindTarget(YamlEntry entry)
     {
         var map = (YamlMap)entry.Value;
+        CheckBand(map["from"], map["to"]);
         return new TargetDocument(
             entry.MarkedKey(),
             map["response"]!.MarkedText(),
             [.. map["operations"].Items().Select(item => item.MarkedText())],
-            map["weighting"]?.Text() switch { "A" => FrequencyWeighting.A, "C" => FrequencyWeighting.C, _ => FrequencyWeighting.Z },
+            BindWeighting(map["weighting"]),
             map["from"]?.Si(Dimension.Frequency),
             map["to"]?.Si(Dimension.Frequency),
             map["limit"] is YamlNode limit ? [new TargetLimit(null, limit.Si(Dimension.Level))] : [.. map["third_octaves"].Entries().Select(BindBand).OfType<TargetLimit>()]);
+    }
+
+    private static Marked<FrequencyWeighting>? BindWeighting(YamlNode? node) =>
+        node is null ? null : new(Enum.Parse<FrequencyWeighting>(node.Text()), node.Span);
+
+    private void CheckBand(YamlNode? from, YamlNode? to)
+    {
+        if (from is not null && to is not null && to.Si(Dimension.Frequency) < from.Si(Dimension.Frequency))
+        {
+            diagnostics.Error(ConfigCodes.BadFrequencies, "`to` is below `from`", to.Span, notes: $"`from` is at {from.Span}");
+        }
     }
 
     private TargetLimit? BindBand(YamlEntry entry)

@@ -36,6 +36,7 @@ internal sealed class AssemblyReferences(AssemblyDocument assembly, DiagnosticBa
             }
         }
 
+        WeightingCheck.Run(assembly, diagnostics);
         foreach (ResponseDocument response in assembly.Responses)
         {
             CheckPoint(response.At.Value.Part, response.At.Value.Dof.Point, response.At.Span);

@@ -94,6 +94,7 @@ public static class AssemblyShape
     [
         new("at", new TextKind("`part.point.direction`"), "the dof", IsRequired: true),
         new("as", new ChoiceKind("acceleration", "velocity", "displacement"), "quantity of a motion; acceleration by default"),
+        new("weighting", new ChoiceKind("Wk", "Wd", "Wh"), "how people feel it: body vertical, body horizontal, hand and arm"),
     ]);
 
     private static readonly QuantityKind Level = new(Dimension.Level, "45");
@@ -103,7 +104,7 @@ public static class AssemblyShape
         new("response", new TextKind("the name of a response"), "the response that it limits", IsRequired: true),
         new("limit", Level, "overall level that must not be exceeded, in dB re the reference of the quantity"),
         new("third_octaves", new NamedKind("band", Level, Minimum: 1), "levels of third octaves, by their nominal centres such as `63 Hz`"),
-        new("weighting", new ChoiceKind("A", "C", "Z"), "frequency weighting of sound; none (Z) by default"),
+        new("weighting", new ChoiceKind("A", "C", "Z", "Wk", "Wd", "Wh"), "frequency weighting of sound or of vibration that people feel; none (Z) by default"),
         new("from", new QuantityKind(Dimension.Frequency, "20", Sign.NotNegative), "first frequency that counts"),
         new("to", new QuantityKind(Dimension.Frequency, "1000", Sign.Positive), "last frequency that counts"),
         new("operations", new ListKind(new TextKind("the name of an operation"), IsSet: true), "operations that it holds for; all by default"),

@@ -11,12 +11,12 @@ public sealed record TargetDocument(
     Marked<string> Name,
     Marked<string> Response,
     IReadOnlyList<Marked<string>> Operations,
-    FrequencyWeighting Weighting,
+    Marked<FrequencyWeighting>? Weighting,
     double? FromHz,
     double? ToHz,
     IReadOnlyList<TargetLimit> Limits)
 {
     public Target ToTarget() => new(
-        Name.Value, Response.Value, [.. Operations.Select(operation => operation.Value)], Weighting, FromHz, ToHz, Limits)
+        Name.Value, Response.Value, [.. Operations.Select(operation => operation.Value)], Weighting?.Value ?? FrequencyWeighting.Z, FromHz, ToHz, Limits)
     { Origin = Name.Span };
 }

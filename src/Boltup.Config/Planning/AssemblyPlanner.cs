@@ -85,5 +85,9 @@ public sealed class AssemblyPlanner
     private static JointEnd PlanEnd(JointEndDocument end) => end.IsGround ? JointEnd.Ground : new JointEnd(end.Part, end.Point!);
 
     private static Response PlanResponse(ResponseDocument document) =>
-        new(document.Name.Value, document.At.Value.Part, document.At.Value.Dof, document.Quantity) { Origin = document.At.Span };
+        new(document.Name.Value, document.At.Value.Part, document.At.Value.Dof, document.Quantity)
+        {
+            Origin = document.At.Span,
+            Weighting = document.Weighting?.Value,
+        };
 }

@@ -8,6 +8,9 @@ namespace Boltup.Engine.Acoustics;
 /// </summary>
 public sealed class BandSums
 {
+    /// <summary>Lines below which the splitting at its edges decides the level of a band more than the spectrum does.</summary>
+    public const int FewestLines = 5;
+
     private readonly (int Line, double Share)[][] _parts;
     private readonly double[] _edges;
 
@@ -33,6 +36,10 @@ public sealed class BandSums
 
     /// <summary>Width in Hz of the cell for which a line stands.</summary>
     public double CellWidthHz(int line) => _edges[line + 1] - _edges[line];
+
+    /// <summary>The share of a line's cell that lies between two frequencies.</summary>
+    public double ShareOf(int line, double lowerHz, double upperHz) =>
+        Math.Max(0, Math.Min(_edges[line + 1], upperHz) - Math.Max(_edges[line], lowerHz)) / CellWidthHz(line);
 
     /// <summary>Sum of the powers in a band.</summary>
     /// <param name="power">Power of each line, such as the square of an rms value; not negative.</param>

@@ -30,7 +30,7 @@ internal sealed class OperationReader(AssemblyModel assembly, CouplingLayout lay
             spectrum[i] *= Derivative(order, assembly.Axis.Omega(lines[i]), keepPhase: IsOneCase(cases));
         }
 
-        return new ResponseSpectrum(response.Name, $"{response.Part}.{response.Dof}", response.As, response.Unit, spectrum);
+        return new ResponseSpectrum(response.Name, $"{response.Part}.{response.Dof}", response.As, response.Unit, spectrum) { Weighting = response.Weighting };
     }
 
     private JointForceSpectrum ReadJointForce(Constraint constraint, int row, Range cases, int[] lines) => new(

@@ -1,4 +1,5 @@
 using System.Numerics;
+using Boltup.Engine.Acoustics;
 using Boltup.Engine.Diagnostics;
 using Boltup.Engine.Paths;
 using Boltup.Engine.Spectra;
@@ -50,7 +51,11 @@ public sealed record OperationResult(
 /// <param name="Dof">Where it is, as <c>part.point.direction</c>.</param>
 /// <param name="Unit">SI unit of the values.</param>
 /// <param name="Values">One value per line; of an energy sum the magnitude, with no phase.</param>
-public sealed record ResponseSpectrum(string Name, string Dof, Quantity Quantity, string Unit, IReadOnlyList<Complex> Values);
+public sealed record ResponseSpectrum(string Name, string Dof, Quantity Quantity, string Unit, IReadOnlyList<Complex> Values)
+{
+    /// <summary>The weighting that the response asks for; null for none.</summary>
+    public FrequencyWeighting? Weighting { get; init; }
+}
 
 /// <summary>The force a joint carries from the first to the second point of its <c>between</c>, in the axes of the assembly.</summary>
 /// <param name="Joint">

@@ -1,3 +1,4 @@
+using Boltup.Engine.Acoustics;
 using Boltup.Engine.Diagnostics;
 using Boltup.Engine.Spectra;
 
@@ -8,6 +9,9 @@ namespace Boltup.Engine.Prediction;
 public sealed record Response(string Name, string Part, Dof Dof, Quantity As)
 {
     public SourceSpan? Origin { get; init; }
+
+    /// <summary>How people at the response feel its vibration; null where nobody said so.</summary>
+    public FrequencyWeighting? Weighting { get; init; }
 
     /// <summary>SI unit of the response.</summary>
     public string Unit => As == Quantity.Pressure

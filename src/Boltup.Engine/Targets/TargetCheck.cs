@@ -22,6 +22,7 @@ public static class TargetCheck
                 TargetVerdict verdict = Judge(target, operation);
                 verdicts.Add(verdict);
                 SayNotJudged(verdict, operation, diagnostics);
+                SayThinBands(target, operation, diagnostics);
             }
         }
 
@@ -55,7 +56,7 @@ public static class TargetCheck
         var sums = new BandSums(axis);
         foreach (TargetLimit limit in target.Limits)
         {
-            double[] factors = [.. Enumerable.Range(0, axis.Count).Select(line => Counts(target, axis[line]) ? SoundWeighting.PowerFactor(target.Weighting, axis[line]) : 0)];
+            double[] factors = [.. Enumerable.Range(0, axis.Count).Select(line => Counts(target, axis[line]) ? target.Weighting.PowerFactor(axis[line]) : 0)];
             if (limit.Band is { } band)
             {
                 int place = sums.Bands.TakeWhile(each => each != band).Count();
@@ -87,6 +88,20 @@ public static class TargetCheck
 
     private static double MeanSquare(Complex value, Amplitude amplitude) =>
         (value.Real * value.Real + value.Imaginary * value.Imaginary) * (amplitude == Amplitude.Peak ? 0.5 : 1);
+
+    private static void SayThinBands(Target target, OperationResult operation, DiagnosticBag diagnostics)
+    {
+        var sums = new BandSums(operation.Axis);
+        OctaveBand[] thin = [.. sums.Bands.Where((band, i) => sums.LinesIn(i) is > 0 and < BandSums.FewestLines && target.Limits.Any(limit => limit.Band == band))];
+        if (thin.Length > 0)
+        {
+            diagnostics.Warning(
+                EngineCodes.FewLinesInBand,
+                $"target `{target.Name}`: third octaves with fewer than {BandSums.FewestLines} lines of operation `{operation.Name}`: {string.Join(", ", thin)}",
+                target.Origin,
+                "use finer lines, or limit the level over a wider band with `limit`, `from` and `to`");
+        }
+    }
 
     private static void SayNotJudged(TargetVerdict verdict, OperationResult operation, DiagnosticBag diagnostics)
     {

@@ -1,15 +1,13 @@
-using System.Numerics;
 using Boltup.Engine.Acoustics;
 using Boltup.Engine.Prediction;
 using Boltup.Engine.Spectra;
 
 namespace Boltup.Reports.Results;
 
-/// <summary>Writes <c>levels.csv</c> and <c>bands.csv</c>: levels in dB re the reference of the quantity, weighted where it is sound.</summary>
+/// <summary>Writes <c>levels.csv</c> and <c>bands.csv</c>: levels in dB re the reference of the quantity, weighted where it is sound or its response says how people feel it.</summary>
 public static class LevelTables
 {
     private static readonly FrequencyWeighting[] OfSound = [FrequencyWeighting.Z, FrequencyWeighting.A, FrequencyWeighting.C];
-    private static readonly FrequencyWeighting[] OfMotion = [FrequencyWeighting.Z];
 
     /// <summary>Overall levels.</summary>
     public static void WriteLevels(Stream output, PredictionResult result)
@@ -50,19 +48,19 @@ public static class LevelTables
     private static IEnumerable<(OperationResult, ResponseSpectrum, FrequencyWeighting)> Cases(PredictionResult result) =>
         from operation in result.Operations
         from response in operation.Responses
-        from weighting in response.Quantity == Quantity.Pressure ? OfSound : OfMotion
+        from weighting in WeightingsOf(response)
         select (operation, response, weighting);
 
+    private static FrequencyWeighting[] WeightingsOf(ResponseSpectrum response) =>
+        response.Quantity == Quantity.Pressure ? OfSound
+        : response.Weighting is { } own ? [FrequencyWeighting.Z, own]
+        : [FrequencyWeighting.Z];
+
     private static byte[] KeyOf(OperationResult operation, ResponseSpectrum response, FrequencyWeighting weighting) =>
-        [.. CsvBytes.Field(operation.Name), (byte)',', .. CsvBytes.Field(response.Name), (byte)',', (byte)weighting.ToString()[0]];
+        [.. CsvBytes.Field(operation.Name), (byte)',', .. CsvBytes.Field(response.Name), (byte)',', .. CsvBytes.Field(weighting.ToString())];
 
-    private static double[] Powers(ResponseSpectrum response, OperationResult operation, FrequencyWeighting weighting)
-    {
-        double meanSquare = operation.Amplitude == Amplitude.Peak ? 0.5 : 1;
-        return [.. response.Values.Select((value, line) => meanSquare * Square(value) * SoundWeighting.PowerFactor(weighting, operation.Axis[line]))];
-    }
-
-    private static double Square(Complex value) => value.Real * value.Real + value.Imaginary * value.Imaginary;
+    private static double[] Powers(ResponseSpectrum response, OperationResult operation, FrequencyWeighting weighting) =>
+        PowerSpectrum.Of(response.Values, operation.Axis, operation.Amplitude).Weighted(weighting);
 
     /// <summary>Empty for silence, which has no level.</summary>
     private static CsvBytes Level(CsvBytes csv, double power, ResponseSpectrum response) => power > 0

@@ -12,6 +12,7 @@ public static class ResultWriter
     public const string JointForcesFile = "joint_forces.csv";
     public const string LevelsFile = "levels.csv";
     public const string BandsFile = "bands.csv";
+    public const string TonesFile = "tones.csv";
     public const string ContributionsFile = "contributions.csv";
     public const string ContributionLinesFile = "contribution_lines.csv";
     public const string SummaryFile = "summary.json";
@@ -36,6 +37,7 @@ public static class ResultWriter
             () => output.Write(ReportFile, stream => PageRenderer.Write(stream, result, fingerprints, options.ProgramVersion)),
             () => output.Write(LevelsFile, stream => LevelTables.WriteLevels(stream, result)),
             () => output.Write(BandsFile, stream => LevelTables.WriteBands(stream, result)),
+            () => output.Write(TonesFile, stream => ToneTable.Write(stream, result)),
             () => WritePaths(result, output, options),
             () => WritePictures(result, fingerprints, output, options));
         return output.Commit(diagnostics);

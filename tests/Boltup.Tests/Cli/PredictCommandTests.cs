@@ -20,7 +20,7 @@ public class PredictCommandTests
             [
                 ".boltup-files", "5400-rpm-driver-ear-paths.png", "5400-rpm-driver-ear.png", "5400-rpm-floor-paths.png", "5400-rpm-floor.png",
                 "5400-rpm-joint-forces.png", "5400-rpm-passenger-ear-paths.png", "5400-rpm-passenger-ear.png", "5400-rpm-seat-rail-paths.png",
-                "5400-rpm-seat-rail.png", "5400-rpm-steering-column-paths.png", "5400-rpm-steering-column.png", "bands.csv", "contributions.csv", "joint_forces.csv", "levels.csv", "mount-base.png", "overview.png", "report.html", "responses.csv", "summary.json",
+                "5400-rpm-seat-rail.png", "5400-rpm-steering-column-paths.png", "5400-rpm-steering-column.png", "bands.csv", "contributions.csv", "joint_forces.csv", "levels.csv", "mount-base.png", "overview.png", "report.html", "responses.csv", "summary.json", "tones.csv",
             ],
             files);
     }
@@ -56,6 +56,17 @@ public class PredictCommandTests
         Assert.Equal(-5.64, target.GetProperty("margin_db").GetDouble(), 0.01);
         Assert.Equal(-5.64, target.GetProperty("all_forces_change_db").GetDouble(), 0.01);
         Assert.Contains("Target driver ear overall, 5400 rpm: missed by 5.6 dB", File.ReadAllText(folder.PathTo("out", "report.html")), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Predict_Demo_ReportsWhatPeopleFeelAndHear()
+    {
+        using var folder = new TemporaryFolder();
+        CommandRun run = CommandRun.Of("predict", Demo, "-o", folder.PathTo("out"), "--no-pictures");
+        Assert.Contains("seat rail: Wk-weighted 0.0154 m/s² rms", run.Out, StringComparison.Ordinal);
+        Assert.Contains("Directive 2002/44/EC, hand-arm vibration: action value 2.5 m/s², limit value 5 m/s²", run.Out, StringComparison.Ordinal);
+        Assert.Contains(File.ReadLines(folder.PathTo("out", "levels.csv")), row => row.StartsWith("5400 rpm,steering column,Wh,20,1000,", StringComparison.Ordinal));
+        Assert.Contains(File.ReadLines(folder.PathTo("out", "tones.csv")), row => row.StartsWith("5400 rpm,driver ear,360,", StringComparison.Ordinal));
     }
 
     [Fact]

@@ -4,6 +4,7 @@ namespace Boltup.Tests.Config;
 internal static class AssemblyCases
 {
     private const string Head = "boltup: assembly/1\nparts: { source: source.part.yaml, body: body.part.yaml }\n";
+    private const string Ear = Head + "responses: { ear: { at: body.ear.p } }\n";
     private const string Soft = Head + "mounts: { soft: { stiffness: { x: 90 N/mm } } }\n";
 
     public static readonly DiagnosticCase[] All =
@@ -26,6 +27,10 @@ internal static class AssemblyCases
         new("CFG018", "boltup: assembly/1\nparts: «{}»\n", "at least 1 part"),
         new("CFG014", Head + "targets: { ear: «60 dB» }\n", "expected a map"),
         new("CFG015", Head + "targets: { ear: «{ response: r }» }\n", "`limit`, `third_octaves`"),
+        new("CFG057", Ear + "targets: { t: { response: ear, limit: 60 dB, from: 200 Hz, to: «20 Hz» } }\n", "`to` is below `from`"),
+        new("CFG101", Ear + "targets: { t: { response: ear, limit: 60 dB, weighting: «Wk» } }\n", "sound takes A, C or Z"),
+        new("CFG101", Head + "responses: { r: { at: body.b1.z } }\ntargets: { t: { response: r, limit: 60 dB, weighting: «A» } }\n", "sound pressure"),
+        new("CFG101", Head + "responses: { r: { at: body.b1.z, as: velocity, weighting: «Wh» } }\n", "acceleration"),
         new("CFG050", Head + "responses: { ear: { at: body.e.p } }\ntargets: { t: { response: «eer», limit: 60 dB } }\n", "did you mean `ear`"),
         new("CFG050", Head + "responses: { ear: { at: body.e.p } }\ntargets: { t: { response: ear, limit: 60 dB, operations: [«idle»] } }\n", "`idle`"),
         new("CFG030", Head + "responses: { ear: { at: body.e.p } }\ntargets: { t: { response: ear, limit: «60» } }\n", "60 dB"),

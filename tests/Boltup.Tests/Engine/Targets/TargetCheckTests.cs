@@ -59,6 +59,16 @@ public class TargetCheckTests
         Assert.Equal(EngineCodes.TargetOutsideBand, Assert.Single(_diagnostics.Items).Code);
     }
 
+    [Fact]
+    public void Run_BandOfFewLines_WarnsAndNamesIt()
+    {
+        Judge(new Target(
+            "t", "ear", [], FrequencyWeighting.Z, null, null, [new TargetLimit(OctaveBand.Of(125), 100), new TargetLimit(OctaveBand.Of(1000), 100)]));
+        Diagnostic warning = Assert.Single(_diagnostics.Items);
+        Assert.Equal(EngineCodes.FewLinesInBand, warning.Code);
+        Assert.EndsWith(": 125 Hz", warning.Message, StringComparison.Ordinal);
+    }
+
     private TargetVerdict Judge(Target target, Amplitude amplitude = Amplitude.Rms) =>
         Assert.Single(TargetCheck.Run([target], [Operation(amplitude)], _diagnostics));
 

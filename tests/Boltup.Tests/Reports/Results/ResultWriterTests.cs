@@ -16,7 +16,7 @@ public sealed class ResultWriterTests : IDisposable
     {
         IReadOnlyList<string>? names = TinyResult.Write(_folder.PathTo("out"), _diagnostics);
 
-        Assert.Equal(["bands.csv", "joint_forces.csv", "levels.csv", "report.html", "responses.csv", "summary.json"], names);
+        Assert.Equal(["bands.csv", "joint_forces.csv", "levels.csv", "report.html", "responses.csv", "summary.json", "tones.csv"], names);
         Assert.Empty(_diagnostics.Items);
     }
 
@@ -43,7 +43,7 @@ public sealed class ResultWriterTests : IDisposable
         Assert.Contains("a-b-c.png", names);
         Assert.Contains("a-b-c-2.png", names);
         Assert.Contains("a-b-joint-forces-2.png", names);
-        Assert.Equal(6 + 7, names.Count);
+        Assert.Equal(7 + 7, names.Count);
     }
 
     [Fact]
