@@ -39,6 +39,14 @@ public static class ConfigLoader
         return new LoadResult<ForcesDocument>(forces, load.FilesRead);
     }
 
+    /// <summary>Loads the pins of an assembly; the files that they name need not be there.</summary>
+    public static LoadResult<PinsDocument> LoadPins(string path, LoadOptions options, DiagnosticBag diagnostics)
+    {
+        var load = new DocumentLoad(path, options);
+        PinsDocument? pins = load.Pins(diagnostics);
+        return new LoadResult<PinsDocument>(pins, load.FilesRead);
+    }
+
     /// <summary>The kind of a document by its first key, or null with a diagnostic when it has none that this version reads.</summary>
     public static DocumentKind? KindOf(string path, LoadOptions options, DiagnosticBag diagnostics) =>
         new DocumentLoad(path, options).Kind(diagnostics);

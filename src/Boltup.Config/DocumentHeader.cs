@@ -11,7 +11,7 @@ internal static class DocumentHeader
     private const string Version = "1";
 
     /// <summary>Names in the order of <see cref="DocumentKind"/>.</summary>
-    internal static readonly string[] Supported = ["part", "assembly", "bench", "forces"];
+    internal static readonly string[] Supported = ["part", "assembly", "bench", "forces", "pins"];
     private static readonly string[] Announced = ["study"];
 
     /// <summary>Whether the document is of the expected kind.</summary>

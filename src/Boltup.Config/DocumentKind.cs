@@ -7,4 +7,5 @@ public enum DocumentKind
     Assembly,
     Bench,
     Forces,
+    Pins,
 }

@@ -93,6 +93,20 @@ internal sealed class DocumentLoad
         return found.HasErrors ? null : forces;
     }
 
+    public PinsDocument? Pins(DiagnosticBag diagnostics)
+    {
+        var found = new DiagnosticBag();
+        PinsDocument? pins = null;
+        if (_reader.Read(_topPath, named: null, found) is YamlMap root && DocumentHeader.Is(root, DocumentKind.Pins, found))
+        {
+            new ShapeValidator(found).Validate(root, PinsShape.Root);
+            pins = found.HasErrors ? null : new PinsBinder(found).Bind(root);
+        }
+
+        diagnostics.AddRange(PlaceOrder.Of(found.Items));
+        return found.HasErrors ? null : pins;
+    }
+
     private BenchDocument? BindBench(DiagnosticBag found)
     {
         if (_reader.Read(_topPath, named: null, found) is not YamlMap root || !DocumentHeader.Is(root, DocumentKind.Bench, found))

@@ -8,6 +8,9 @@ public sealed record LoadOptions
     /// <summary>Whether files outside the tree of the repository, or of the top document's folder, may be named.</summary>
     public bool AllowOutsidePaths { get; init; }
 
+    /// <summary>Whether data files must be those that the pins beside the assembly name, where there are pins.</summary>
+    public bool ChecksPins { get; init; } = true;
+
     /// <summary>The folder from which the user sees files; paths in messages are relative to it.</summary>
     public string WorkingDirectory { get; init; } = Directory.GetCurrentDirectory();
 

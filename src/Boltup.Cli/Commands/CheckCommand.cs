@@ -62,6 +62,9 @@ internal sealed class CheckCommand(Screen screen)
             case DocumentKind.Forces:
                 ConfigLoader.LoadForces(file, options, diagnostics);
                 break;
+            case DocumentKind.Pins:
+                ConfigLoader.LoadPins(file, options, diagnostics);
+                break;
             case DocumentKind.Assembly:
                 using (AssemblyPlan? plan = AssemblyPlanner.Plan(file, options, diagnostics))
                 {

@@ -14,6 +14,7 @@ internal static class CommandTree
         IdentifyCommand.Build(screen),
         MountCommand.Build(screen),
         CheckCommand.Build(screen),
+        PinCommand.Build(screen),
         InspectCommand.Build(screen),
         SchemaCommand.Build(screen),
         ExplainCommand.Build(screen),

@@ -10,7 +10,7 @@ internal static class SchemaCommand
 {
     public static Command Build(Screen screen)
     {
-        var kind = new Argument<DocumentKind>("KIND") { Description = "part, assembly, bench or forces", HelpName = "part|assembly|bench|forces" };
+        var kind = new Argument<DocumentKind>("KIND") { Description = "part, assembly, bench, forces or pins", HelpName = "part|assembly|bench|forces|pins" };
         var command = new Command("schema", "Print the JSON Schema of a document kind, for editors.\n\nExample: boltup schema assembly > assembly.schema.json")
         {
             kind,

@@ -1,3 +1,4 @@
+using Boltup.Config.Documents;
 using Boltup.Config.Yaml;
 using Boltup.Engine.Prediction;
 
@@ -11,14 +12,24 @@ public sealed class AssemblyPlan : IDisposable
 {
     private readonly DataLibrary _library;
 
-    internal AssemblyPlan(AssemblyModel assembly, IReadOnlyList<SourceFile> inputs, DataLibrary library) =>
-        (Assembly, Inputs, _library) = (assembly, inputs, library);
+    internal AssemblyPlan(AssemblyDocument document, AssemblyModel assembly, IReadOnlyList<SourceFile> documents, DataLibrary library)
+    {
+        (Document, Assembly, _library) = (document, assembly, library);
+        DataFiles = [.. library.Files];
+        Inputs = [.. documents, .. DataFiles];
+    }
+
+    /// <summary>The documents that the plan was made from.</summary>
+    public AssemblyDocument Document { get; }
 
     /// <summary>The assembly for the engine; its measured parts read their curves when they are evaluated.</summary>
     public AssemblyModel Assembly { get; }
 
     /// <summary>Every file that the result depends on, documents first.</summary>
     public IReadOnlyList<SourceFile> Inputs { get; }
+
+    /// <summary>The inputs that are no documents.</summary>
+    public IReadOnlyList<SourceFile> DataFiles { get; }
 
     public void Dispose() => _library.Dispose();
 }

@@ -1,4 +1,5 @@
 using Boltup.Config.Documents;
+using Boltup.Config.Pinning;
 using Boltup.Config.Yaml;
 using Boltup.Engine.Coupling;
 using Boltup.Engine.Diagnostics;
@@ -32,13 +33,25 @@ public sealed class AssemblyPlanner
     {
         var planner = new AssemblyPlanner(document, options, diagnostics);
         AssemblyModel? assembly = planner.Plan();
-        if (assembly is not null)
+        if (assembly is not null && planner.ArePinsKept(options))
         {
-            return new AssemblyPlan(assembly, [.. filesRead, .. planner._library.Files], planner._library);
+            return new AssemblyPlan(document, assembly, filesRead, planner._library);
         }
 
         planner._library.Dispose();
         return null;
+    }
+
+    private bool ArePinsKept(LoadOptions options)
+    {
+        var found = new DiagnosticBag();
+        if (options.ChecksPins)
+        {
+            new PinCheck([.. _library.Files], options, found).Run(_document);
+        }
+
+        _diagnostics.AddRange(found.Items);
+        return !found.HasErrors;
     }
 
     private AssemblyModel? Plan()

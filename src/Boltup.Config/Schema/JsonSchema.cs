@@ -20,6 +20,7 @@ public static class JsonSchema
             DocumentKind.Part => PartShape.Root,
             DocumentKind.Bench => BenchShape.Root,
             DocumentKind.Forces => ForcesShape.Root,
+            DocumentKind.Pins => PinsShape.Root,
             _ => AssemblyShape.Root,
         };
         using var stream = new MemoryStream();
