@@ -1,5 +1,6 @@
 using System.Globalization;
 using BenchmarkDotNet.Running;
+using Boltup.Benchmarks.Comparing;
 using Boltup.Benchmarks.Files;
 using Boltup.Benchmarks.Kernels;
 using Boltup.Benchmarks.Paths;
@@ -25,6 +26,12 @@ if (args is ["files"])
 if (args is ["paths"])
 {
     PathTimes.Run(Console.Out);
+    return;
+}
+
+if (args is ["compare"])
+{
+    CompareTimes.Run(Console.Out);
     return;
 }
 

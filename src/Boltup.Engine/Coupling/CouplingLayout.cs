@@ -55,6 +55,9 @@ public sealed class CouplingLayout
 
     public PartLayout this[string part] => _byName[part];
 
+    /// <summary>Place of a part in <see cref="Parts"/>.</summary>
+    public int IndexOf(string part) => Parts.TakeWhile(candidate => candidate.Part.Name != part).Count();
+
     private void AddEnds(int row)
     {
         Constraint constraint = Constraints[row];

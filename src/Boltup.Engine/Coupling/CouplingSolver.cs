@@ -146,18 +146,7 @@ internal sealed class CouplingSolver
             PartLayout layout = _solver._layout.Parts[part];
             TiledMatrix frf = _solver._frfs[part]!;
             Span<double> total = _partForces.Tile(0)[..(frf.Columns * _cases * Tiling.EntryLength)];
-            total.Clear();
-            _forces[part]?.Tile(tile).CopyTo(total);
-            ReadOnlySpan<double> lambda = _solution.JointForces.Tile(tile);
-            foreach (ConstraintEnd end in layout.Ends)
-            {
-                for (int column = 0; column < _cases; column++)
-                {
-                    TileEntry.AddScaled(
-                        total, end.Interface * _cases + column, lambda, end.Constraint * _cases + column, -end.Sign);
-                }
-            }
-
+            PartLoads.Fill(layout, frf.Columns, _forces[part], _solution.JointForces.Tile(tile), tile, _cases, total);
             ReadOnlySpan<double> responseRows = frf.Tile(tile)[(layout.InterfaceCount * frf.Columns * Tiling.EntryLength)..];
             BatchProduct.Multiply(responseRows, total, responses.Tile(tile), layout.ResponseCount, frf.Columns, _cases);
         }

@@ -1,6 +1,7 @@
 using Boltup.Engine.Coupling;
 using Boltup.Engine.Kernels;
 using Boltup.Engine.Prediction;
+using Boltup.Engine.Sensitivity;
 using Boltup.Engine.Spectra;
 
 namespace Boltup.Engine.Paths;
@@ -36,15 +37,23 @@ internal sealed class PathKernel
         if (_order > 0)
         {
             FillJoints(tile);
-            SolveUnitForces(tile, factored);
-            BatchProduct.Multiply(
-                _target.FromJoints.Tile(tile), _lambda.Tile(0), fromForces, _responses.Length, _order, _forces.Length);
+            if (_forces.Length > 0)
+            {
+                SolveUnitForces(tile, factored);
+                BatchProduct.Multiply(
+                    _target.FromJoints.Tile(tile), _lambda.Tile(0), fromForces, _responses.Length, _order, _forces.Length);
+            }
         }
 
         AddDirect(tile, fromForces);
         for (int response = 0; response < _responses.Length; response++)
         {
             Differentiate(tile, response);
+        }
+
+        if (_order > 0)
+        {
+            AdjointKernel.Fill(_layout, _target, tile, factored);
         }
     }
 

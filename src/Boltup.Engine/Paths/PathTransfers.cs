@@ -25,6 +25,7 @@ public sealed class PathTransfers
         (Axis, Responses, Forces, Constraints) = (axis, responses, forces, layout.Constraints);
         FromForces = new TiledMatrix(axis.Count, responses.Count, forces.Count);
         FromJoints = new TiledMatrix(axis.Count, responses.Count, Constraints.Count);
+        Adjoint = new TiledMatrix(axis.Count, Constraints.Count, responses.Count);
         Direct = responses.Any(response => forces.Any(force => force.Part == response.Part))
             ? new TiledMatrix(axis.Count, responses.Count, forces.Count)
             : null;
@@ -50,6 +51,12 @@ public sealed class PathTransfers
     /// point of the joint; zero for a joint that does not touch the response's part.
     /// </summary>
     public TiledMatrix FromJoints { get; }
+
+    /// <summary>
+    /// Constraints × responses: what a response gains per metre (rad) by which the two points of a joint are kept apart, in the unit of the
+    /// response per m.
+    /// </summary>
+    public TiledMatrix Adjoint { get; }
 
     /// <summary>D: responses × forces, zero for a force on another part; null where no force acts on the part of a response.</summary>
     public TiledMatrix? Direct { get; }

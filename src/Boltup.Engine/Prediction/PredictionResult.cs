@@ -2,6 +2,7 @@ using System.Numerics;
 using Boltup.Engine.Acoustics;
 using Boltup.Engine.Diagnostics;
 using Boltup.Engine.Paths;
+using Boltup.Engine.Sensitivity;
 using Boltup.Engine.Spectra;
 using Boltup.Engine.Targets;
 
@@ -44,6 +45,9 @@ public sealed record OperationResult(
 
     /// <summary>For each response its paths by forces and, where anything is joined, by joints; empty where nobody asked for paths.</summary>
     public IReadOnlyList<ResponsePaths> RankedPaths { get; init; } = [];
+
+    /// <summary>For each response what its overall level depends on; empty where nobody asked for paths.</summary>
+    public IReadOnlyList<ResponseSensitivities> Sensitivities { get; init; } = [];
 }
 
 /// <summary>One response over the lines of its operation.</summary>

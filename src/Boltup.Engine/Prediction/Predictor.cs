@@ -1,8 +1,8 @@
 using Boltup.Engine.Coupling;
 using Boltup.Engine.Diagnostics;
 using Boltup.Engine.Kernels;
-using Boltup.Engine.Parts;
 using Boltup.Engine.Paths;
+using Boltup.Engine.Sensitivity;
 using Boltup.Engine.Spectra;
 using Boltup.Engine.Targets;
 
@@ -37,17 +37,36 @@ public sealed class Predictor
         AssemblyModel assembly, DiagnosticBag diagnostics, bool withPaths, CancellationToken cancellation = default)
     {
         var predictor = new Predictor(assembly);
-        return predictor.ReadParts(diagnostics) is { } frfs ? predictor.Solve(frfs, diagnostics, withPaths, cancellation) : null;
+        if (predictor.ReadParts(new PartFrfs(), diagnostics) is not { } frfs)
+        {
+            return null;
+        }
+
+        PathAnalysis? paths = withPaths ? new PathAnalysis(assembly, predictor._layout, predictor._cases) : null;
+        return predictor.Solve(frfs, diagnostics, paths, paths?.Transfers, cancellation)?.Result;
+    }
+
+    /// <summary>Computes the responses, and keeps what they were made from with transfers from the joints and adjoints.</summary>
+    /// <param name="shared">FRFs that were read already, and that will be used again.</param>
+    internal static (PredictionResult Result, PredictionRun Run)? Run(
+        AssemblyModel assembly, PartFrfs shared, DiagnosticBag diagnostics, CancellationToken cancellation)
+    {
+        var predictor = new Predictor(assembly);
+        var transfers = new PathTransfers(predictor._layout, assembly.Axis, assembly.Responses, forces: []);
+        return predictor.ReadParts(shared, diagnostics) is { } frfs
+            && predictor.Solve(frfs, diagnostics, paths: null, transfers, cancellation) is { Run: { } run, Result: var result }
+            ? (result, run)
+            : null;
     }
 
     /// <summary>Judges an assembly and the FRFs that it needs without coupling them.</summary>
     public static void Check(AssemblyModel assembly, DiagnosticBag diagnostics)
     {
-        new Predictor(assembly).ReadParts(diagnostics);
+        new Predictor(assembly).ReadParts(new PartFrfs(), diagnostics);
         MountRules.HintAtCausality(assembly, diagnostics);
     }
 
-    private TiledMatrix?[]? ReadParts(DiagnosticBag diagnostics)
+    private TiledMatrix?[]? ReadParts(PartFrfs known, DiagnosticBag diagnostics)
     {
         if (!AssemblyRules.Check(_assembly, _layout, diagnostics))
         {
@@ -60,7 +79,7 @@ public sealed class Predictor
         {
             if (_layout.Parts[i].IsUsed)
             {
-                frfs[i] = ReadPart(_layout.Parts[i], _assembly.Axis, bags[i]);
+                frfs[i] = known.Of(_layout.Parts[i], _assembly.Axis, bags[i]);
             }
         });
         foreach (DiagnosticBag bag in bags)
@@ -71,31 +90,21 @@ public sealed class Predictor
         return Array.Exists(bags, bag => bag.HasErrors) ? null : frfs;
     }
 
-    private static TiledMatrix? ReadPart(PartLayout part, FrequencyAxis axis, DiagnosticBag diagnostics)
+    /// <param name="paths">What to work out of every response; null for nothing.</param>
+    /// <param name="transfers">What to fill on the way: those of the paths, or by joints only.</param>
+    private Prediction? Solve(
+        TiledMatrix?[] frfs, DiagnosticBag diagnostics, PathAnalysis? paths, PathTransfers? transfers, CancellationToken cancellation)
     {
-        TiledMatrix? frf = part.Part.Evaluate(axis, part.Rows, part.Columns, diagnostics);
-        if (frf is not null)
-        {
-            FrfQuality.Check(part.Part.Name, part.Part.Origin, axis, part.Interface, frf, diagnostics);
-        }
-
-        return frf;
-    }
-
-    private PredictionResult? Solve(TiledMatrix?[] frfs, DiagnosticBag diagnostics, bool withPaths, CancellationToken cancellation)
-    {
-        PathAnalysis? paths = withPaths ? new PathAnalysis(_assembly, _layout, _cases) : null;
-        CouplingSolution solution = new CouplingSolver(_layout, _assembly.Axis, frfs)
-            .Solve(_cases.Forces, _cases.Count, cancellation, paths?.Transfers);
+        CouplingSolution solution = new CouplingSolver(_layout, _assembly.Axis, frfs).Solve(_cases.Forces, _cases.Count, cancellation, transfers);
         if (!new ConditionCheck(_layout, _assembly.Axis, frfs).Check(solution.Condition, diagnostics))
         {
             return null;
         }
 
-        var reader = new OperationReader(_assembly, _layout, solution, _responseRows);
-        OperationResult[] operations = [.. _assembly.Operations.Select((_, i) => ReadOperation(i, reader, paths, solution))];
+        PredictionRun? run = transfers is null ? null : new PredictionRun(_assembly, _layout, _cases, frfs, _responseRows, solution, transfers);
+        OperationResult[] operations = ReadOperations(solution, paths, run);
         IReadOnlyList<TargetVerdict> verdicts = TargetCheck.Run(_assembly.Targets, operations, diagnostics);
-        return new PredictionResult(
+        var result = new PredictionResult(
             _assembly.Title,
             _assembly.Axis,
             operations,
@@ -106,11 +115,20 @@ public sealed class Predictor
             Mounts = MountSpectra.Of(_assembly),
             Verdicts = verdicts,
         };
+        return new Prediction(result, run);
     }
 
-    private OperationResult ReadOperation(int index, OperationReader reader, PathAnalysis? paths, CouplingSolution solution)
+    private OperationResult[] ReadOperations(CouplingSolution solution, PathAnalysis? paths, PredictionRun? run)
     {
-        OperationResult result = reader.Read(_assembly.Operations[index], _cases[index]);
-        return paths is null ? result : paths.AddTo(result, index, solution);
+        var reader = new OperationReader(_assembly, _layout, solution, _responseRows);
+        SensitivityAnalysis? sensitivities = paths is null || run is null ? null : new SensitivityAnalysis(run);
+        return [.. _assembly.Operations.Select((operation, i) =>
+        {
+            OperationResult result = reader.Read(operation, _cases[i]);
+            return paths is null || sensitivities is null ? result : sensitivities.AddTo(paths.AddTo(result, i, solution), i);
+        })];
     }
+
+    /// <param name="Run">What the result was made from; null where nobody asked for transfers.</param>
+    private sealed record Prediction(PredictionResult Result, PredictionRun? Run);
 }

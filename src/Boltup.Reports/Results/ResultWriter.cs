@@ -15,6 +15,7 @@ public static class ResultWriter
     public const string TonesFile = "tones.csv";
     public const string ContributionsFile = "contributions.csv";
     public const string ContributionLinesFile = "contribution_lines.csv";
+    public const string SensitivityFile = "sensitivity.csv";
     public const string SummaryFile = "summary.json";
     public const string ReportFile = "report.html";
 
@@ -51,6 +52,7 @@ public static class ResultWriter
         }
 
         output.Write(ContributionsFile, stream => PathTables.WriteContributions(stream, result));
+        output.Write(SensitivityFile, stream => SensitivityTables.Write(stream, result));
         if (options.PathLines)
         {
             output.Write(ContributionLinesFile, stream => PathTables.WriteLines(stream, result));

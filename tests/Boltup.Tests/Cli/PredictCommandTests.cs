@@ -20,7 +20,7 @@ public class PredictCommandTests
             [
                 ".boltup-files", "5400-rpm-driver-ear-paths.png", "5400-rpm-driver-ear.png", "5400-rpm-floor-paths.png", "5400-rpm-floor.png",
                 "5400-rpm-joint-forces.png", "5400-rpm-passenger-ear-paths.png", "5400-rpm-passenger-ear.png", "5400-rpm-seat-rail-paths.png",
-                "5400-rpm-seat-rail.png", "5400-rpm-steering-column-paths.png", "5400-rpm-steering-column.png", "bands.csv", "contributions.csv", "joint_forces.csv", "levels.csv", "mount-base.png", "overview.png", "report.html", "responses.csv", "summary.json", "tones.csv",
+                "5400-rpm-seat-rail.png", "5400-rpm-steering-column-paths.png", "5400-rpm-steering-column.png", "bands.csv", "contributions.csv", "joint_forces.csv", "levels.csv", "mount-base.png", "overview.png", "report.html", "responses.csv", "sensitivity.csv", "summary.json", "tones.csv",
             ],
             files);
     }
