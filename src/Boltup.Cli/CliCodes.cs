@@ -3,7 +3,7 @@ using Boltup.Engine.Diagnostics;
 namespace Boltup.Cli;
 
 /// <summary>Diagnostics of the command line itself.</summary>
-internal static class CliCodes
+internal static partial class CliCodes
 {
     public static readonly DiagnosticCode KernelsNotAvailable = new(
         "CLI001",

@@ -10,6 +10,9 @@ internal static class ExitCode
     /// <summary>Done, and a target is missed.</summary>
     public const int TargetMissed = 1;
 
+    /// <summary>Done, and a comparison found a regression.</summary>
+    public const int Regressed = 1;
+
     /// <summary>The input is wrong.</summary>
     public const int WrongInput = 2;
 

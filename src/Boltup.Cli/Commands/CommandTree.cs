@@ -11,6 +11,7 @@ internal static class CommandTree
         + "Example: boltup predict configs/minibus.assembly.yaml -o out/minibus")
     {
         PredictCommand.Build(screen, cancellation),
+        CompareCommand.Build(screen, cancellation),
         IdentifyCommand.Build(screen),
         MountCommand.Build(screen),
         CheckCommand.Build(screen),

@@ -26,6 +26,7 @@ internal sealed partial class AssemblyBinder(DiagnosticBag diagnostics)
         root["joint_gap"]?.Si(Dimension.Length) ?? DefaultJointGapM)
     {
         Targets = [.. root["targets"].Entries().Select(BindTarget)],
+        Root = root,
     };
 
     private PlacedPartDocument BindPart(YamlEntry entry)

@@ -22,6 +22,9 @@ public sealed record AssemblyDocument(
     /// <summary>Limits on responses.</summary>
     public IReadOnlyList<TargetDocument> Targets { get; init; } = [];
 
+    /// <summary>The nodes that it was bound from, with the bases merged in.</summary>
+    public required YamlMap Root { get; init; }
+
     public PlacedPartDocument? FindPart(string name) => Parts.FirstOrDefault(part => part.Name.Value == name);
 
     public MountDocument? FindMount(string name) => Mounts.FirstOrDefault(mount => mount.Name.Value == name);

@@ -26,7 +26,7 @@ public static class AssemblyShape
     [
         new("stiffening", new NumberKind("2.5", Sign.Positive), "stiffness at high over that at low frequency, at least 1", IsRequired: true),
         new("time", new QuantityKind(Dimension.Time, "0.002", Sign.Positive), "relaxation time", IsRequired: true),
-        new("order", new NumberKind("0.6", Sign.Positive), "1 for the Zener law, which is the default; less for the fractional Zener law"),
+        new("order", new NumberKind("0.6", Sign.Positive), "1 for the Zener law, which is the default; less for the fractional Zener law") { Default = "1" },
     ]);
 
     private static readonly PathKind TableFile = new("a table of dynamic stiffness");
@@ -50,10 +50,10 @@ public static class AssemblyShape
         new("series", MountNames, "mounts one behind the other, beginning at the first point of the joint"),
         new("parallel", MountNames, "mounts side by side"),
         new("relaxation", new ShapeKind(Relaxation), "how the stiffness rises with frequency from its static value"),
-        new("loss_factor", new NumberKind("0.12", Sign.NotNegative), "loss factor of the stiffness"),
+        new("loss_factor", new NumberKind("0.12", Sign.NotNegative), "loss factor of the stiffness") { Default = "0" },
         new("damping", SharedKinds.PerDirection("damping", "12", Dimension.Damping, Dimension.RotationalDamping),
             "viscous damping per direction"),
-        new("scale", new NumberKind("0.8", Sign.Positive), "factor on the law of the other mount"),
+        new("scale", new NumberKind("0.8", Sign.Positive), "factor on the law of the other mount") { Default = "1" },
     ],
     KeyRule.ExactlyOne("stiffness", "stiffness_matrix", "like", "table", "series", "parallel"),
     KeyRule.Needs("relaxation", "stiffness", "stiffness_matrix"),
@@ -82,10 +82,10 @@ public static class AssemblyShape
 
     private static readonly Shape Operation = new("an operation",
     [
-        new("title", new TextKind("a title"), "what the running condition is"),
+        new("title", new TextKind("a title"), "what the running condition is") { IsRemark = true },
         new("blocked_forces", ForceList, "blocked forces of sources at their interfaces"),
         new("applied_forces", ForceList, "forces from outside, at any dof"),
-        new("sum", new ChoiceKind("phase", "energy"), "how several files add up; in phase by default"),
+        new("sum", new ChoiceKind("phase", "energy"), "how several files add up; in phase by default") { Default = "phase" },
         new("amplitude", new ChoiceKind("rms", "peak"), "what the magnitudes in the files are"),
     ],
     KeyRule.AtLeastOne("blocked_forces", "applied_forces"));
@@ -93,7 +93,7 @@ public static class AssemblyShape
     private static readonly Shape Response = new("a response",
     [
         new("at", new TextKind("`part.point.direction`"), "the dof", IsRequired: true),
-        new("as", new ChoiceKind("acceleration", "velocity", "displacement"), "quantity of a motion; acceleration by default"),
+        new("as", new ChoiceKind("acceleration", "velocity", "displacement"), "quantity of a motion; acceleration by default") { Default = "acceleration" },
         new("weighting", new ChoiceKind("Wk", "Wd", "Wh"), "how people feel it: body vertical, body horizontal, hand and arm"),
     ]);
 
@@ -104,7 +104,7 @@ public static class AssemblyShape
         new("response", new TextKind("the name of a response"), "the response that it limits", IsRequired: true),
         new("limit", Level, "overall level that must not be exceeded, in dB re the reference of the quantity"),
         new("third_octaves", new NamedKind("band", Level, Minimum: 1), "levels of third octaves, by their nominal centres such as `63 Hz`"),
-        new("weighting", new ChoiceKind("A", "C", "Z", "Wk", "Wd", "Wh"), "frequency weighting of sound or of vibration that people feel; none (Z) by default"),
+        new("weighting", new ChoiceKind("A", "C", "Z", "Wk", "Wd", "Wh"), "frequency weighting of sound or of vibration that people feel; none (Z) by default") { Default = "Z" },
         new("from", new QuantityKind(Dimension.Frequency, "20", Sign.NotNegative), "first frequency that counts"),
         new("to", new QuantityKind(Dimension.Frequency, "1000", Sign.Positive), "last frequency that counts"),
         new("operations", new ListKind(new TextKind("the name of an operation"), IsSet: true), "operations that it holds for; all by default"),
@@ -115,14 +115,14 @@ public static class AssemblyShape
     [
         new("boltup", new ChoiceKind("assembly/1"), "kind and version of the document", IsRequired: true),
         new("based_on", new PathKind("an assembly file"), "assembly whose keys this one takes over and changes"),
-        new("title", new TextKind("a title"), "what the assembly is"),
+        new("title", new TextKind("a title"), "what the assembly is") { IsRemark = true },
         new("frequencies", new ShapeKind(SharedKinds.Frequencies), "lines to compute; by default those that the parts share"),
         new("parts", new NamedKind("part", new EitherKind(PartFile, new ShapeKind(PlacedPart)), IsDotted: true, Minimum: 1),
             "the parts and where they are", IsRequired: true),
         new("mounts", new NamedKind("mount", new ShapeKind(Mount)), "resilient elements"),
         new("joints", new NamedKind("joint", new ShapeKind(Joint)), "connections of two points"),
         new("joint_gap", new QuantityKind(Dimension.Length, "5", Sign.NotNegative),
-            "distance up to which joined points count as coinciding; 5 mm by default"),
+            "distance up to which joined points count as coinciding; 5 mm by default") { Default = "5 mm" },
         new("operations", new NamedKind("operation", new ShapeKind(Operation), MakesFileNames: true), "running conditions"),
         new("responses", new NamedKind("response", new ShapeKind(Response), MakesFileNames: true), "dofs that somebody cares about"),
         new("targets", new NamedKind("target", new ShapeKind(Target)), "limits on responses"),

@@ -20,7 +20,10 @@ internal sealed class ForcesBinder(DiagnosticBag diagnostics)
             holds["from"]!.Si(Dimension.Frequency),
             holds["to"]!.Si(Dimension.Frequency),
             holds["because"]?.Text(),
-            [.. root["operations"].Entries().Select(BindOperation)]);
+            [.. root["operations"].Entries().Select(BindOperation)])
+        {
+            Root = root,
+        };
     }
 
     private static ForcesOperationDocument BindOperation(YamlEntry entry)

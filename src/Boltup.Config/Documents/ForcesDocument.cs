@@ -15,4 +15,8 @@ public sealed record ForcesDocument(
     double FromHz,
     double ToHz,
     string? Because,
-    IReadOnlyList<ForcesOperationDocument> Operations);
+    IReadOnlyList<ForcesOperationDocument> Operations)
+{
+    /// <summary>The nodes that it was bound from.</summary>
+    public required YamlMap Root { get; init; }
+}

@@ -14,7 +14,10 @@ internal sealed class PartBinder(DiagnosticBag diagnostics)
         [.. root["points"].Entries().Select(point => PointBinder.Bind(point, diagnostics))],
         root["lumped"] is YamlMap lumped ? BindLumped(lumped) : BindFrf(root["frf"]!),
         root["reciprocity"] is YamlNode fill ? new(true, fill.Span) : null,
-        VirtualPointBinder.Bind(root["virtual_points"], diagnostics));
+        VirtualPointBinder.Bind(root["virtual_points"], diagnostics))
+    {
+        Root = root,
+    };
 
     private static FrfModelDocument BindFrf(YamlNode files) => new([.. files.Items().Cast<YamlMap>().Select(FrfFileBinder.Bind)]);
 

@@ -14,6 +14,9 @@ public sealed record PartDocument(
     Marked<bool>? FillsReciprocity,
     IReadOnlyList<VirtualPointDocument> VirtualPoints)
 {
+    /// <summary>The nodes that it was bound from.</summary>
+    public required YamlMap Root { get; init; }
+
     /// <summary>Listed points, then virtual ones.</summary>
     public IEnumerable<PointDocument> AllPoints => Points.Concat(VirtualPoints.Select(point => point.AsPoint));
 

@@ -17,7 +17,7 @@ public static class PartShape
         new("between", new ListKind(new TextKind("the name of a mass or `ground`"), 2, 2),
             "the two masses, or a mass and ground", IsRequired: true),
         new("stiffness", new QuantityKind(Dimension.Stiffness, "120", Sign.NotNegative), "stiffness"),
-        new("loss_factor", new NumberKind("0.02", Sign.NotNegative), "loss factor of the stiffness"),
+        new("loss_factor", new NumberKind("0.02", Sign.NotNegative), "loss factor of the stiffness") { Default = "0" },
         new("damping", new QuantityKind(Dimension.Damping, "12", Sign.NotNegative), "viscous damping"),
     ],
     KeyRule.AtLeastOne("stiffness", "damping"), KeyRule.Needs("loss_factor", "stiffness"));
@@ -33,7 +33,7 @@ public static class PartShape
     public static readonly Shape Root = new("a part",
     [
         new("boltup", new ChoiceKind("part/1"), "kind and version of the document", IsRequired: true),
-        new("title", new TextKind("a title"), "what the part is"),
+        new("title", new TextKind("a title"), "what the part is") { IsRemark = true },
         new("points", new NamedKind("point", new ShapeKind(SharedKinds.Point), IsDotted: true), "named places on the part"),
         new("virtual_points", VirtualPointShape.Named, "points of six dofs with sensors and impacts around them"),
         new("frf", new ListKind(new ShapeKind(FrfFile)), "files of measured or computed FRFs"),

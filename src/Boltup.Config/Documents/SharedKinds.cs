@@ -39,8 +39,12 @@ internal static class SharedKinds
     ]);
 
     /// <summary>A map from directions to quantities, of one dimension for translations and another for rotations.</summary>
-    public static ShapeKind PerDirection(string what, string example, Dimension translation, Dimension rotation) => new(new Shape(what,
-        [.. MotionDirection.Allowed.Select(name =>
+    public static ShapeKind PerDirection(string what, string example, Dimension translation, Dimension rotation)
+    {
+        Dimension DimensionOf(string name) => name.Length == 1 ? translation : rotation;
+        return new ShapeKind(new Shape(what, [.. MotionDirection.Allowed.Select(name =>
             new KeyDefinition(
-                name, new QuantityKind(name.Length == 1 ? translation : rotation, example, Sign.NotNegative), $"{what} along {name}"))]));
+                name, new QuantityKind(DimensionOf(name), example, Sign.NotNegative), $"{what} along {name}")
+            { Default = $"0 {DimensionOf(name).SiUnit}" })]));
+    }
 }
