@@ -10,7 +10,7 @@ internal static class ExitCode
     /// <summary>Done, and a target is missed.</summary>
     public const int TargetMissed = 1;
 
-    /// <summary>Done, and a comparison found a regression.</summary>
+    /// <summary>Done, and a level rose beyond the tolerance of a comparison, or a target was lost.</summary>
     public const int Regressed = 1;
 
     /// <summary>The input is wrong.</summary>

@@ -85,7 +85,7 @@ internal sealed class CompareCommand(Screen screen, CancellationToken cancellati
         }
 
         return diagnostics.HasErrors || report is null ? ExitCode.Of(diagnostics)
-            : report.Regressions.Count > 0 ? ExitCode.Regressed
+            : report.IsWorse ? ExitCode.Regressed
             : ExitCode.Done;
     }
 

@@ -37,6 +37,7 @@ internal static class ComparisonText
             screen.Out.WriteLine();
         }
 
+        PrintTargets(screen, effect);
         foreach (ResponseChange response in isFull ? effect.Responses : [])
         {
             PrintResponse(screen, response);
@@ -63,6 +64,28 @@ internal static class ComparisonText
         }
 
         table.Write(screen.Out);
+    }
+
+    private static void PrintTargets(Screen screen, ComparedPredictions effect)
+    {
+        if (effect.Targets.Count == 0)
+        {
+            return;
+        }
+
+        var table = new TextTable(("target", false), ("operation", false), ("base", false), ("changed", false), ("outcome", false));
+        foreach (TargetChange target in effect.Targets)
+        {
+            table.Add(
+                target.Changed.Target.Name,
+                target.Changed.Operation,
+                VerdictText.Margin(target.Base),
+                VerdictText.Margin(target.Changed),
+                ComparisonWords.Outcome(target));
+        }
+
+        table.Write(screen.Out);
+        screen.Out.WriteLine();
     }
 
     private static void PrintResponse(Screen screen, ResponseChange response)

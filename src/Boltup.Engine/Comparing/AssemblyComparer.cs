@@ -23,8 +23,14 @@ public static class AssemblyComparer
 
         var attribution = new LinearAttribution(one.Run, other.Run);
         ResponseChange[] responses = [.. one.Result.Operations.SelectMany((_, i) => CompareOperation(one, i, other, attribution))];
-        return new ComparedPredictions(one.Result, other.Result, responses, MissingSides.Of(one.Result, other.Result), attribution.NotAttributed);
+        return new ComparedPredictions(
+            one.Result, other.Result, responses, CompareTargets(one.Result, other.Result), MissingSides.Of(one.Result, other.Result), attribution.NotAttributed);
     }
+
+    private static TargetChange[] CompareTargets(PredictionResult one, PredictionResult other) =>
+        [.. one.Verdicts.SelectMany(verdict => other.Verdicts
+            .Where(partner => MissingSides.AreSame(verdict, partner))
+            .Select(partner => new TargetChange(verdict, partner)))];
 
     private static IEnumerable<ResponseChange> CompareOperation(
         (PredictionResult Result, PredictionRun Run) one, int index, (PredictionResult Result, PredictionRun Run) other, LinearAttribution attribution)

@@ -1,4 +1,5 @@
 using Boltup.Engine.Prediction;
+using Boltup.Engine.Targets;
 
 namespace Boltup.Engine.Comparing;
 
@@ -17,7 +18,16 @@ internal static class MissingSides
         .. before.Operations.SelectMany(operation => Apart(operation, changed)),
         .. Responses(before, changed, "only the base has"),
         .. Responses(changed, before, "only the changed assembly has"),
+        .. Targets(before, changed, "only the base has"),
+        .. Targets(changed, before, "only the changed assembly has"),
     ];
+
+    /// <summary>Whether both judge the same target in the same operation.</summary>
+    public static bool AreSame(TargetVerdict one, TargetVerdict other) => one.Target.Name == other.Target.Name && one.Operation == other.Operation;
+
+    private static IEnumerable<string> Targets(PredictionResult one, PredictionResult other, string words) =>
+        one.Verdicts.Where(verdict => !other.Verdicts.Any(partner => AreSame(verdict, partner)))
+            .Select(verdict => $"{words} target `{verdict.Target.Name}` in operation `{verdict.Operation}`");
 
     private static IEnumerable<string> Operations(PredictionResult one, PredictionResult other, string words) =>
         one.Operations.Where(operation => Find(operation, other) is null).Select(operation => $"{words} operation `{operation.Name}`");

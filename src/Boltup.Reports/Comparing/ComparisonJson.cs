@@ -1,4 +1,5 @@
 using System.Text.Json;
+using Boltup.Engine.Acoustics;
 using Boltup.Engine.Comparing;
 using Boltup.Reports.Results;
 
@@ -33,7 +34,7 @@ public static class ComparisonJson
     {
         { Differences.Count: 0 } => "identical",
         { Effect: null } => "no_effect",
-        { Regressions.Count: > 0 } => "regressed",
+        { IsWorse: true } => "regressed",
         _ => "passed",
     };
 
@@ -68,8 +69,27 @@ public static class ComparisonJson
         }
 
         json.WriteEndArray();
+        WriteTargets(json, effect?.Targets ?? []);
         WriteTexts(json, "not_compared", effect?.NotCompared ?? []);
         WriteTexts(json, "not_attributed", effect?.NotAttributed ?? []);
+    }
+
+    private static void WriteTargets(Utf8JsonWriter json, IReadOnlyList<TargetChange> targets)
+    {
+        json.WriteStartArray("targets");
+        foreach (TargetChange target in targets)
+        {
+            json.WriteStartObject();
+            json.WriteString("target", target.Changed.Target.Name);
+            json.WriteString("operation", target.Changed.Operation);
+            json.WriteFinite("base_margin_db", target.Base.MarginDb);
+            json.WriteFinite("changed_margin_db", target.Changed.MarginDb);
+            json.WriteBoolean("lost", target.IsLost);
+            json.WriteBoolean("gained", target.IsGained);
+            json.WriteEndObject();
+        }
+
+        json.WriteEndArray();
     }
 
     private static void WriteResponse(Utf8JsonWriter json, ResponseChange response)

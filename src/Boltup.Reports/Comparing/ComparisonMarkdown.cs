@@ -24,6 +24,7 @@ public static class ComparisonMarkdown
         if (report.Effect is { } effect)
         {
             AppendLevels(text, effect);
+            AppendTargets(text, effect);
             AppendNotCompared(text, effect);
             AppendDetails(text, "Third octaves", Bands(effect));
             AppendDetails(text, "Which edit did what, to first order", $"{Edits(effect)}\n{MarkdownText.Of(ComparisonWords.Linearity(effect))}\n");
@@ -62,6 +63,22 @@ public static class ComparisonMarkdown
                     ComparisonWords.LargestBand(response) is { } band ? $"{band.Band}: {SignedText.Of(band.Level.Decibels, 1)}" : "",
                 })));
         }
+    }
+
+    private static void AppendTargets(StringBuilder text, ComparedPredictions effect)
+    {
+        string table = Table(
+            ["target", "operation", "base", "changed", "outcome"],
+            [false, false, false, false, false],
+            effect.Targets.Select(target => new[]
+            {
+                MarkdownText.Of(target.Changed.Target.Name),
+                MarkdownText.Of(target.Changed.Operation),
+                VerdictText.Margin(target.Base),
+                VerdictText.Margin(target.Changed),
+                ComparisonWords.Outcome(target),
+            }));
+        text.Append(table.Length > 0 ? $"\n{table}" : "");
     }
 
     private static void AppendNotCompared(StringBuilder text, ComparedPredictions effect)

@@ -19,6 +19,12 @@ public sealed record ComparisonReport(
     IReadOnlyList<InputFingerprint> ChangedInputs,
     string ProgramVersion)
 {
+    /// <summary>The targets that were kept before and are missed now.</summary>
+    public IReadOnlyList<TargetChange> Lost => [.. (Effect?.Targets ?? []).Where(target => target.IsLost)];
+
+    /// <summary>Whether the change makes anything worse than it may.</summary>
+    public bool IsWorse => Regressions.Count + Lost.Count > 0;
+
     /// <summary>The responses whose overall level rises by more than the tolerance, or is not known any more.</summary>
     public IReadOnlyList<ResponseChange> Regressions =>
         [.. (Effect?.Responses ?? []).Where(response => !(response.Overall.Decibels <= ToleranceDb)).OrderByDescending(response => response.Overall.Decibels)];

@@ -1,4 +1,5 @@
 using System.Globalization;
+using Boltup.Engine.Acoustics;
 using Boltup.Engine.Comparing;
 using Boltup.Reports.Results;
 
@@ -31,12 +32,29 @@ public static class ComparisonWords
             return "The assemblies have no response in common.";
         }
 
+        return $"{Levels(report, effect)}{Targets(effect)}";
+    }
+
+    private static string Levels(ComparisonReport report, ComparedPredictions effect)
+    {
         string tolerance = Number(report.ToleranceDb);
         return report.Regressions.Count == 0
             ? $"No response rises by more than {tolerance} dB."
             : $"{report.Regressions.Count} of {Responses(effect.Responses.Count)} {(report.Regressions.Count == 1 ? "rises" : "rise")} by more than {tolerance} dB: "
                 + $"{string.Join(", ", report.Regressions.Select(Rise))}.";
     }
+
+    private static string Targets(ComparedPredictions effect)
+    {
+        string[] lost = [.. effect.Targets.Where(target => target.IsLost).Select(Name)];
+        string[] gained = [.. effect.Targets.Where(target => target.IsGained).Select(Name)];
+        return (lost.Length > 0 ? $" Targets lost: {string.Join(", ", lost)}." : "") + (gained.Length > 0 ? $" Targets gained: {string.Join(", ", gained)}." : "");
+    }
+
+    private static string Name(TargetChange target) => $"{target.Changed.Target.Name} in {target.Changed.Operation}";
+
+    /// <summary>What became of a target, in a word; nothing for one that is as it was.</summary>
+    public static string Outcome(TargetChange target) => target.IsLost ? "lost" : target.IsGained ? "gained" : "";
 
     /// <summary>One difference, as in <c>420 N/mm → 300 N/mm (−28.6 %)</c>.</summary>
     public static string Of(InputDifference difference) => difference.Kind switch

@@ -1,4 +1,5 @@
 using System.Numerics;
+using Boltup.Engine.Acoustics;
 using Boltup.Engine.Comparing;
 using Boltup.Engine.Prediction;
 using Boltup.Engine.Spectra;
