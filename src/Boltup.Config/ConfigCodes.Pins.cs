@@ -10,10 +10,4 @@ public static partial class ConfigCodes
         "A pin is the SHA-256 of a file: 64 hexadecimal digits. Anything else cannot be compared with a file.",
         "files: [ { file: ../data/body.unv, sha256: 3f2a } ]",
         "Write the pins anew with `boltup pin --accept`; they are not meant to be edited.");
-
-    public static readonly DiagnosticCode PinsOfAnother = new(
-        "CFG121", "pins of another assembly",
-        "A pins file names the assembly that it belongs to. It was copied or renamed, so its digests say nothing about this assembly.",
-        "boltup: pins/1\nassembly: minibus.assembly.yaml  # in a file that is named after another assembly",
-        "Remove the file, and pin this assembly with `boltup pin`.");
 }

@@ -32,7 +32,7 @@ public sealed class ComparisonPlan : IDisposable
         var found = new DiagnosticBag();
         AssemblyPlan? before = AssemblyPlanner.Plan(basePath, options, diagnostics);
         AssemblyPlan? changed = AssemblyPlanner.Plan(changedPath, options, found);
-        diagnostics.AddRange(found.Items.Where(item => !diagnostics.Items.Any(known => IsSame(known, item))));
+        diagnostics.AddNew(found.Items);
         if (before is not null && changed is not null)
         {
             return new ComparisonPlan(before, changed);
@@ -48,10 +48,6 @@ public sealed class ComparisonPlan : IDisposable
         Base.Dispose();
         Changed.Dispose();
     }
-
-    /// <summary>What is said of a file that both read is said once.</summary>
-    private static bool IsSame(Diagnostic one, Diagnostic other) =>
-        one.Code == other.Code && one.Message == other.Message && one.Span == other.Span;
 
     private PlacedPart Shared(PlacedPart part) => Differences.LeavePart(part.Name)
         ? Base.Assembly.Parts.First(candidate => candidate.Name == part.Name)

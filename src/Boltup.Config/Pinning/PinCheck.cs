@@ -37,7 +37,7 @@ internal sealed class PinCheck(IReadOnlyList<SourceFile> dataFiles, LoadOptions 
         if (!belongs)
         {
             diagnostics.Error(
-                ConfigCodes.PinsOfAnother,
+                PlanCodes.PinsOfAnother,
                 $"these are the pins of `{pins.Assembly.Value}`, expected those of `{expected}`",
                 pins.Assembly.Span,
                 $"run `boltup pin --accept {assembly.DisplayPath}`");

@@ -39,4 +39,11 @@ public static partial class PlanCodes
         "The operating system refuses to create or replace the pins file beside the assembly.",
         "boltup pin /read-only/minibus.assembly.yaml",
         "Check the permissions of the folder.");
+
+    public static readonly DiagnosticCode PinsOfAnother = new(
+        "PLN095",
+        "pins of another assembly",
+        "A pins file names the assembly that it belongs to. It was copied or renamed, so its digests say nothing about this assembly.",
+        "boltup: pins/1\nassembly: minibus.assembly.yaml  # in a file that is named after another assembly",
+        "Remove the file, and pin this assembly with `boltup pin`.");
 }

@@ -15,8 +15,15 @@ public static class AssemblyComparer
         AssemblyModel before, AssemblyModel changed, DiagnosticBag diagnostics, CancellationToken cancellation = default)
     {
         var frfs = new PartFrfs();
-        if (Predictor.Run(before, frfs, diagnostics, cancellation) is not { } one
-            || Predictor.Run(changed, frfs, diagnostics, cancellation) is not { } other)
+        var found = new DiagnosticBag();
+        if (Predictor.Run(before, frfs, diagnostics, cancellation) is not { } one)
+        {
+            return null;
+        }
+
+        (PredictionResult Result, PredictionRun Run)? second = Predictor.Run(changed, frfs, found, cancellation);
+        diagnostics.AddNew(found.Items);
+        if (second is not { } other)
         {
             return null;
         }

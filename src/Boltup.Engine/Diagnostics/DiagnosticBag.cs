@@ -13,6 +13,18 @@ public sealed class DiagnosticBag
 
     public void AddRange(IEnumerable<Diagnostic> diagnostics) => _items.AddRange(diagnostics);
 
+    /// <summary>Adds those that were not said yet, of the same place in the same words.</summary>
+    public void AddNew(IEnumerable<Diagnostic> diagnostics)
+    {
+        foreach (Diagnostic item in diagnostics)
+        {
+            if (!_items.Exists(known => known.Code == item.Code && known.Message == item.Message && known.Span == item.Span))
+            {
+                _items.Add(item);
+            }
+        }
+    }
+
     public void Error(DiagnosticCode code, string message, SourceSpan? span = null, string? help = null, params string[] notes) =>
         Add(Build(code, Severity.Error, message, span, help, notes));
 

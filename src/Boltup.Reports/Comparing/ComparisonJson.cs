@@ -23,10 +23,8 @@ public static class ComparisonJson
         json.WriteString("verdict", Verdict(report));
         WriteDifferences(json, report.Differences);
         WriteEffect(json, report.Effect);
-        json.WritePropertyName("base_inputs");
-        WriteInputs(json, report.BaseInputs);
-        json.WritePropertyName("changed_inputs");
-        WriteInputs(json, report.ChangedInputs);
+        SharedJson.WriteInputs(json, report.BaseInputs, "base_inputs");
+        SharedJson.WriteInputs(json, report.ChangedInputs, "changed_inputs");
         json.WriteEndObject();
     }
 
@@ -153,20 +151,6 @@ public static class ComparisonJson
         foreach (string text in texts)
         {
             json.WriteStringValue(text);
-        }
-
-        json.WriteEndArray();
-    }
-
-    private static void WriteInputs(Utf8JsonWriter json, IReadOnlyList<InputFingerprint> inputs)
-    {
-        json.WriteStartArray();
-        foreach (InputFingerprint input in inputs)
-        {
-            json.WriteStartObject();
-            json.WriteString("file", input.File);
-            json.WriteString("sha256", input.Sha256);
-            json.WriteEndObject();
         }
 
         json.WriteEndArray();

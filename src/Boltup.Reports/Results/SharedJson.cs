@@ -15,9 +15,9 @@ internal static class SharedJson
         json.WriteEndObject();
     }
 
-    public static void WriteInputs(Utf8JsonWriter json, IReadOnlyList<InputFingerprint> inputs)
+    public static void WriteInputs(Utf8JsonWriter json, IReadOnlyList<InputFingerprint> inputs, string name = "inputs")
     {
-        json.WriteStartArray("inputs");
+        json.WriteStartArray(name);
         foreach (InputFingerprint input in inputs)
         {
             json.WriteStartObject();

@@ -39,6 +39,7 @@ internal sealed class ConfigFolder : IDisposable
         "part" => LoadPart(name).Document,
         "bench" => ConfigLoader.LoadBench(name, Options with { WorkingDirectory = Root }, Diagnostics).Document,
         "forces" => ConfigLoader.LoadForces(name, Options with { WorkingDirectory = Root }, Diagnostics).Document,
+        "pins" => ConfigLoader.LoadPins(name, Options with { WorkingDirectory = Root }, Diagnostics).Document,
         _ => LoadAssembly(name).Document,
     };
 

@@ -10,6 +10,9 @@ public class DiagnosticPlaceTests
     private const string Base = "boltup: assembly/1\nparts: { source: source.part.yaml, body: body.part.yaml }\n"
         + "mounts: { soft: { stiffness: { x: 90 N/mm } } }\n";
 
+    private static readonly DiagnosticCase ShortPin = new(
+        "CFG120", "boltup: pins/1\nassembly: a.assembly.yaml\nfiles: [ { file: compressor.uff, sha256: «3f2a» } ]\n", "expected 64 hexadecimal digits");
+
     public static TheoryData<int> PartIndexes => [.. Enumerable.Range(0, PartCases.All.Length)];
 
     public static TheoryData<int> AssemblyIndexes => [.. Enumerable.Range(0, AssemblyCases.All.Length)];
@@ -35,9 +38,12 @@ public class DiagnosticPlaceTests
     public void LoadAssembly_WrongHandover_SaysWhatAndWhere(int index) => Check(BenchCases.Handovers[index], "a.assembly.yaml");
 
     [Fact]
+    public void LoadPins_ShortDigest_SaysWhatAndWhere() => Check(ShortPin, "a.pins.yaml");
+
+    [Fact]
     public void Cases_EveryCode_IsDrawn()
     {
-        IEnumerable<string> drawn = PartCases.All.Concat(AssemblyCases.All).Concat(BenchCases.All).Concat(BenchCases.Handovers).Select(item => item.Code);
+        IEnumerable<string> drawn = PartCases.All.Concat(AssemblyCases.All).Concat(BenchCases.All).Concat(BenchCases.Handovers).Append(ShortPin).Select(item => item.Code);
         Assert.Empty(ConfigCodes.All.Select(code => code.Code).Except(drawn));
     }
 

@@ -78,7 +78,7 @@ public class PinsFileTests
         File.Copy(Path.Combine(folder.Root, "a.assembly.yaml"), Path.Combine(folder.Root, "b.assembly.yaml"));
         File.Copy(Path.Combine(folder.Root, "a.pins.yaml"), Path.Combine(folder.Root, "b.pins.yaml"));
         Assert.False(Plans(folder, "b.assembly.yaml"));
-        Assert.Equal("CFG121", Assert.Single(folder.Diagnostics.Items).Code.Code);
+        Assert.Equal("PLN095", Assert.Single(folder.Diagnostics.Items).Code.Code);
     }
 
     [Fact]

@@ -145,6 +145,16 @@ public class AssemblyComparerTests
         Assert.Equal(1, counting.Evaluations);
     }
 
+    [Fact]
+    public void Compare_WarningOfBothSides_IsSaidOnce()
+    {
+        var diagnostics = new DiagnosticBag();
+        AssemblyModel before = Shared();
+        AssemblyComparer.Compare(before, Triaxial.Of(Softer()) with { Parts = before.Parts }, diagnostics);
+        Assert.NotEmpty(diagnostics.Items);
+        Assert.Equal(diagnostics.Items.Count, diagnostics.Items.DistinctBy(item => item.Message).Count());
+    }
+
     private static DiagonalMount Softer() => new([.. Triaxial.Directions.Select(direction => new SpringDamper(direction, 1.5e5, 0.1, 0))]);
 
     /// <summary>The assembly of the tests, with parts that two assemblies can share.</summary>
