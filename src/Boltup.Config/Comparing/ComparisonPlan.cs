@@ -32,7 +32,7 @@ public sealed class ComparisonPlan : IDisposable
         var found = new DiagnosticBag();
         AssemblyPlan? before = AssemblyPlanner.Plan(basePath, options, diagnostics);
         AssemblyPlan? changed = AssemblyPlanner.Plan(changedPath, options, found);
-        diagnostics.AddNew(found.Items);
+        diagnostics.AddUnsaid(found.Items);
         if (before is not null && changed is not null)
         {
             return new ComparisonPlan(before, changed);

@@ -22,7 +22,7 @@ public static class AssemblyComparer
         }
 
         (PredictionResult Result, PredictionRun Run)? second = Predictor.Run(changed, frfs, found, cancellation);
-        diagnostics.AddNew(found.Items);
+        diagnostics.AddUnsaid(found.Items);
         if (second is not { } other)
         {
             return null;

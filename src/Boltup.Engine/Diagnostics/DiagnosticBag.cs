@@ -14,7 +14,7 @@ public sealed class DiagnosticBag
     public void AddRange(IEnumerable<Diagnostic> diagnostics) => _items.AddRange(diagnostics);
 
     /// <summary>Adds those that were not said yet, of the same place in the same words.</summary>
-    public void AddNew(IEnumerable<Diagnostic> diagnostics)
+    public void AddUnsaid(IEnumerable<Diagnostic> diagnostics)
     {
         foreach (Diagnostic item in diagnostics)
         {
